@@ -1,0 +1,4 @@
+package sample.util;
+
+/** A fair name in a package without meaning. */
+public final class Words {}
