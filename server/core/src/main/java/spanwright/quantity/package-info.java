@@ -1,9 +1,12 @@
 /**
- * Quantities with an exact integer inside: lengths, losses, wavelengths.
+ * Quantities with their unit in the type: lengths, losses, wavelengths.
+ *
+ * <p>Invariants:
  *
  * <ol>
- *   <li>A quantity is exact; floating point appears only inside a formula and at the screen.
- *   <li>A value outside its range does not construct.
+ *   <li>Each quantity holds an exact integer (micrometres, microdecibels, picometres), so sums never drift.
+ *   <li>Floating point appears only when a formula or a screen asks for it.
+ *   <li>A foot is 304,800 micrometres exactly, so a sheath mark in tenths of a foot is exact.
  * </ol>
  */
 @NullMarked
