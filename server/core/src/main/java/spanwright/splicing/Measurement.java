@@ -13,7 +13,7 @@ import spanwright.quantity.Wavelength;
  * @param id lasting identity
  * @param what what was measured, as written: an end, a fiber or a port
  * @param wavelength at which
- * @param aToB true for the direction ab, false for ba
+ * @param direction which way, or null where nobody said
  * @param loss measured; a single way may be below 0
  * @param on when, or null
  * @param by by whom, or null
@@ -23,7 +23,7 @@ public record Measurement(
         int id,
         String what,
         Wavelength wavelength,
-        boolean aToB,
+        @Nullable Direction direction,
         Loss loss,
         @Nullable LocalDate on,
         @Nullable String by,
