@@ -53,6 +53,10 @@ public final class PagedRefs<T> {
         if (index < 0 || index >= size) {
             return null;
         }
+        @Nullable Object[] page = pages[index >>> SHIFT];
+        if (page == null && loader == null) {
+            return null;
+        }
         return (T) page(pages, loader, index >>> SHIFT)[index & MASK];
     }
 

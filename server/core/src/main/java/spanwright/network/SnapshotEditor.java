@@ -1,0 +1,89 @@
+package spanwright.network;
+
+import java.util.ArrayList;
+import java.util.List;
+import spanwright.journal.Change;
+import spanwright.records.EntryRules;
+import spanwright.records.RecordsEditor;
+import spanwright.records.Refusal;
+
+/** Builds the next snapshot from changes. One thread's; dead after {@link #build(int)}. */
+public final class SnapshotEditor {
+
+    private final RecordsEditor records;
+    private final NetworkEditor network;
+    private final EntryRules entryRules;
+    private final EndRules endRules;
+    private final List<Change> changes = new ArrayList<>();
+    private boolean asIf;
+
+    SnapshotEditor(Snapshot base) {
+        this.records = base.records().edit();
+        this.network = new NetworkEditor(base.network(), records);
+        this.entryRules = new EntryRules(records);
+        this.endRules = new EndRules(records, network);
+    }
+
+    /** The records as changed so far, to read and to ask for identities; changes go through {@link #apply}. */
+    public RecordsEditor records() {
+        return records;
+    }
+
+    /**
+     * Applies a change if the rules of entry and the rules of ends allow it.
+     *
+     * @return every rule it breaks, and then it is not applied; nothing where it is
+     */
+    public List<Refusal> apply(Change change) {
+        List<Refusal> refusals = new ArrayList<>(entryRules.refuse(change));
+        refusals.addAll(endRules.refuse(change));
+        if (refusals.isEmpty()) {
+            replay(change);
+            entryRules.applied(change);
+            endRules.applied(change);
+        }
+        return refusals;
+    }
+
+    /** What is wrong with what the applied changes touched, seen as a whole; nothing where all is right. */
+    public List<Refusal> finish() {
+        return entryRules.finish();
+    }
+
+    /** All changes applied or replayed, in order. */
+    public List<Change> changes() {
+        return List.copyOf(changes);
+    }
+
+    /**
+     * Applies a change without asking the rules: one that was asked about when it was posted, or the inverse of such.
+     *
+     * @throws IllegalStateException after {@link #build(String)}
+     */
+    public void replay(Change change) {
+        if (asIf) {
+            throw new IllegalStateException("a planned job is built here already");
+        }
+        network.prepare(change);
+        records.apply(change);
+        network.follow(change);
+        changes.add(change);
+    }
+
+    /**
+     * Builds a planned job, for an answer as if: its planned joints are in the glass, and each wins over what its ends
+     * are in now. The records stay as they are, and no change may follow. A job that nothing names builds nothing.
+     */
+    public void build(String job) {
+        asIf = true;
+        for (int joint : records.plannedJoints(job)) {
+            network.buildPlanned(records.joints().get(joint));
+        }
+    }
+
+    /** The changed snapshot; this editor is not used again. */
+    public Snapshot build(int posting) {
+        Network built = network.build();
+        return new Snapshot(records.build(posting), built);
+    }
+}
