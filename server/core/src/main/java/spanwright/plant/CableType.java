@@ -34,14 +34,29 @@ public record CableType(
         return RecordKind.CABLE_TYPE;
     }
 
-    /** The tube (from 1) in which a fiber (from 1) lies. */
+    /**
+     * The tube (from 1) in which a fiber lies.
+     *
+     * @throws IllegalArgumentException where the type has no such fiber
+     */
     public int tubeOf(int fiber) {
-        return (fiber - 1) / fibersPerTube + 1;
+        return indexOf(fiber) / fibersPerTube + 1;
     }
 
-    /** The position (from 1) of a fiber (from 1) within its tube. */
+    /**
+     * The position (from 1) of a fiber within its tube.
+     *
+     * @throws IllegalArgumentException where the type has no such fiber
+     */
     public int positionInTube(int fiber) {
-        return (fiber - 1) % fibersPerTube + 1;
+        return indexOf(fiber) % fibersPerTube + 1;
+    }
+
+    private int indexOf(int fiber) {
+        if (fiber < 1 || fiber > fibers) {
+            throw new IllegalArgumentException(code + " has fibers 1 to " + fibers + ", not " + fiber);
+        }
+        return fiber - 1;
     }
 
     /** How many tubes there are; the last may be part filled. */

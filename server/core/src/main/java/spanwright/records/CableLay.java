@@ -1,0 +1,174 @@
+package spanwright.records;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import spanwright.plant.Cable;
+import spanwright.plant.CableType;
+import spanwright.plant.Enclosure;
+import spanwright.plant.PlantState;
+import spanwright.plant.RouteLength;
+import spanwright.plant.RunRow;
+import spanwright.plant.SheathMark;
+import spanwright.plant.SheathPositions;
+import spanwright.plant.SheathTie;
+import spanwright.plant.Span;
+import spanwright.plant.Structure;
+import spanwright.quantity.Length;
+
+/**
+ * How one cable lies: its run, the spans it travels in the direction of the run, and its sheath positions. Rows are
+ * named by their index from 0, which is their seq. Immutable; made once and read often.
+ */
+public final class CableLay {
+
+    private final Cable cable;
+    private final CableType type;
+    private final List<RunRow> rows;
+    private final List<Structure> structures;
+    /** The span that leads to each row but row 0, at index row - 1, in the direction of the run. */
+    private final List<RouteLength> routes;
+    private final List<@Nullable Enclosure> enclosures;
+    private final SheathPositions positions;
+    private final long[] routeTo;
+    private final Map<Integer, Integer> indexOfRow = new HashMap<>();
+
+    private CableLay(RecordsView records, Cable cable) {
+        this.cable = cable;
+        this.type = records.cableTypes().get(cable.cableType());
+        this.rows = List.copyOf(records.runOf(cable.id()));
+        this.structures = rows.stream()
+                .map(row -> records.structures().get(row.structure()))
+                .toList();
+        this.enclosures = rows.stream().map(row -> inService(records, row)).toList();
+        this.routes = routes(records);
+        this.routeTo = new long[rows.size()];
+        for (int row = 1; row < rows.size(); row++) {
+            routeTo[row] = routeTo[row - 1] + routes.get(row - 1).length().micrometres();
+        }
+        for (int row = 0; row < rows.size(); row++) {
+            indexOfRow.put(rows.get(row).id(), row);
+        }
+        this.positions = SheathPositions.of(
+                rows.stream().map(RunRow::slack).toList(),
+                routes.stream().map(RouteLength::length).toList(),
+                ties(records));
+    }
+
+    /**
+     * The lay of a cable that has a run.
+     *
+     * @param cable identity of the cable
+     */
+    public static CableLay of(RecordsView records, int cable) {
+        return new CableLay(records, records.cables().get(cable));
+    }
+
+    private static @Nullable Enclosure inService(RecordsView records, RunRow row) {
+        return records.findPassAt(row.id())
+                .map(pass -> records.enclosures().get(pass.enclosure()))
+                .filter(enclosure -> enclosure.state() == PlantState.IN_SERVICE)
+                .orElse(null);
+    }
+
+    private List<RouteLength> routes(RecordsView records) {
+        List<RouteLength> list = new ArrayList<>();
+        for (int row = 1; row < rows.size(); row++) {
+            Integer id = rows.get(row).span();
+            if (id == null) {
+                throw new IllegalStateException("no span leads to row " + row + " of " + cable.code());
+            }
+            Span span = records.spans().get(id);
+            RouteLength route = RouteLength.of(
+                    span,
+                    records.structures().get(span.from()).position(),
+                    records.structures().get(span.to()).position());
+            list.add(span.to() == rows.get(row).structure() ? route : route.reversed());
+        }
+        return List.copyOf(list);
+    }
+
+    private List<SheathTie> ties(RecordsView records) {
+        List<SheathTie> ties = new ArrayList<>();
+        for (int row = 0; row < rows.size(); row++) {
+            int index = row;
+            records.sheathMarks()
+                    .owned(Relation.RUN_ROW_MARKS, rows.get(row).id())
+                    .filter(mark -> mark.ink().equals(cable.marksInk()))
+                    .forEach(mark -> addTies(ties, index, mark));
+        }
+        return ties;
+    }
+
+    private static void addTies(List<SheathTie> ties, int row, SheathMark mark) {
+        if (mark.markIn() != null) {
+            ties.add(new SheathTie(row, false, mark.markIn(), mark.unit(), mark.readOn()));
+        }
+        if (mark.markOut() != null) {
+            ties.add(new SheathTie(row, true, mark.markOut(), mark.unit(), mark.readOn()));
+        }
+    }
+
+    /** The cable. */
+    public Cable cable() {
+        return cable;
+    }
+
+    /** Its type. */
+    public CableType type() {
+        return type;
+    }
+
+    /** Its run, row 0 first. */
+    public List<RunRow> rows() {
+        return rows;
+    }
+
+    /** The index of a run row by its identity; a row of another cable is a bug. */
+    public int index(int runRow) {
+        Integer index = indexOfRow.get(runRow);
+        if (index == null) {
+            throw new IllegalArgumentException("not a run row of " + cable.code() + ": " + runRow);
+        }
+        return index;
+    }
+
+    /** The structure at a row. */
+    public Structure structure(int row) {
+        return structures.get(row);
+    }
+
+    /** The enclosure in service that the cable enters at a row, if any. */
+    public Optional<Enclosure> findEnclosure(int row) {
+        return Optional.ofNullable(enclosures.get(row));
+    }
+
+    /** The span that leads to a row from the one before, in the direction of the run; of row 0 there is none. */
+    public RouteLength route(int row) {
+        return routes.get(row - 1);
+    }
+
+    /** Route length from row 0 to a row, coils apart. */
+    public Length routeTo(int row) {
+        return new Length(routeTo[row]);
+    }
+
+    /** Its sheath positions. */
+    public SheathPositions positions() {
+        return positions;
+    }
+
+    /** Excess length in per cent: this reel's own, else its type's. */
+    public double overlengthPct() {
+        Double own = cable.overlengthPct();
+        return own == null ? type.overlengthPct() : own;
+    }
+
+    /** The glass in a length of sheath, tray glass apart. */
+    public Length glass(Length sheath) {
+        return sheath.times(1 + overlengthPct() / 100);
+    }
+}
