@@ -23,8 +23,7 @@ public final class BuiltInTable {
     public static List<Row> read(String name) {
         Map<String, Source> sources = new HashMap<>();
         for (Map<String, String> row : rows("sources")) {
-            sources.put(
-                    cell(row, "source"), new Source(cell(row, "text"), SourceStatus.get(cell(row, "status"))));
+            sources.put(cell(row, "source"), new Source(cell(row, "text"), SourceStatus.get(cell(row, "status"))));
         }
         return rows(name).stream().map(cells -> new Row(cells, sources)).toList();
     }
@@ -59,7 +58,8 @@ public final class BuiltInTable {
         List<String> fields = new ArrayList<>();
         StringBuilder field = new StringBuilder();
         boolean quoted = false;
-        for (char letter : line.toCharArray()) {
+        for (int index = 0; index < line.length(); index++) {
+            char letter = line.charAt(index);
             if (letter == '"') {
                 quoted = !quoted;
             } else if (letter == ',' && !quoted) {

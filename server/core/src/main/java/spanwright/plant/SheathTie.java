@@ -15,7 +15,12 @@ import spanwright.quantity.LengthUnit;
  * @param unit its unit
  * @param readOn when it was read, or null
  */
-public record SheathTie(int row, boolean out, BigDecimal number, LengthUnit unit, @Nullable LocalDate readOn) {
+public record SheathTie(
+        int row,
+        boolean out,
+        BigDecimal number,
+        LengthUnit unit,
+        @Nullable LocalDate readOn) {
 
     /** How far along the print the mark stands; a foot is 0.3048 m exactly. */
     public Length mark() {

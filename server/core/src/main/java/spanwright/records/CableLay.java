@@ -31,6 +31,7 @@ public final class CableLay {
     private final List<Structure> structures;
     /** The span that leads to each row but row 0, at index row - 1, in the direction of the run. */
     private final List<RouteLength> routes;
+
     private final List<@Nullable Enclosure> enclosures;
     private final SheathPositions positions;
     private final long[] routeTo;

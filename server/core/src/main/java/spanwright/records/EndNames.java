@@ -71,9 +71,10 @@ public final class EndNames {
     public String anywhere(long key) {
         int owner = EndKey.owner(key);
         return switch (EndKey.kind(key)) {
-            case BACK, AHEAD -> records.findPassAt(owner)
-                    .map(pass -> end(key) + " @ " + enclosure(pass.enclosure()))
-                    .orElseGet(() -> bare(key));
+            case BACK, AHEAD ->
+                records.findPassAt(owner)
+                        .map(pass -> end(key) + " @ " + enclosure(pass.enclosure()))
+                        .orElseGet(() -> bare(key));
             case IN, OUT -> {
                 Splitter splitter = records.splitters().get(owner);
                 yield end(key) + " @ " + enclosure(splitter.enclosure());
