@@ -1,5 +1,9 @@
 package spanwright.plant;
 
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.IntStream;
+
 /**
  * A rising or falling run of numbers: fibers, outputs, tubes or ports.
  *
@@ -38,6 +42,20 @@ public record FiberRange(int first, int last) {
     /** Whether it holds a number. */
     public boolean contains(int number) {
         return number >= Math.min(first, last) && number <= Math.max(first, last);
+    }
+
+    /** Rising numbers as the fewest rising ranges. */
+    public static List<FiberRange> listOf(IntStream rising) {
+        List<FiberRange> ranges = new ArrayList<>();
+        rising.forEach(number -> {
+            int end = ranges.size() - 1;
+            if (end >= 0 && ranges.get(end).last() + 1 == number) {
+                ranges.set(end, new FiberRange(ranges.get(end).first(), number));
+            } else {
+                ranges.add(of(number));
+            }
+        });
+        return ranges;
     }
 
     /** As written: {@code 7} or {@code 1-12} or {@code 12-1}. */
