@@ -18,6 +18,7 @@ class ArchitectureTest {
             .then("network")
             .then("trace")
             .then("loss")
+            .then("check")
             .then("outage", "planning");
 
     @Test
