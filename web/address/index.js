@@ -1,0 +1,3 @@
+/** Where a view is found again: addresses and links. */
+export { parseAddress, formatAddress, hrefTo, currentAddress } from "./address.js";
+export { link } from "./link.js";

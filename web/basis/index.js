@@ -1,0 +1,3 @@
+/** How do you know? Every number opens its basis. */
+export { figure } from "./figure.js";
+export { BasisNote } from "./note.js";

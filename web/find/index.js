@@ -1,0 +1,2 @@
+/** Find: one box, reached from anywhere. */
+export { FindBox } from "./find-box.js";

@@ -1,0 +1,96 @@
+/** Questions to the server, as `schema/openapi.json` says. */
+
+/** @typedef {import('./contract.d.ts').Problem} ProblemBody */
+
+/**
+ * @typedef {string | number | boolean | null | undefined} Param
+ */
+
+/** A refusal that the server explained, or that it could not be reached. */
+export class Problem extends Error {
+  /**
+   * @param {string} code stable name: `not_found`, `unreachable`, ...
+   * @param {string} detail what is wrong and what would be right
+   */
+  constructor(code, detail) {
+    super(detail);
+    this.code = code;
+  }
+}
+
+/** @type {{ asOf: string, asIf: string }} */
+let standing = { asOf: "", asIf: "" };
+
+/**
+ * From which records every later question is answered.
+ * @param {string} asOf posting or time; empty for now
+ * @param {string} asIf job; empty for none
+ */
+export function answerFrom(asOf, asIf) {
+  standing = { asOf, asIf };
+}
+
+/**
+ * Asks the server.
+ * @param {string} path parts already encoded, as {@link pathTo} makes them
+ * @param {Record<string, Param>} [params] null, undefined and empty ones are left out
+ * @param {AbortSignal} [signal]
+ * @returns {Promise<any>} the answer, of the type that the contract names
+ */
+export async function ask(path, params = {}, signal) {
+  const response = await reach(addressOf(path, params), signal);
+  if (response.ok) return response.json();
+  throw await problemOf(response);
+}
+
+/**
+ * A path of the contract with codes put in.
+ * @param {string} kind e.g. `enclosures`
+ * @param {string} code
+ * @returns {string}
+ */
+export function pathTo(kind, code) {
+  return `/${kind}/${encodeURIComponent(code)}`;
+}
+
+/**
+ * @param {string} path
+ * @param {Record<string, Param>} params
+ * @returns {string}
+ */
+function addressOf(path, params) {
+  const query = new URLSearchParams();
+  const all = { ...params, as_of: standing.asOf, as_if: standing.asIf };
+  for (const [name, value] of Object.entries(all)) {
+    if (value !== null && value !== undefined && value !== "") query.set(name, String(value));
+  }
+  const text = query.toString();
+  return text ? `${path}?${text}` : path;
+}
+
+/**
+ * @param {string} address
+ * @param {AbortSignal | undefined} signal
+ * @returns {Promise<Response>}
+ */
+async function reach(address, signal) {
+  try {
+    return await fetch(address, { signal: signal ?? null, headers: { Accept: "application/json" } });
+  } catch (cause) {
+    if (cause instanceof DOMException && cause.name === "AbortError") throw cause;
+    throw new Problem("unreachable", "The server does not answer. Check that it is running, then try again.");
+  }
+}
+
+/**
+ * @param {Response} response
+ * @returns {Promise<Problem>}
+ */
+async function problemOf(response) {
+  try {
+    const body = /** @type {ProblemBody} */ (await response.json());
+    return new Problem(body.code, body.detail);
+  } catch {
+    return new Problem("internal", `The server answered ${response.status} and did not say why.`);
+  }
+}

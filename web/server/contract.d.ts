@@ -1,0 +1,1070 @@
+// Written from schema/openapi.json by test/contract-types.js: change the contract, not this file.
+
+export type BaseMap = {
+  type: "FeatureCollection";
+  /** True where small features were left out because of the zoom */
+  truncated: boolean;
+  features: Array<{
+    type: "Feature";
+    geometry: {
+      /** GeoJSON type */
+      type: "Point" | "LineString" | "Polygon" | "MultiLineString" | "MultiPolygon";
+      /** As in RFC 7946 */
+      coordinates: Array<any>;
+    };
+    properties: {
+      /** What it is: street, road, track, rail, water, river, place, boundary, wood, building, or the operator's own word */
+      kind: string;
+      /** Its name */
+      name: string | null;
+      /** 1 most important ... 5 least; null where not given */
+      rank: number | null;
+    };
+  }>;
+};
+
+export type Budget = {
+  /** Class code, where the budget is one */
+  class: string | null;
+  /** Most, dB */
+  max_db: number;
+  /** Least, for a PON class, dB */
+  min_db: number | null;
+  /** Margin kept, dB */
+  margin_db: number;
+  /** Expected sum at most max less margin */
+  passes: boolean;
+  /** What is left of max less margin after the expected sum, dB */
+  left_db: number;
+  /** Limit sum at most max less margin */
+  passes_at_limit: boolean;
+  /** Expected sum below min */
+  overload: boolean;
+  /** Where the class comes from */
+  source?: string;
+};
+
+export type Cable = {
+  /** Code */
+  code: string;
+  type: CableType;
+  /** Longer cable that this reel is part of */
+  part_of: string | null;
+  /** Set of marks that governs */
+  marks_ink: string;
+  /** Excess length that holds for this reel, per cent */
+  overlength_pct: number;
+  /** Where that comes from */
+  overlength_source: string;
+  reel: string | null;
+  /** When laid */
+  installed_on: string | null;
+  state: PlantState;
+  note: string | null;
+  /** Sheath, end to end, metres */
+  sheath_m: number;
+  /** Route, end to end, metres */
+  route_m: number;
+  /** Sheath in coils, metres */
+  slack_m: number;
+  length_basis: LengthBasis;
+  tubes: Array<{
+    tube: number;
+    /** In words */
+    color: string;
+    /** Numbers as in the records folder: one number, or a range that rises or falls */
+    fibers: string;
+  }>;
+  /** Colour of each place in a tube, in words */
+  fiber_colors: Array<string>;
+  /** The run, from its start */
+  rows: Array<CableRow>;
+  line: Line;
+  sections: Array<CableSection>;
+  /** What this reel's glass is reckoned at, by wavelength */
+  values: Array<{
+    wavelength_nm: number;
+    group_index: number | null;
+    loss_db_per_km: number | null;
+    /** Reel sheet or type table */
+    source: string;
+  }>;
+  flags: Array<{
+    /** Numbers as in the records folder: one number, or a range that rises or falls */
+    fibers: string;
+    /** Flag */
+    flag: "dead" | "suspect" | "leased" | "reserved";
+    /** Enclosure */
+    from: string | null;
+    /** Enclosure */
+    to: string | null;
+    owner: string | null;
+    reason: string | null;
+    /** Until when */
+    until: string | null;
+  }>;
+  counts: Array<{
+    /** Numbers as in the records folder: one number, or a range that rises or falls */
+    fibers: string;
+    /** Name of the other numbering */
+    name: string;
+    /** Numbers as in the records folder: one number, or a range that rises or falls */
+    numbers: string;
+  }>;
+  changed: PostingRef | null;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+};
+
+export type CableRow = {
+  seq: number;
+  /** Structure */
+  structure: string;
+  kind: StructureKind;
+  /** Longitude, degrees, WGS 84 */
+  lon: number;
+  /** Latitude, degrees, WGS 84 */
+  lat: number;
+  /** Span travelled to reach it; null on row 0 */
+  span: string | null;
+  placement: Placement | null;
+  /** Route from row 0, metres */
+  route_m: number;
+  /** Sheath position where it arrives, metres */
+  position_in_m: number;
+  /** Sheath position where it leaves, metres */
+  position_out_m: number;
+  position_basis: LengthBasis;
+  /** Sheath coiled here, metres */
+  slack_m: number;
+  slack_trust: Trust;
+  /** When the coil was seen */
+  slack_on: string | null;
+  duct: string | null;
+  marks: Array<Mark>;
+  /** Enclosure entered */
+  enclosure: string | null;
+  /** Fibers cut there, e.g. 1-12,25; null where it enters none */
+  opened: string | null;
+};
+
+export type CableSection = {
+  /** From the run's start */
+  index: number;
+  /** Enclosure; null at a bare end */
+  from: string | null;
+  /** Enclosure; null at a bare end */
+  to: string | null;
+  /** Structure */
+  from_structure: string;
+  /** Structure */
+  to_structure: string;
+  /** Sheath length, metres */
+  sheath_m: number;
+  /** Route length, metres */
+  route_m: number;
+  length_basis: LengthBasis;
+  /** Every fiber once, by ranges of fibers alike, rising */
+  uses: Array<{
+    /** Numbers as in the records folder: one number, or a range that rises or falls */
+    fibers: string;
+    use: FiberUse;
+    /** First circuit by priority, then code */
+    circuit: string | null;
+    circuits_total: number;
+    /** Of a flag */
+    owner: string | null;
+    /** Of a flag */
+    reason: string | null;
+    /** Of a reservation */
+    until: string | null;
+    /** Least recent verification of its joints */
+    verified_on: string | null;
+  }>;
+};
+
+export type CableType = {
+  /** Code */
+  code: string;
+  fibers: number;
+  fibers_per_tube: number;
+  /** Fiber type */
+  fiber_type: string;
+  /** Excess length of glass over sheath, per cent */
+  overlength_pct: number;
+  ribbon: boolean;
+  fibers_per_ribbon: number | null;
+  /** Colour code */
+  colors: string;
+};
+
+export type Circuit = {
+  /** Code */
+  circuit: string;
+  service: string | null;
+  customer: string | null;
+  /** 1 first to be restored ... 5 */
+  priority: number;
+  customers_served: number;
+  /** The first is the default */
+  wavelengths_nm: Array<number>;
+  /** A class code, or a number of dB */
+  budget: string | null;
+  protection_group: string | null;
+  /** State */
+  status: "working" | "planned" | "retired";
+  /** Port or ports */
+  a: string;
+  /** Port or ports */
+  z: string;
+  a_at: PortPlace;
+  z_at: PortPlace;
+  /** Other circuits of its protection group */
+  partners: Array<string>;
+  changed: PostingRef | null;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+};
+
+export type CircuitList = {
+  /** By code */
+  circuits: Array<CircuitSummary>;
+  /** Pass as after for the next page; null on the last */
+  next: string | null;
+  /** Circuits that match */
+  total: number;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+};
+
+export type CircuitSummary = {
+  /** Code */
+  circuit: string;
+  service: string | null;
+  customer: string | null;
+  /** 1 first to be restored ... 5 */
+  priority: number;
+  customers_served: number;
+  /** The first is the default */
+  wavelengths_nm: Array<number>;
+  /** A class code, or a number of dB */
+  budget: string | null;
+  protection_group: string | null;
+  /** State */
+  status: "working" | "planned" | "retired";
+  /** Port or ports */
+  a: string;
+  /** Port or ports */
+  z: string;
+};
+
+export type ConnectorElement = {
+  kind: "connector";
+  /** Port crossed */
+  port: string;
+  /** Enclosure */
+  enclosure: string;
+  /** Structure */
+  structure: string;
+  /** Kind of connector */
+  connector: string;
+  trust: Trust | null;
+  /** Expected loss, dB */
+  loss_db: number;
+  /** Limit loss, dB */
+  loss_limit_db: number;
+  basis: LossBasis;
+  /** Who measured the loss and when, or the planning value with its published source */
+  source: string;
+  /** Glass from the path's start to where this begins, metres */
+  glass_from_m: number;
+};
+
+export type Element = ConnectorElement | SpliceElement | FiberElement | ThroughElement | JumperElement | SplitterElement;
+
+export type Enclosure = {
+  /** Code */
+  code: string;
+  kind: EnclosureKind;
+  /** Structure that it is at */
+  structure: string;
+  structure_kind: StructureKind;
+  /** Longitude, degrees, WGS 84 */
+  lon: number;
+  /** Latitude, degrees, WGS 84 */
+  lat: number;
+  state: PlantState;
+  note: string | null;
+  /** Glass between the sheath and a joint, on each side of it, metres */
+  tray_glass_m: number;
+  /** By cable, back before ahead */
+  legs: Array<Leg>;
+  /** Everything joined here, planned joints of the job asked for among them; by tray, then as recorded */
+  joints: Array<Joint>;
+  panels: Array<{
+    /** Code */
+    panel: string;
+    /** Connector */
+    connector: string;
+    ports: Array<Port>;
+  }>;
+  splitters: Array<{
+    /** Code */
+    splitter: string;
+    inputs: number;
+    outputs: number;
+    terminals: Array<{
+      /** in, in 2, out 1 ... */
+      terminal: string;
+      /** The end or port that it is joined to */
+      joined_to: string | null;
+      /** Index into joints */
+      joint: number | null;
+      /** From the input to this output, dB */
+      loss_db: number | null;
+      loss_basis: LossBasis;
+      circuits_total: number;
+    }>;
+    /** Source of its loss */
+    source: string;
+  }>;
+  changed: PostingRef | null;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+};
+
+export type EnclosureKind = "closure" | "terminal" | "cabinet" | "frame";
+
+export type EndRange = {
+  /** In the notation of the records: F-1 ahead 1-12, S1 out 5, or a port E1/P/1-12 */
+  text: string;
+  /** What kind of end */
+  kind: "leg" | "splitter_in" | "splitter_out" | "port_rear" | "port_front";
+  /** Code of the cable, splitter, or panel */
+  of: string;
+  /** Enclosure that it is in */
+  enclosure: string;
+  /** Side of a leg */
+  side: "back" | "ahead" | null;
+  /** Numbers as in the records folder: one number, or a range that rises or falls */
+  numbers: string;
+};
+
+export type Fault = {
+  /** Index of the change in the request, from 0 */
+  change: number;
+  /** Column that is wrong, or null where the fault is the whole row's */
+  column: string | null;
+  /** What is wrong and what would be right */
+  text: string;
+};
+
+export type FiberElement = {
+  kind: "fiber";
+  /** Cable */
+  cable: string;
+  fiber: number;
+  tube: number;
+  /** In words */
+  tube_color: string;
+  /** In words */
+  fiber_color: string;
+  /** Enclosure */
+  from: string | null;
+  /** Enclosure */
+  to: string | null;
+  /** Structure */
+  from_structure: string;
+  /** Structure */
+  to_structure: string;
+  /** Which way the walk goes along the cable's run */
+  toward: "ahead" | "back";
+  /** Sheath, metres */
+  sheath_m: number;
+  /** Glass, tray glass in, metres */
+  glass_m: number;
+  /** Route, metres */
+  route_m: number;
+  length_basis: LengthBasis;
+  /** Marks and their reading, or how else the length is known */
+  length_source: string;
+  flags: Array<"dead" | "suspect" | "leased" | "reserved">;
+  /** Longer cable */
+  part_of: string | null;
+  /** The fiber in another numbering, e.g. FDR 97 */
+  count_name: string | null;
+  /** Expected loss, dB */
+  loss_db: number;
+  /** Limit loss, dB */
+  loss_limit_db: number;
+  basis: LossBasis;
+  /** Who measured the loss and when, or the planning value with its published source */
+  source: string;
+  /** Glass from the path's start to where this begins, metres */
+  glass_from_m: number;
+};
+
+export type FiberUse = "in_use" | "jumpered" | "reserved" | "leased" | "dead" | "suspect" | "spare_unknown" | "spare" | "spare_verified";
+
+export type FindAnswer = {
+  /** The question as it was understood, trimmed */
+  query: string;
+  /** Best first */
+  results: Array<FindResult>;
+  /** True where more would match than limit lets through */
+  more: boolean;
+};
+
+export type FindResult = {
+  /** What it is */
+  kind: "structure" | "span" | "enclosure" | "cable" | "fiber" | "port" | "panel" | "splitter" | "circuit" | "customer" | "address" | "place" | "mark" | "coordinate";
+  /** What to read first: the code, the name, or the mark */
+  label: string;
+  /** What it is, in words */
+  what: string;
+  /** Where it is, in words */
+  where: string;
+  target: FindTarget;
+  /** Longitude, degrees, WGS 84 */
+  lon: number | null;
+  /** Latitude, degrees, WGS 84 */
+  lat: number | null;
+};
+
+export type FindTarget = {
+  /** Which view opens */
+  view: "structure" | "span" | "enclosure" | "cable" | "fiber" | "port" | "circuit" | "map";
+  /** What it opens on, in the notation of the records (FDR-S, FDR-S:25, E1/P/1); null for the map */
+  code: string | null;
+};
+
+export type Health = {
+  status: "ok";
+};
+
+export type Joint = {
+  /** Kind of joint */
+  kind: "splice" | "termination" | "jumper";
+  a: EndRange;
+  b: EndRange;
+  /** Pairs of ends joined */
+  count: number;
+  /** Tray */
+  tray: string | null;
+  /** How */
+  method: "fusion" | "mechanical" | "pigtail" | "direct" | null;
+  /** Measured loss, two-way mean, of each; null where not measured, dB */
+  loss_db: number | null;
+  /** What each is reckoned at, dB */
+  loss_expected_db: number;
+  basis: LossBasis;
+  /** Who measured it and when, or the planning value with its published source */
+  source: string;
+  trust: Trust;
+  /** When last verified */
+  verified_on: string | null;
+  /** When made */
+  spliced_on: string | null;
+  /** Who made it */
+  spliced_by: string | null;
+  /** Until when it may stay */
+  temporary_until: string | null;
+  /** Job */
+  job: string | null;
+  /** Length of a jumper, metres */
+  length_m: number | null;
+  /** Circuits through it, the first 20 by priority, then code */
+  circuits: Array<string>;
+  circuits_total: number;
+  changed: PostingRef | null;
+};
+
+export type JumperElement = {
+  kind: "jumper";
+  /** Port */
+  a: string;
+  /** Port */
+  b: string;
+  /** Structure */
+  structure: string;
+  /** Glass, metres */
+  glass_m: number;
+  /** Expected loss, dB */
+  loss_db: number;
+  /** Limit loss, dB */
+  loss_limit_db: number;
+  basis: LossBasis;
+  /** Who measured the loss and when, or the planning value with its published source */
+  source: string;
+  /** Glass from the path's start to where this begins, metres */
+  glass_from_m: number;
+};
+
+export type Leg = {
+  /** Cable */
+  cable: string;
+  /** Toward the run's start or its end */
+  side: "back" | "ahead";
+  /** Run row of the cable here */
+  seq: number;
+  /** Cable type */
+  cable_type: string;
+  fibers: number;
+  fibers_per_tube: number;
+  ribbon: boolean;
+  /** Colour of each tube or ribbon, in words, first tube first */
+  tube_colors: Array<string>;
+  /** Colour of each place in a tube, in words */
+  fiber_colors: Array<string>;
+  /** The next structure along the run */
+  to_structure: string | null;
+  /** The next enclosure along the run that the cable enters */
+  to_enclosure: string | null;
+  /** True bearing in which it leaves, degrees from north */
+  bearing_deg: number | null;
+  /** Sheath position of this enclosure, metres */
+  sheath_position_m: number;
+  /** Sheath to the next enclosure, metres */
+  sheath_m: number | null;
+  /** Glass of a fiber cut at both, to the next enclosure, tray glass in, metres */
+  glass_m: number | null;
+  length_basis: LengthBasis;
+  mark: {
+    /** Printed mark where the sheath enters, in unit */
+    value: number;
+    /** Unit */
+    unit: "m" | "ft";
+    /** Ink */
+    ink: string;
+    /** When it was read */
+    read_on: string | null;
+  } | null;
+  /** Every fiber of the leg, by ranges, rising; unrecorded: the tube is not opened and nothing is recorded, so it goes through */
+  ends: Array<{
+    /** Numbers as in the records folder: one number, or a range that rises or falls */
+    fibers: string;
+    /** State of the ends */
+    state: "spliced" | "terminated" | "through" | "capped" | "stored" | "unknown" | "unrecorded";
+    trust: Trust | null;
+    /** When it was last verified */
+    verified_on: string | null;
+    use: FiberUse;
+    /** Index into joints */
+    joint: number | null;
+  }>;
+};
+
+export type LengthBasis = "marks" | "nominal" | "measured" | "geodesic" | "recorded" | "unknown";
+
+export type Line = Array<Position>;
+
+export type LossBasis = "measured" | "planning" | "type" | "sheet" | "none";
+
+export type Mark = {
+  /** Which set of marks */
+  ink: string;
+  /** Unit of the marks */
+  unit: "m" | "ft";
+  /** Mark where the sheath arrives, in unit */
+  mark_in: number | null;
+  /** Mark where the sheath leaves, in unit */
+  mark_out: number | null;
+  /** When it was read */
+  read_on: string | null;
+  trust: Trust;
+  /** True where this set ties the sheath's position */
+  governs: boolean;
+};
+
+export type Path = {
+  /** True where both ends are fronts; for a circuit, its a and its z */
+  complete: boolean;
+  /** Circuit whose ports the two ends are */
+  circuit: string | null;
+  /** All such circuits */
+  circuits: Array<string>;
+  wavelength_nm: number;
+  /** True for a circle */
+  loop: boolean;
+  /** Two, or none for a circle */
+  ends: Array<string>;
+  /** In the order in which the walk meets them */
+  elements: Array<Element>;
+  totals: {
+    /** Cables alone, metres */
+    sheath_m: number;
+    /** With jumpers, metres */
+    glass_m: number;
+    /** Route walked, metres */
+    route_m: number;
+    splices: number;
+    connectors: number;
+    splitters: number;
+    /** Expected, dB */
+    loss_db: number;
+    /** Limit, dB */
+    loss_limit_db: number;
+    /** Expected plus three standard deviations, at most the limit, dB */
+    loss_statistical_db: number;
+    /** Chromatic dispersion; null where the fiber type gives none */
+    dispersion_ps_per_nm: number | null;
+    /** Polarization mode dispersion; null where not given */
+    pmd_ps: number | null;
+    /** Splices, connectors and splitters reckoned at planning values */
+    unmeasured: number;
+    /** Joints whose trust is not verified */
+    unverified: number;
+  };
+  budget: Budget | null;
+  /** Points [glass_m, sheath_m, route_m, lon, lat] from the path's start on, linear between: every bend of the route, both sides of every coil, tray glass and jumper; each rises or stays */
+  track: Array<Array<number>>;
+  /** Structures passed, in order, once each time */
+  stations: Array<{
+    /** Structure */
+    structure: string;
+    kind: StructureKind;
+    /** Enclosure that the glass enters here; null where it only passes the structure */
+    enclosure: string | null;
+    /** Glass from the path's start; the middle of the coil where there is one, metres */
+    glass_m: number;
+    /** Sheath from the start, metres */
+    sheath_m: number;
+    /** Route from the start, metres */
+    route_m: number;
+    /** Longitude, degrees, WGS 84 */
+    lon: number;
+    /** Latitude, degrees, WGS 84 */
+    lat: number;
+    /** Sheath coiled here, metres */
+    coil_m: number;
+  }>;
+};
+
+export type Placement = "aerial" | "duct" | "buried" | "indoor" | "underwater";
+
+export type PlantMap = {
+  type: "FeatureCollection";
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+  /** True where structures were left out because of the zoom or because there are too many; spans are never left out for the zoom, but their bends may be */
+  truncated: boolean;
+  /** Spans first, then structures */
+  features: Array<PlantStructure | PlantSpan>;
+};
+
+export type PlantSpan = {
+  type: "Feature";
+  geometry: {
+    type: "LineString";
+    coordinates: Line;
+  };
+  properties: {
+    record: "span";
+    /** Code of the span */
+    code: string;
+    /** Structure where its line begins */
+    from: string;
+    /** Structure where its line ends */
+    to: string;
+    placement: Placement;
+    state: PlantState;
+    /** Fibers of the in-service cables on it */
+    fibers: number;
+    /** Cables on it */
+    cables: number;
+  };
+};
+
+export type PlantState = "in service" | "planned" | "abandoned";
+
+export type PlantStructure = {
+  type: "Feature";
+  geometry: {
+    type: "Point";
+    coordinates: Position;
+  };
+  properties: {
+    record: "structure";
+    /** Code of the structure */
+    code: string;
+    kind: StructureKind;
+    state: PlantState;
+    /** Enclosures at it */
+    enclosures: number;
+    /** Fibers of the in-service cables that visit it */
+    fibers: number;
+  };
+};
+
+export type Port = {
+  /** Number */
+  port: number;
+  /** The end that its rear is joined to; null where none is */
+  rear: string | null;
+  rear_trust: Trust | null;
+  /** Index into joints */
+  rear_joint: number | null;
+  /** What is on its front */
+  front: "free" | "jumper" | "circuits";
+  /** Port at the jumper's other end */
+  jumper_to: string | null;
+  /** The first 20 */
+  circuits: Array<string>;
+  circuits_total: number;
+};
+
+export type PortPlace = {
+  /** Port */
+  port: string;
+  /** Enclosure */
+  enclosure: string;
+  /** Structure */
+  structure: string;
+  /** Longitude, degrees, WGS 84 */
+  lon: number;
+  /** Latitude, degrees, WGS 84 */
+  lat: number;
+};
+
+export type Position = Array<number>;
+
+export type Posting = {
+  posting: number;
+  /** When */
+  time: string;
+  /** Who */
+  by: string;
+  /** Why */
+  reason: string;
+  changes_total: number;
+  /** Pass as from_change for the next page of changes; null on the last */
+  next_change: number | null;
+  changes: Array<{
+    /** Index, from 0 */
+    change: number;
+    /** What was done */
+    action: "add" | "change" | "remove";
+    /** Table of the records folder, without .csv */
+    table: "settings" | "structures" | "spans" | "fiber_types" | "cable_types" | "color_codes" | "cables" | "cable_values" | "cable_runs" | "sheath_marks" | "enclosures" | "enclosure_cables" | "splitters" | "splitter_outputs" | "splices" | "panels" | "terminations" | "end_states" | "jumpers" | "measurements" | "fiber_flags" | "counts" | "circuits" | "planning_values";
+    /** What it is about, in the notation of the records */
+    code: string | null;
+    /** The row before, by column */
+    before: Record<string, string | number | null> | null;
+    /** The row after, by column */
+    after: Record<string, string | number | null> | null;
+  }>;
+};
+
+export type PostingList = {
+  /** Latest first */
+  postings: Array<PostingSummary>;
+  /** Pass as before for the next page; null on the last */
+  next: number | null;
+};
+
+export type PostingRef = {
+  /** Number of the posting */
+  posting: number;
+  /** When it was posted */
+  time: string;
+  /** Who posted it */
+  by: string;
+  /** Why */
+  reason: string;
+};
+
+export type PostingRequest = {
+  /** Who posts it */
+  by: string;
+  /** Why */
+  reason: string;
+  changes: Array<{
+    /** What to do */
+    action: "add" | "change" | "remove";
+    /** Table of the records folder, without .csv */
+    table: "settings" | "structures" | "spans" | "fiber_types" | "cable_types" | "color_codes" | "cables" | "cable_values" | "cable_runs" | "sheath_marks" | "enclosures" | "enclosure_cables" | "splitters" | "splitter_outputs" | "splices" | "panels" | "terminations" | "end_states" | "jumpers" | "measurements" | "fiber_flags" | "counts" | "circuits" | "planning_values";
+    /** Columns as in the records folder; for change, those that change; for remove, may be left out */
+    row?: Record<string, string | number | null>;
+    /** Natural key of the row to change or remove, by column */
+    key?: Record<string, string | number | null>;
+  }>;
+};
+
+export type PostingSummary = {
+  posting: number;
+  /** When */
+  time: string;
+  /** Who */
+  by: string;
+  /** Why */
+  reason: string;
+  /** How many changes */
+  changes: number;
+};
+
+export type Problem = {
+  /** A URI reference for the kind of problem */
+  type: string;
+  /** The kind of problem in a few words */
+  title: string;
+  /** HTTP status */
+  status: number;
+  /** What is wrong and what would be right */
+  detail: string;
+  /** Stable name of the problem. wavelength_out_of_range: a fiber on the path has no value there */
+  code: "not_found" | "bad_request" | "bad_reference" | "wavelength_out_of_range" | "refused" | "too_large" | "unsupported_media_type" | "method_not_allowed" | "internal";
+  /** The request that it answers */
+  instance?: string;
+  /** The query parameter that is wrong, where there is one */
+  parameter?: string;
+  /** For a refused posting: every fault, not only the first */
+  faults?: Array<Fault>;
+};
+
+export type RunRowHere = {
+  /** Cable */
+  cable: string;
+  /** Row of its run */
+  seq: number;
+  /** Enclosure that the cable enters here; null where it passes all unseen */
+  enclosure: string | null;
+  /** Sheath position where it arrives, metres */
+  position_in_m: number;
+  /** Sheath position where it leaves, metres */
+  position_out_m: number;
+  /** Sheath coiled here, metres */
+  slack_m: number;
+  slack_trust: Trust;
+  /** When the coil was seen */
+  slack_on: string | null;
+  marks: Array<Mark>;
+};
+
+export type Span = {
+  /** Code */
+  code: string;
+  /** Structure */
+  from: string;
+  /** Structure */
+  to: string;
+  placement: Placement;
+  state: PlantState;
+  /** Route length, metres */
+  length_m: number;
+  length_basis: LengthBasis;
+  line: Line | null;
+  shared_risk: Array<string>;
+  note: string | null;
+  cables: Array<{
+    /** Cable */
+    cable: string;
+    /** Run row that this span leads to */
+    seq: number;
+    /** Duct */
+    duct: string | null;
+    fibers: number;
+    /** Sheath between the two structures, metres */
+    sheath_m: number;
+    sheath_basis: LengthBasis;
+    uses: UseCounts;
+    state: PlantState;
+  }>;
+  /** Working circuits whose path lies on it */
+  circuits: number;
+  changed: PostingRef | null;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+};
+
+export type SpliceElement = {
+  kind: "splice";
+  /** Enclosure */
+  enclosure: string;
+  /** Structure */
+  structure: string;
+  tray: string | null;
+  /** How */
+  method: "fusion" | "mechanical";
+  /** End that the walk comes from */
+  a: string;
+  /** End that the walk goes to */
+  b: string;
+  trust: Trust;
+  /** When last verified */
+  verified_on: string | null;
+  /** When made */
+  spliced_on: string | null;
+  spliced_by: string | null;
+  /** Until when */
+  temporary_until: string | null;
+  job: string | null;
+  /** True for the splice of a pigtail */
+  pigtail: boolean;
+  /** Expected loss, dB */
+  loss_db: number;
+  /** Limit loss, dB */
+  loss_limit_db: number;
+  basis: LossBasis;
+  /** Who measured the loss and when, or the planning value with its published source */
+  source: string;
+  /** Glass from the path's start to where this begins, metres */
+  glass_from_m: number;
+};
+
+export type SplitterElement = {
+  kind: "splitter";
+  /** Enclosure */
+  enclosure: string;
+  /** Structure */
+  structure: string;
+  /** Splitter */
+  splitter: string;
+  inputs: number;
+  input: number;
+  outputs: number;
+  output: number;
+  /** Which way light is walked */
+  toward: "output" | "input";
+  /** Expected loss, dB */
+  loss_db: number;
+  /** Limit loss, dB */
+  loss_limit_db: number;
+  basis: LossBasis;
+  /** Who measured the loss and when, or the planning value with its published source */
+  source: string;
+  /** Glass from the path's start to where this begins, metres */
+  glass_from_m: number;
+};
+
+export type Status = {
+  /** Name of the program */
+  program: "spanwright";
+  /** Version of the program */
+  version: string;
+  /** Whose records these are */
+  owner: string | null;
+  /** What lengths people read first */
+  unit: "m" | "ft";
+  /** IANA time zone of the records */
+  time_zone: string;
+  posting: PostingRef | null;
+  /** How many of each the records hold; joints counts joined pairs, fiber_sections pieces of one fiber between two passes */
+  counts: {
+    structures: number;
+    spans: number;
+    cables: number;
+    enclosures: number;
+    splitters: number;
+    panels: number;
+    joints: number;
+    circuits: number;
+    fiber_sections: number;
+    postings: number;
+  };
+  /** West, south, east, north of all structures, degrees */
+  extent: Array<number> | null;
+  /** True where this is the demo that comes with the program */
+  demo: boolean;
+  /** A sentence to be shown on every screen where the records are invented; else null */
+  invented: string | null;
+  /** Jobs that planned joints name, for as_if; by code */
+  jobs: Array<string>;
+  /** Wavelengths in use by circuits, rising, nm */
+  wavelengths_nm: Array<number>;
+  /** Tile address that the operator named; null unless one was */
+  tile: {
+    /** Address of raster tiles with {z}, {x}, {y} */
+    url: string;
+    /** Whose tiles they are */
+    attribution: string;
+  } | null;
+};
+
+export type Structure = {
+  /** Code */
+  code: string;
+  kind: StructureKind;
+  /** Longitude, degrees, WGS 84 */
+  lon: number;
+  /** Latitude, degrees, WGS 84 */
+  lat: number;
+  /** Accuracy of the position, metres */
+  accuracy_m: number | null;
+  address: string | null;
+  state: PlantState;
+  /** Things shared with other plant: a bridge, a power feed */
+  shared_risk: Array<string>;
+  note: string | null;
+  enclosures: Array<{
+    /** Code */
+    enclosure: string;
+    kind: EnclosureKind;
+    state: PlantState;
+    /** Cables in it */
+    cables: number;
+  }>;
+  spans: Array<{
+    /** Code */
+    span: string;
+    /** Structure at the other end */
+    to: string;
+    placement: Placement;
+    state: PlantState;
+    /** Route length, metres */
+    length_m: number;
+    length_basis: LengthBasis;
+    /** True bearing in which it leaves, degrees from north; null where it has no line */
+    bearing_deg: number | null;
+    cables: number;
+    fibers: number;
+  }>;
+  /** Every run row that is at this structure */
+  cables: Array<RunRowHere>;
+  changed: PostingRef | null;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+};
+
+export type StructureKind = "pole" | "handhole" | "manhole" | "vault" | "pedestal" | "cabinet" | "hut" | "building" | "point";
+
+export type ThroughElement = {
+  kind: "through";
+  /** Enclosure */
+  enclosure: string;
+  /** Structure */
+  structure: string;
+  /** Cable */
+  cable: string;
+  fiber: number;
+  /** Expected loss, dB */
+  loss_db: number;
+  /** Limit loss, dB */
+  loss_limit_db: number;
+  basis: LossBasis;
+  /** Who measured the loss and when, or the planning value with its published source */
+  source: string;
+  /** Glass from the path's start to where this begins, metres */
+  glass_from_m: number;
+};
+
+export type TraceAnswer = {
+  /** The one asked for; null where paths differ */
+  wavelength_nm: number | null;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+  paths: Array<Path>;
+};
+
+export type Trust = "planned" | "reported" | "posted" | "verified" | "unknown";
+
+export type UseCounts = {
+  in_use: number;
+  jumpered: number;
+  reserved: number;
+  leased: number;
+  dead: number;
+  suspect: number;
+  spare_unknown: number;
+  spare: number;
+  spare_verified: number;
+};

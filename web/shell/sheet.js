@@ -1,0 +1,61 @@
+import { html } from "lit";
+
+/** @typedef {import("../address/address.js").Address} Address */
+/** @typedef {import("../server/contract.d.ts").Status} Status */
+/** @typedef {import("../server/contract.d.ts").Path} Path */
+
+/**
+ * @typedef {object} SheetState
+ * @property {Address} address
+ * @property {Status | null} status
+ * @property {Path[] | null} paths of the view's own trace; null while it is traced
+ * @property {string} stamp from which records
+ */
+
+/**
+ * The views, each by its name in an address.
+ * @type {Readonly<Record<string, (state: SheetState, zone: string) => unknown>>}
+ */
+const VIEWS = Object.freeze({
+  structure: ({ address, stamp }, zone) => html`<sw-structure .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-structure>`,
+  span: ({ address, stamp }, zone) => html`<sw-span .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-span>`,
+  enclosure: ({ address, stamp }, zone) => html`<sw-enclosure .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-enclosure>`,
+  cable: ({ address, stamp }, zone) => html`<sw-cable .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-cable>`,
+  circuit: ({ address, stamp, paths }, zone) =>
+    html`<sw-circuit .code=${address.code} .stamp=${stamp} .zone=${zone} .paths=${paths} .chosen=${address.path}></sw-circuit>`,
+  fiber: tracedView,
+  port: tracedView,
+  circuits: ({ stamp }) => html`<sw-circuits .code=${"circuits"} .stamp=${stamp}></sw-circuits>`,
+  postings: ({ stamp }, zone) => html`<sw-postings .code=${"postings"} .stamp=${stamp} .zone=${zone}></sw-postings>`,
+  posting: ({ address, stamp }, zone) => html`<sw-posting .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-posting>`,
+});
+
+/**
+ * The view that an address opens.
+ * @param {SheetState} state
+ * @returns {unknown}
+ */
+export function sheetView(state) {
+  const view = VIEWS[state.address.view];
+  return view ? view(state, state.status?.time_zone ?? "UTC") : html`<sw-start .status=${state.status}></sw-start>`;
+}
+
+/**
+ * @param {SheetState} state
+ * @returns {unknown}
+ */
+function tracedView({ address, paths }) {
+  return html`<sw-traced .code=${address.code} .what=${address.view} .paths=${paths} .chosen=${address.path}></sw-traced>`;
+}
+
+/**
+ * What the browser's title says of an address.
+ * @param {Address} address
+ * @param {Status | null} status
+ * @returns {string}
+ */
+export function titleOf({ view, code, asOf, asIf }, status) {
+  const thing = view === "start" ? (status?.owner ?? "") : [view, code].filter(Boolean).join(" ");
+  const when = [asOf && `as of ${asOf}`, asIf && `as if ${asIf}`].filter(Boolean).join(", ");
+  return [thing, when, "Spanwright"].filter(Boolean).join(" · ");
+}
