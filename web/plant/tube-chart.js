@@ -1,25 +1,12 @@
 import { html, nothing } from "lit";
 import { chip, parseColor, patch } from "../color/index.js";
 import { hrefTo } from "../address/index.js";
-import { parseRange, rangeHolds } from "../quantity/index.js";
-import { strongestUse, USES, useSign } from "./uses.js";
+import { parseRange } from "../quantity/index.js";
+import { useOf } from "./tube-cells.js";
+import { USES, useSign } from "./uses.js";
 
 /** @typedef {import("../server/contract.d.ts").Cable} Cable */
 /** @typedef {import("../server/contract.d.ts").CableSection} CableSection */
-/** @typedef {CableSection["uses"][number]} UseRange */
-
-/**
- * What is known of one fiber in the sections asked of.
- * @param {CableSection[]} sections
- * @param {number} fiber
- * @returns {UseRange | null} the range that stands for it
- */
-export function useOf(sections, fiber) {
-  const ranges = sections.flatMap((section) => section.uses.filter((each) => rangeHolds(parseRange(each.fibers), fiber)));
-  if (ranges.length === 0) return null;
-  const strongest = strongestUse(ranges.map((each) => each.use));
-  return ranges.find((each) => each.use === strongest) ?? null;
-}
 
 /**
  * The tube chart: one row a tube, one cell a fiber.
