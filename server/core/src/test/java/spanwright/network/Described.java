@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
+import java.util.SortedSet;
 import java.util.TreeSet;
 import spanwright.splicing.EndKey;
 
@@ -13,7 +14,7 @@ final class Described {
     private Described() {}
 
     /** One line an end, one a path. */
-    static TreeSet<String> of(Network network) {
+    static SortedSet<String> of(Network network) {
         TreeSet<String> lines = new TreeSet<>();
         for (Block block : network.blocks()) {
             for (int end = 2 * block.firstPiece(); end < 2 * (block.firstPiece() + block.count()); end++) {

@@ -3,6 +3,7 @@ package spanwright.network;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
+import java.util.SortedSet;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -47,7 +48,7 @@ class GlassTwinTest {
     void joins_the_same_ends_as_if_a_job_were_built(int seed) {
         Records records = RandomPlant.of(seed).entered();
         Snapshot base = Snapshot.of(records);
-        TreeSet<String> before = Described.of(base.network());
+        SortedSet<String> before = Described.of(base.network());
 
         for (String job : records.plannedJobs()) {
             SnapshotEditor editor = base.edit();
@@ -138,7 +139,8 @@ class GlassTwinTest {
 
     private static void assertTagged(Records records, Network network, PlainGlass twin, int path) {
         PathIndex paths = network.paths();
-        TreeSet<String> codes = twin.circuits(network.keyOf(paths.firstEnd(path)), network.keyOf(paths.lastEnd(path)));
+        SortedSet<String> codes =
+                twin.circuits(network.keyOf(paths.firstEnd(path)), network.keyOf(paths.lastEnd(path)));
         int first = codes.isEmpty()
                 ? 0
                 : records.circuits().find(codes.first()).map(Circuit::id).orElseThrow();

@@ -6,6 +6,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.SortedSet;
 import java.util.TreeMap;
 import java.util.TreeSet;
 import org.jspecify.annotations.Nullable;
@@ -217,7 +218,7 @@ public final class PlainGlass {
     }
 
     /** Codes of the circuits, but for retired ones, whose two ports two ends are. */
-    public TreeSet<String> circuits(long one, long other) {
+    public SortedSet<String> circuits(long one, long other) {
         TreeSet<String> codes = new TreeSet<>();
         records.circuits()
                 .list()
