@@ -1,0 +1,169 @@
+package spanwright.benchmarks.grid;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Random;
+
+/**
+ * Lays circuits over the grid: groups of 1, 2, 4 or 12 fibers on random walks biased straight ahead, spliced at every
+ * node, each group brought to ports at both ends; and for a share of the glass feeders that end at a 1:32 splitter
+ * whose outputs walk on to ports of their own. What is left runs straight on its own number, in chains of 40 sections
+ * at the most, or stays dark.
+ */
+final class Walks {
+
+    private static final int[] GROUPS = {1, 2, 4, 12};
+    private static final double CIRCUIT_SHARE = 0.40;
+    private static final double SPLITTER_SHARE = 0.05;
+    private static final double STRAIGHT = 0.7;
+    private static final int CHAIN = 40;
+    private static final int OUTPUTS = 32;
+
+    /** A port at a node: the end of its rear. */
+    record Port(int node, int rear) {}
+
+    /** A splitter at a node: its input's end, its outputs' first end. */
+    record Split(int node, int in, int firstOut) {}
+
+    /** A circuit between two ports, by their places in {@link #ports}. */
+    record Service(int a, int z) {}
+
+    final List<Port> ports = new ArrayList<>();
+    final List<Split> splitters = new ArrayList<>();
+    final List<Service> services = new ArrayList<>();
+    final Joins joins;
+    private final Grid grid;
+    private final Random random;
+    /** Fibers of a cable given to circuits so far; they are given from the first on. */
+    private final int[] used;
+    private int usedSections;
+
+    Walks(Grid grid, Random random) {
+        this.grid = grid;
+        this.random = random;
+        this.joins = new Joins(grid.sections);
+        this.used = new int[grid.cables];
+        int behindSplitters = (int) (grid.sections * SPLITTER_SHARE);
+        while (usedSections < behindSplitters) {
+            tree();
+        }
+        int wanted = (int) (grid.sections * CIRCUIT_SHARE);
+        while (usedSections < wanted) {
+            group();
+        }
+        express();
+    }
+
+    private int[] port(int node, int count) {
+        int[] rears = new int[count];
+        for (int index = 0; index < count; index++) {
+            rears[index] = joins.newEnd();
+            ports.add(new Port(node, rears[index]));
+        }
+        return rears;
+    }
+
+    private void group() {
+        int count = GROUPS[random.nextInt(GROUPS.length)];
+        int node = random.nextInt(grid.nodes());
+        int firstPort = ports.size();
+        int[] tips = port(node, count);
+        int end = walk(node, tips, 5 + random.nextInt(56));
+        int lastPort = ports.size();
+        connect(tips, port(end, count));
+        for (int index = 0; index < count; index++) {
+            services.add(new Service(firstPort + index, lastPort + index));
+        }
+    }
+
+    private void tree() {
+        int node = random.nextInt(grid.nodes());
+        int feederPort = ports.size();
+        int[] tip = port(node, 1);
+        int at = walk(node, tip, 5 + random.nextInt(26));
+        int in = joins.newEnd();
+        joins.join(tip[0], in);
+        int[] outs = new int[OUTPUTS];
+        for (int output = 0; output < OUTPUTS; output++) {
+            outs[output] = joins.newEnd();
+        }
+        splitters.add(new Split(at, in, outs[0]));
+        for (int first = 0; first < OUTPUTS; first += 8) {
+            int[] tips = Arrays.copyOfRange(outs, first, first + 8);
+            int end = walk(at, tips, 1 + random.nextInt(4));
+            int lastPort = ports.size();
+            connect(tips, port(end, tips.length));
+            for (int index = 0; index < tips.length; index++) {
+                services.add(new Service(feederPort, lastPort + index));
+            }
+        }
+    }
+
+    private void connect(int[] tips, int[] rears) {
+        for (int index = 0; index < tips.length; index++) {
+            joins.join(tips[index], rears[index]);
+        }
+    }
+
+    /** Takes the tips along, one fiber each, and gives the node where the walk came to its end. */
+    private int walk(int start, int[] tips, int hops) {
+        int node = start;
+        int direction = random.nextInt(4);
+        for (int hop = 0; hop < hops; hop++) {
+            int turned = turn(node, direction, tips.length);
+            if (turned < 0) {
+                break;
+            }
+            direction = turned;
+            node = advance(node, grid.cable(node, direction), tips);
+        }
+        return node;
+    }
+
+    /** A direction with room for the group: straight ahead by preference, never back; -1 where there is none. */
+    private int turn(int node, int direction, int count) {
+        int first = random.nextDouble() < STRAIGHT ? direction : (direction + (random.nextBoolean() ? 1 : 3)) % 4;
+        int[] tried = {first, direction, (direction + 1) % 4, (direction + 3) % 4};
+        for (int way : tried) {
+            int cable = grid.cable(node, way);
+            if (cable >= 0 && used[cable] + count <= grid.fibers[cable] * 3 / 4) {
+                return way;
+            }
+        }
+        return -1;
+    }
+
+    private int advance(int node, int cable, int[] tips) {
+        int near = grid.from[cable] == node ? 0 : 1;
+        int firstSection = grid.firstSection[cable] + used[cable];
+        for (int index = 0; index < tips.length; index++) {
+            int end = 2 * (firstSection + index) + near;
+            joins.join(tips[index], end);
+            tips[index] = end ^ 1;
+        }
+        used[cable] += tips.length;
+        usedSections += tips.length;
+        return grid.across(cable, node);
+    }
+
+    private void express() {
+        for (int node = 0; node < grid.nodes(); node++) {
+            express(node, Grid.EAST, node % grid.side);
+            express(node, Grid.SOUTH, node / grid.side);
+        }
+    }
+
+    private void express(int node, int direction, int place) {
+        int ahead = grid.cable(node, direction);
+        int back = grid.cable(node, direction + 2);
+        if (ahead < 0 || back < 0 || place % CHAIN == 0) {
+            return;
+        }
+        int count = Math.min(grid.fibers[ahead], grid.fibers[back]);
+        for (int fiber = Math.max(used[ahead], used[back]); fiber < count; fiber++) {
+            joins.join(
+                    2 * (grid.firstSection[back] + fiber) + 1, 2 * (grid.firstSection[ahead] + fiber));
+        }
+    }
+}
