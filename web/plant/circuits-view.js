@@ -16,18 +16,18 @@ export class CircuitsView extends RecordView {
   constructor() {
     super();
     /** @type {string} only codes that begin so */
-    this.prefix = "";
+    this.begins = "";
   }
 
   /** @param {AbortSignal} signal @override */
   question(signal) {
-    return ask("/circuits", { prefix: this.prefix, limit: PAGE }, signal);
+    return ask("/circuits", { prefix: this.begins, limit: PAGE }, signal);
   }
 
   /** @param {string | null} after */
   async more(after) {
     const before = this.asking.answer;
-    await this.asking.run((signal) => ask("/circuits", { prefix: this.prefix, limit: PAGE, after }, signal));
+    await this.asking.run((signal) => ask("/circuits", { prefix: this.begins, limit: PAGE, after }, signal));
     const next = this.asking.answer;
     if (before && next && next !== before) this.asking.answer = { ...next, circuits: [...before.circuits, ...next.circuits] };
     this.requestUpdate();
@@ -35,14 +35,14 @@ export class CircuitsView extends RecordView {
 
   /** @param {Event} event */
   narrow(event) {
-    this.prefix = /** @type {HTMLInputElement} */ (event.target).value;
+    this.begins = /** @type {HTMLInputElement} */ (event.target).value;
     void this.reload(false);
   }
 
   /** @override */
   render() {
     return html`<h1>Circuits</h1>
-      <p class="chooser"><label>Code begins <input type="search" .value=${this.prefix} @input=${this.narrow}></label></p>${super.render()}`;
+      <p class="chooser"><label>Code begins <input type="search" .value=${this.begins} @input=${this.narrow}></label></p>${super.render()}`;
   }
 
   /** @param {CircuitList} it @override */

@@ -1,7 +1,6 @@
 import { html, nothing, svg } from "lit";
 import { parseColor, patchShapes } from "../color/index.js";
 import { wind } from "../quantity/index.js";
-import { hrefTo } from "../address/index.js";
 import { tubeOf } from "./ends.js";
 import { DRAWING, layOut, onOutline, rangesText, throughRanges, wayRound, widthOf } from "./enclosure-layout.js";
 import { placeLabels } from "./labels.js";
@@ -73,7 +72,7 @@ function drawnLeg(gate, scale) {
   const y = anchor !== "middle" ? to.y - 2 : below ? to.y + 13 : to.y - 7 - 13 * lines.length;
   return svg`<g class="leg"><title>${`${leg.cable} ${leg.side}, ${leg.fibers} fibers`}</title>
     <line x1=${from.x} y1=${from.y} x2=${to.x} y2=${to.y} stroke-width=${Math.min(12, Math.max(3, widthOf(leg.fibers, scale) / 3))}></line>
-    <a href=${hrefTo("cable", leg.cable)} tabindex="-1"><text class="leg-name" x=${x} y=${y} text-anchor=${anchor}>${leg.cable} ${leg.side}</text></a>
+    <text class="leg-name" x=${x} y=${y} text-anchor=${anchor}>${leg.cable} ${leg.side}</text>
     ${lines.map((line, index) => svg`<text class="leg-toward" x=${x} y=${y + 13 * (index + 1)} text-anchor=${anchor}>${line}</text>`)}</g>`;
 }
 

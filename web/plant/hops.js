@@ -13,8 +13,8 @@ import { trustWord } from "./parts.js";
  * @returns {unknown}
  */
 export function hopList(path) {
-  return html`<ol class="hops">${path.elements.map((element) => html`<li class=${`hop ${element.kind}`}>
-    <span class="hop-what">${what(element)}</span><span class="hop-trust">${sure(element)}</span><span class="hop-loss">${element.kind === "through" ? nothing : lossOf(element)}</span></li>`)}</ol>`;
+  return html`<ol class="hops">${path.elements.map((element, index) => html`<li class=${`hop ${element.kind}`}>
+    <span class="hop-what">${what(element, path.elements[index - 1]?.kind === "through")}</span><span class="hop-trust">${sure(element)}</span><span class="hop-loss">${element.kind === "through" ? nothing : lossOf(element)}</span></li>`)}</ol>`;
 }
 
 /**
@@ -42,10 +42,11 @@ function nameOf(element) {
 
 /**
  * @param {Element} element
+ * @param {boolean} goesOn whether it is the same glass as before, beyond an enclosure that it passes uncut
  * @returns {unknown}
  */
-function what(element) {
-  if (element.kind === "fiber") return fiber(element);
+function what(element, goesOn) {
+  if (element.kind === "fiber") return fiber(element, goesOn);
   if (element.kind === "connector") return html`${link("port", element.port)} <span class="lighter">connector pair</span>`;
   if (element.kind === "splice") return html`${element.a} = ${element.b} <span class="lighter">${spliced(element)}</span>`;
   if (element.kind === "jumper") return html`jumper ${link("port", element.a)} to ${link("port", element.b)} ${figure(`Jumper ${element.a} to ${element.b}`, "length", element.glass_m, { how: "recorded" })}`;
@@ -65,10 +66,12 @@ function spliced(splice) {
 
 /**
  * @param {import("../server/contract.d.ts").FiberElement} it
+ * @param {boolean} goesOn
  * @returns {unknown}
  */
-function fiber(it) {
-  return html`${link("cable", it.cable)} ${chip(it.tube_color, it.tube, "tube")} ${chip(it.fiber_color, it.fiber, "fiber")}
+function fiber(it, goesOn) {
+  const name = html`${link("cable", it.cable)} ${chip(it.tube_color, it.tube, "tube")} ${chip(it.fiber_color, it.fiber, "fiber")}`;
+  return html`${goesOn ? nothing : name}
     ${it.flags.map((flag) => html`<strong class=${`flag-${flag}`}>${flag}</strong> `)}
     <span class="hop-length">${figure(`Glass of ${it.cable}:${it.fiber}, ${it.from ?? "its start"} to ${it.to ?? "its end"}`, "length", it.glass_m, { how: it.length_basis, source: it.length_source })}
       <span class="lighter">${it.toward} to</span> ${it.to === null ? link("structure", it.to_structure) : link("enclosure", it.to)}</span>`;

@@ -6,7 +6,7 @@ import { hopList } from "./hops.js";
 
 /** @typedef {import("../server/contract.d.ts").Path} Path */
 
-/** Paths offered by name at once; beyond it a list to choose from is long but whole. */
+/** A basis for sums. */
 const sum = (/** @type {string} */ source) => ({ how: "sum", source });
 
 /**
@@ -49,11 +49,20 @@ export function pathParts(path) {
         <span class="lighter">expected,</span> ${figure(`Limit loss at ${path.wavelength_nm} nm`, "loss", totals.loss_limit_db, sum("Limit values where not measured"))} <span class="lighter">at the limits,</span>
         ${figure(`Statistical loss at ${path.wavelength_nm} nm`, "loss", totals.loss_statistical_db, sum("Expected and three standard deviations"))} <span class="lighter">statistical</span>`)}
       ${fact("Budget", budgetLine(path))}
-      ${fact("Joints", html`<span class="number">${totals.splices}</span> splices, <span class="number">${totals.connectors}</span> connector pairs${totals.splitters > 0 ? html`, <span class="number">${totals.splitters}</span> splitters` : nothing};
+      ${fact("Joints", html`${several(totals.splices, "splice")}, ${several(totals.connectors, "connector pair")}${totals.splitters > 0 ? html`, ${several(totals.splitters, "splitter")}` : nothing};
         <span class="lighter">${totals.unverified === 0 ? "all verified" : `${totals.unverified} not verified`}</span>`)}
       ${fact("Dispersion", dispersionLine(path))}
     </dl>
     <h2>Hop by hop</h2>${hopList(path)}`;
+}
+
+/**
+ * @param {number} number
+ * @param {string} thing
+ * @returns {unknown}
+ */
+function several(number, thing) {
+  return html`<span class="number">${number}</span> ${thing}${number === 1 ? "" : "s"}`;
 }
 
 /**

@@ -38,10 +38,10 @@ function cell(cable, sections, fiber, place, entry) {
   const range = useOf(sections, fiber);
   const sign = useSign(range?.use ?? "spare_unknown");
   const color = cable.fiber_colors[place] ?? "";
-  const said = [`fiber ${fiber}`, color, sign.words, range?.circuit, range?.owner, range?.reason].filter(Boolean).join(", ");
+  const said = [color, sign.words, range?.circuit, range?.owner, range?.reason].filter(Boolean).join(", ");
   return html`<td><a class=${`fiber-cell use-${sign.use}`} href=${hrefTo("fiber", `${cable.code}:${fiber}`)} tabindex=${entry ? 0 : -1}
-    title=${said} aria-label=${said}>${patch(parseColor(color))}<span class="cell-code">${parseColor(color).code}${fiber}</span><span
-    class="cell-letter">${sign.letter}</span></a></td>`;
+    title=${`fiber ${fiber}, ${said}`}>${patch(parseColor(color))}<span class="cell-code">${parseColor(color).code}${fiber}</span><span
+    class="cell-letter" aria-hidden="true">${sign.letter}</span><span class="unseen">, ${said}</span></a></td>`;
 }
 
 /** Rows and columns that each arrow key moves by. @type {Readonly<Record<string, [number, number]>>} */

@@ -215,11 +215,11 @@ export class ShellView extends LitElement {
 
   /** @param {Status | null} status @returns {unknown} */
   bar(status) {
-    return html`<header class="bar"><a class="mark" href=${hrefTo("start")}>Spanwright</a><span class="owner">${status?.owner ?? ""}</span><sw-find></sw-find>
+    return html`<header><div class="bar"><a class="mark" href=${hrefTo("start")}>Spanwright</a><span class="owner">${status?.owner ?? ""}</span><sw-find></sw-find>
       <sw-as-of .status=${status} .asOf=${this.address.asOf} .asIf=${this.address.asIf}></sw-as-of>
       <span class="bar-buttons"><button type="button" @click=${() => this.flipUnit()}>${units.unit === "ft" ? "feet" : "metres"} <kbd>u</kbd></button><button type="button"
         @click=${() => this.flipTheme()}>${themeNow() === "dark" ? "night" : "day"} <kbd>t</kbd></button><button type="button" aria-expanded=${this.keysOpen} @click=${() => this.showKeys()}>Keys <kbd>?</kbd></button></span>
-      </header>${status?.invented ? html`<p class="invented">${status.invented}</p>` : nothing}`;
+      </div>${status?.invented ? html`<p class="invented">${status.invented}</p>` : nothing}</header>`;
   }
 
   flipUnit() {

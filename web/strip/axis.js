@@ -23,5 +23,5 @@ export function drawnAxis(track, measure, window, y) {
       const x = window.x(glassAt(track, measure, value * each));
       return svg`<line x1=${x} y1=${y} x2=${x} y2=${y + 5}></line><text x=${x} y=${y + 16}>${decimal(value, value % 1 === 0 ? 0 : 1)}</text>`;
     })}
-    <text class="axis-unit" x=${window.right + 6} y=${y + 16}>${units.unit} ${measure}</text></g>`;
+    <text class="axis-unit" x=${window.right + 26} y=${y + 16}>${units.unit} ${measure}</text></g>`;
 }
