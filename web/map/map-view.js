@@ -23,7 +23,7 @@ export class MapView extends LitElement {
   /** @override */
   static properties = {
     status: { attribute: false }, path: { attribute: false }, shown: { attribute: false }, pointer: { attribute: false }, measure: { attribute: false },
-    standpoint: { attribute: false }, stamp: { attribute: false }, problem: { state: true }, tilesOn: { state: true }, thinned: { state: true }, over: { state: true },
+    standpoint: { attribute: false }, stamp: { attribute: false }, tilesOn: { state: true }, over: { state: true },
   };
 
   constructor() {
@@ -42,14 +42,12 @@ export class MapView extends LitElement {
     this.standpoint = null;
     /** @type {string} from which records; another one fetches anew */
     this.stamp = "";
-    this.problem = "";
     this.tilesOn = false;
-    this.thinned = false;
     /** @type {string} what a click would open */
     this.over = "";
     /** @type {LeafletMap | null} */
     this.map = null;
-    this.stock = new Stock((problem) => this.stocked(problem));
+    this.stock = new Stock(() => this.stocked());
     this.drawing = new Drawing(this.stock);
     /** @type {TileLayer | null} */
     this.tiles = null;
@@ -172,11 +170,9 @@ export class MapView extends LitElement {
     this.requestUpdate();
   }
 
-  /** @param {string} problem */
-  stocked(problem) {
-    this.problem = problem;
-    this.thinned = this.stock.thinned;
+  stocked() {
     this.drawing.redraw();
+    this.requestUpdate();
   }
 
   /** @param {{ x: number, y: number }} at @param {number} [further] */
@@ -232,8 +228,9 @@ export class MapView extends LitElement {
       <div class="map-buttons"><button type="button" @click=${() => this.map?.zoomIn(1)}>Closer</button><button type="button" @click=${() => this.map?.zoomOut(1)}>Farther</button>
         <button type="button" @click=${() => this.whole()}>Whole</button>${this.path ? html`<button type="button" @click=${() => this.wholePath()}>Path</button>` : nothing}</div>
       <p class="map-over" aria-hidden="true">${this.over}</p>
-      ${legend(this.thinned, tile, this.tilesOn, (on) => this.setTiles(on))}
-      ${this.problem ? html`<p class="problem map-problem" role="alert">${this.problem}</p>` : nothing}
+      ${legend(this.stock.thinned, tile, this.tilesOn, (on) => this.setTiles(on))}
+      ${this.stock.problem ? html`<p class="problem map-problem" role="alert">${this.stock.problem}</p>` : nothing}
+      ${this.stock.slow ? html`<p class="waiting map-problem" role="status">Reading the map <progress></progress> <button type="button" @click=${() => this.stock.stop()}>Stop</button></p>` : nothing}
       ${scaleBar(this.map, this.drawing.frame() !== null)}
       <p class="safety">Positions are records, not a locate. Call before you dig. Treat every fiber as live until proven dark. Follow local codes and licensed practice.${this.tilesOn && tile ? ` Tiles: ${tile.attribution}.` : ""}</p>`;
   }

@@ -10,11 +10,18 @@ import { projectBase, projectPlant } from "./projected.js";
 /** How much more than the screen is asked for on each side, as a share of it. */
 const BEYOND = 0.6;
 
+/** After this long a request shows that it is under way, ms. */
+const SLOW_MS = 1000;
+
 /** What the map has fetched: the plant and the base map round about the screen. */
 export class Stock {
-  /** @param {(problem: string) => void} changed is called when something came, with a sentence where it did not */
+  /** @param {() => void} changed is called when something came, did not come, or is overdue */
   constructor(changed) {
     this.changed = changed;
+    /** @type {string} what went wrong with the last request */
+    this.problem = "";
+    /** @type {boolean} whether what was asked for is overdue */
+    this.slow = false;
     /** @type {DrawnStructure[]} */
     this.structures = [];
     /** @type {DrawnSpan[]} */
@@ -50,6 +57,7 @@ export class Stock {
     this.abort = abort;
     const wide = widened(box);
     const params = { ...wide, zoom: level };
+    const timer = setTimeout(() => this.overdue(abort), SLOW_MS);
     try {
       const [plant, base] = await Promise.all([ask("/map/plant", params, abort.signal), ask("/map/base", params, abort.signal)]);
       Object.assign(this, projectPlant(plant));
@@ -57,10 +65,32 @@ export class Stock {
       this.thinned = plant.truncated;
       this.box = wide;
       this.zoom = level;
-      this.changed("");
+      this.problem = "";
     } catch (cause) {
-      if (!abort.signal.aborted) this.changed(`The map could not be read: ${cause instanceof Error ? cause.message : String(cause)}`);
+      if (!abort.signal.aborted) this.problem = `The map could not be read: ${cause instanceof Error ? cause.message : String(cause)}`;
+    } finally {
+      clearTimeout(timer);
+      if (this.abort === abort) this.settle();
     }
+  }
+
+  /** Stops the request under way; the map stays as it is. */
+  stop() {
+    this.abort?.abort();
+    this.settle();
+  }
+
+  settle() {
+    this.abort = null;
+    this.slow = false;
+    this.changed();
+  }
+
+  /** @param {AbortController} abort */
+  overdue(abort) {
+    if (this.abort !== abort) return;
+    this.slow = true;
+    this.changed();
   }
 }
 

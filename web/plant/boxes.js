@@ -16,14 +16,15 @@ export function panelsOf(enclosure) {
       <span class="lighter">${panel.ports.length} ports, ${panel.connector}, ${panel.ports.filter((port) => port.front !== "free").length} fronts taken</span></summary>
     <table><thead><tr><th class="right">Port</th><th>Rear</th><th>Trust</th><th>Front</th></tr></thead>
     <tbody>${panel.ports.map((port) => html`<tr><td class="right">${link("port", `${enclosure.code}/${panel.panel}/${port.port}`, String(port.port))}</td>
-      <td>${port.rear ?? html`<span class="lighter">nothing</span>`}</td><td>${port.rear === null ? nothing : trustWord(port.rear_trust)}</td><td>${front(port)}</td></tr>`)}</tbody></table></details>`);
+      <td>${port.rear ?? html`<span class="lighter">nothing</span>`}</td><td>${port.rear === null ? nothing : trustWord(port.rear_trust)}</td><td>${frontText(port)}</td></tr>`)}</tbody></table></details>`);
 }
 
 /**
+ * What is on the front of a port.
  * @param {Port} port
  * @returns {unknown}
  */
-function front(port) {
+export function frontText(port) {
   if (port.front === "free") return html`<span class="lighter">free</span>`;
   if (port.front === "jumper") return html`jumper to ${link("port", port.jumper_to)}`;
   const rest = port.circuits_total - port.circuits.length;

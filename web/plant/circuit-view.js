@@ -2,32 +2,19 @@ import { html } from "lit";
 import { ask, pathTo } from "../server/index.js";
 import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
-import { RecordView } from "./record-view.js";
 import { fact, heading, listed } from "./parts.js";
-import { pathsParts } from "./traced-view.js";
+import { TracedView } from "./traced-view.js";
 
 /** @typedef {import("../server/contract.d.ts").Circuit} Circuit */
-/** @typedef {import("../server/contract.d.ts").Path} Path */
 
 /** Restoration priorities in words. */
 const PRIORITIES = ["", "first to be restored", "second", "third", "fourth", "last to be restored"];
 
 /**
  * A circuit: whose it is, and the path that it lives on.
- * @extends {RecordView<Circuit>}
+ * @extends {TracedView<Circuit>}
  */
-export class CircuitView extends RecordView {
-  /** @override */
-  static properties = { ...RecordView.properties, paths: { attribute: false }, chosen: { attribute: false } };
-
-  constructor() {
-    super();
-    /** @type {Path[] | null} null while they are traced */
-    this.paths = null;
-    /** @type {number} */
-    this.chosen = 0;
-  }
-
+export class CircuitView extends TracedView {
   /** @param {AbortSignal} signal @override */
   question(signal) {
     return ask(pathTo("circuits", this.code), {}, signal);
@@ -43,9 +30,12 @@ export class CircuitView extends RecordView {
         ${fact("From a", html`${link("port", it.a)} <span class="lighter">at</span> ${link("structure", it.a_at.structure)}`)}
         ${fact("To z", html`${link("port", it.z)} <span class="lighter">at</span> ${link("structure", it.z_at.structure)}`)}
         ${fact("Protected by", it.partners.length > 0 ? html`${listed(it.partners.map((each) => link("circuit", each)))} <span class="lighter">group ${it.protection_group}</span>` : null)}
-      </dl>
-      ${pathsParts(this, this.paths, this.chosen)}
-      ${this.changedLine(it.changed, it.posting)}`;
+      </dl>`;
+  }
+
+  /** @param {Circuit} it @override */
+  foot(it) {
+    return this.changedLine(it.changed, it.posting);
   }
 }
 

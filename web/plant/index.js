@@ -5,6 +5,7 @@ export { EnclosureView } from "./enclosure-view.js";
 export { CableView } from "./cable-view.js";
 export { CircuitView } from "./circuit-view.js";
 export { CircuitsView } from "./circuits-view.js";
-export { TracedView } from "./traced-view.js";
+export { FiberView } from "./fiber-view.js";
+export { PortView } from "./port-view.js";
 export { PostingsView, PostingView } from "./postings-view.js";
 export { StartView } from "./start-view.js";

@@ -1,52 +1,40 @@
-import { LitElement, html, nothing } from "lit";
-import { UnitController } from "../quantity/index.js";
-import { heading } from "./parts.js";
-import { pathChooser, pathParts } from "./path-parts.js";
+import { html } from "lit";
+import { waiting } from "../server/index.js";
+import { RecordView } from "./record-view.js";
+import { pathsOf } from "./paths-of.js";
 
 /** @typedef {import("../server/contract.d.ts").Path} Path */
 
-/** A fiber or a port: the paths that the shell traced for it. */
-export class TracedView extends LitElement {
+/**
+ * A view of what has a path of its own: what the records say of it, and below it the paths that the shell traced.
+ * @template T
+ * @extends {RecordView<T>}
+ */
+export class TracedView extends RecordView {
   /** @override */
-  static properties = { code: { attribute: false }, what: { attribute: false }, paths: { attribute: false }, chosen: { attribute: false } };
+  static properties = { ...RecordView.properties, paths: { attribute: false }, chosen: { attribute: false } };
 
   constructor() {
     super();
-    /** @type {string} */
-    this.code = "";
-    /** @type {string} `fiber` or `port` */
-    this.what = "";
     /** @type {Path[] | null} null while they are traced */
     this.paths = null;
     /** @type {number} */
     this.chosen = 0;
-    new UnitController(this);
-  }
-
-  /** @override */
-  createRenderRoot() {
-    return this;
   }
 
   /** @override */
   render() {
-    return html`${heading(this.what, this.code)}${pathsParts(this, this.paths, this.chosen)}`;
+    const answer = this.asking.answer;
+    return html`${answer === null ? html`<h1>${this.code}</h1>` : this.draw(answer)}${waiting(this.asking)}
+      ${this.asking.problem ? "" : pathsOf(this, this.paths, this.chosen)}${answer === null ? "" : this.foot(answer)}`;
+  }
+
+  /**
+   * What stands below the paths.
+   * @param {T} answer
+   * @returns {unknown}
+   */
+  foot(answer) {
+    throw new Error(`each view has its own foot: ${String(answer)}`);
   }
 }
-
-/**
- * The chooser and the chosen path.
- * @param {HTMLElement} host sends the choice on
- * @param {Path[] | null} paths
- * @param {number} chosen
- * @returns {unknown}
- */
-export function pathsParts(host, paths, chosen) {
-  if (paths === null) return nothing;
-  if (paths.length === 0) return html`<p class="warning">No glass is joined here.</p>`;
-  const choose = (/** @type {number} */ index) => host.dispatchEvent(new CustomEvent("sw-path", { bubbles: true, detail: index }));
-  const path = paths[chosen] ?? paths[0];
-  return html`${pathChooser(paths, chosen, choose)}${path ? pathParts(path) : nothing}`;
-}
-
-customElements.define("sw-traced", TracedView);

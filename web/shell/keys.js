@@ -23,7 +23,7 @@ export const KEYS = Object.freeze([
 /** Keys that act where the focus is. */
 const PLACES = [
   ["On the map", [["arrows", "move"], ["+ −", "closer, farther"], ["Enter", "open what is nearest the middle"]]],
-  ["On the strip", [["← →", "along the glass (with Shift, farther)"], ["↑ ↓", "next, last structure"], ["Home End", "the path's ends"], ["+ −", "closer, farther"], ["Enter", "open what is nearest"]]],
+  ["On the strip", [["← →", "along the glass (with Shift, farther)"], ["↑ ↓", "next, last structure"], ["Home End", "the path's ends"], ["+ −", "closer, farther"], ["Enter", "open what is nearest"], ["Esc", "let the pointer go"]]],
   ["On a number", [["Enter", "How do you know?"], ["Esc", "back to the number"]]],
   ["In a tube chart", [["arrows", "from fiber to fiber"], ["Enter", "open the fiber"]]],
 ];

@@ -23,8 +23,10 @@ const VIEWS = Object.freeze({
   cable: ({ address, stamp }, zone) => html`<sw-cable .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-cable>`,
   circuit: ({ address, stamp, paths }, zone) =>
     html`<sw-circuit .code=${address.code} .stamp=${stamp} .zone=${zone} .paths=${paths} .chosen=${address.path}></sw-circuit>`,
-  fiber: tracedView,
-  port: tracedView,
+  fiber: ({ address, stamp, paths }, zone) =>
+    html`<sw-fiber .code=${address.code} .stamp=${stamp} .zone=${zone} .paths=${paths} .chosen=${address.path}></sw-fiber>`,
+  port: ({ address, stamp, paths }, zone) =>
+    html`<sw-port .code=${address.code} .stamp=${stamp} .zone=${zone} .paths=${paths} .chosen=${address.path}></sw-port>`,
   circuits: ({ stamp }) => html`<sw-circuits .code=${"circuits"} .stamp=${stamp}></sw-circuits>`,
   postings: ({ stamp }, zone) => html`<sw-postings .code=${"postings"} .stamp=${stamp} .zone=${zone}></sw-postings>`,
   posting: ({ address, stamp }, zone) => html`<sw-posting .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-posting>`,
@@ -38,14 +40,6 @@ const VIEWS = Object.freeze({
 export function sheetView(state) {
   const view = VIEWS[state.address.view];
   return view ? view(state, state.status?.time_zone ?? "UTC") : html`<sw-start .status=${state.status}></sw-start>`;
-}
-
-/**
- * @param {SheetState} state
- * @returns {unknown}
- */
-function tracedView({ address, paths }) {
-  return html`<sw-traced .code=${address.code} .what=${address.view} .paths=${paths} .chosen=${address.path}></sw-traced>`;
 }
 
 /**

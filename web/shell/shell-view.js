@@ -185,6 +185,16 @@ export class ShellView extends LitElement {
     this.requestUpdate();
   }
 
+  /**
+   * A place on the path is pointed at; one that was put on the strip by hand stays when the map is only passed over.
+   * @param {CustomEvent} event
+   */
+  pointed(event) {
+    const strip = /** @type {import("../strip/index.js").StripView | null} */ (this.querySelector("sw-strip"));
+    const passing = /** @type {Element} */ (event.target).localName === "sw-map";
+    if (!passing || !strip?.pinned) this.pointer = event.detail;
+  }
+
   /** @param {CustomEvent} event */
   openBasis({ detail }) {
     void /** @type {import("../basis/index.js").BasisNote | null} */ (this.querySelector("sw-basis-note"))?.open(detail.figure, detail.from);
@@ -195,7 +205,7 @@ export class ShellView extends LitElement {
     const status = this.status.answer;
     const paths = pathAtHand(this.tracing.answer, this.address.path);
     return html`<div class="shell" @sw-basis=${this.openBasis} @sw-shown=${(/** @type {CustomEvent} */ event) => (this.shown = event.detail)}
-      @sw-point=${(/** @type {CustomEvent} */ event) => (this.pointer = event.detail)} @sw-path=${(/** @type {CustomEvent} */ event) => this.go({ path: event.detail })}
+      @sw-point=${this.pointed} @sw-path=${(/** @type {CustomEvent} */ event) => this.go({ path: event.detail })}
       @sw-wavelength=${(/** @type {CustomEvent} */ event) => this.flipWavelength(event.detail)} @sw-measure=${(/** @type {CustomEvent} */ event) => this.setMeasure(event.detail)}
       @sw-fold=${() => this.fold()} @sw-stand=${(/** @type {CustomEvent} */ event) => keep({ stand: event.detail })}>
       ${this.bar(status)}
@@ -232,7 +242,8 @@ export class ShellView extends LitElement {
     const { address, tracing } = this;
     const own = ["circuit", "fiber", "port"].includes(address.view);
     const paths = own && tracing.answer ? [...tracing.answer.byWavelength.values()][0] ?? [] : null;
-    return html`${sheetView({ address, status, paths, stamp: this.stamp })}${waiting(tracing)}`;
+    const said = own && tracing.problem?.code === "not_found";
+    return html`${sheetView({ address, status, paths, stamp: this.stamp })}${said ? nothing : waiting(tracing)}`;
   }
 }
 

@@ -151,6 +151,7 @@ export class StripView extends LitElement {
       Home: () => this.stand(0),
       End: () => this.stand(this.whole),
       Enter: () => this.openNearest(at),
+      Escape: () => this.release(),
       "+": () => this.zoom(0.5),
       "=": () => this.zoom(0.5),
       "-": () => this.zoom(2),
@@ -168,6 +169,12 @@ export class StripView extends LitElement {
     this.pinned = true;
     this.stretch = this.stretch === null ? null : showing(this.stretch, at, this.whole);
     this.point(at);
+  }
+
+  /** Lets the pointer go where the mouse goes again. */
+  release() {
+    this.pinned = false;
+    this.point(null);
   }
 
   /**
