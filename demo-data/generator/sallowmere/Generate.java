@@ -22,6 +22,7 @@ import sallowmere.service.Sheets;
 import sallowmere.story.Stories;
 import sallowmere.town.District;
 import sallowmere.town.Districts;
+import sallowmere.town.Quarter;
 
 /** Writes the demo's records folder and its stories, then reads the folder back and checks it. */
 public final class Generate {
@@ -47,7 +48,8 @@ public final class Generate {
         Landscape land = Landscape.around(plant.structureOf("BR-1").at(), road, new Random(SEED + 1));
         List<District> districts = Districts.grow(plant, ring, land, SEED);
         Table sheets = records(folder, plant, ring, districts);
-        BaseMap.write(folder, plant, ring, land, districts, new Random(SEED + 2));
+        List<Quarter> quarters = Quarter.grow(plant, ring, land, districts, SEED + 6);
+        BaseMap.write(folder, plant, ring, land, districts, quarters, new Random(SEED + 2));
         List<String> wrong = Checks.of(folder);
         wrong.forEach(System.err::println);
         if (!wrong.isEmpty()) {

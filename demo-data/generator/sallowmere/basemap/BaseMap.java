@@ -14,6 +14,7 @@ import sallowmere.plant.Row;
 import sallowmere.plant.Structure;
 import sallowmere.ring.Ring;
 import sallowmere.town.District;
+import sallowmere.town.Quarter;
 import sallowmere.town.Street;
 
 /** The invented map under the plant: water, woods, streets, buildings and names of places. */
@@ -26,18 +27,26 @@ public final class BaseMap {
     private final GeoJson map = new GeoJson();
     private final Landscape land;
     private final List<District> districts;
+    private final List<Quarter> quarters;
     private final Random random;
 
-    private BaseMap(Landscape land, List<District> districts, Random random) {
+    private BaseMap(Landscape land, List<District> districts, List<Quarter> quarters, Random random) {
         this.land = land;
         this.districts = districts;
+        this.quarters = quarters;
         this.random = random;
     }
 
     /** Draws the map and writes it. */
     public static void write(
-            Path folder, Plant plant, Ring ring, Landscape land, List<District> districts, Random random) {
-        BaseMap base = new BaseMap(land, districts, random);
+            Path folder,
+            Plant plant,
+            Ring ring,
+            Landscape land,
+            List<District> districts,
+            List<Quarter> quarters,
+            Random random) {
+        BaseMap base = new BaseMap(land, districts, quarters, random);
         base.woods(ring);
         base.water();
         base.roads(ring, plant);
@@ -51,7 +60,7 @@ public final class BaseMap {
         Curve river = land.river();
         List<Point> north = new ArrayList<>();
         List<Point> south = new ArrayList<>();
-        for (double arc = 0; arc <= river.length(); arc += 110) {
+        for (double arc = 0; arc <= river.length(); arc += 60) {
             Point across = river.heading(arc).left().times(land.riverWidth(arc) / 2);
             north.add(0, river.at(arc).plus(across));
             south.add(river.at(arc).minus(across));
@@ -77,6 +86,7 @@ public final class BaseMap {
             Point centre = new Point(x, y);
             boolean free = land.dry(centre, major)
                     && districts.stream().allMatch(d -> d.centre().to(centre) > 1_150 + major)
+                    && quarters.stream().allMatch(q -> q.centre().to(centre) > 1_000 + major)
                     && land.lake().stream().allMatch(shore -> shore.to(centre) > major)
                     && ring.east().road().distance(centre) > major * 0.7;
             if (free) {
@@ -94,6 +104,20 @@ public final class BaseMap {
         map.line("street", "Ferry Loop", List.of(plant.structureOf("MH-9").at(), plant.structureOf("HUT-S").at()));
         Point entrance = plant.structureOf("EV-1").at();
         country("County Road 2", entrance, new Point(-10_800, 900), new Point(Landscape.WEST, 1_900));
+        country("Skarn Road", new Point(-11_800, -4_700), new Point(-9_300, -4_000), districts.get(7).centre(),
+                new Point(-4_300, -4_600), districts.get(9).centre());
+        country("Hollow Road", new Point(-10_800, 900), new Point(-9_900, 4_400), new Point(-6_400, 6_200),
+                districts.get(2).centre(), new Point(-1_800, 7_400), new Point(-2_600, Landscape.NORTH));
+        country("Mid Valley Road", districts.get(6).centre(), new Point(-5_200, 300), new Point(-3_300, 1_000),
+                districts.get(1).centre());
+        country("Corbel Drove", districts.get(3).centre(), new Point(400, 1_700), new Point(-200, -500),
+                districts.get(8).centre());
+        country("Oxbarrow Drove", districts.get(10).centre(), new Point(3_200, -1_200), new Point(3_900, 1_600),
+                districts.get(5).centre());
+        country("Wendle Bank", plant.structureOf("MH-8").at(), new Point(-1_600, -4_950), new Point(-5_000, -5_300),
+                new Point(-8_000, -5_200), new Point(-11_800, -6_300));
+        country("County Road 9", plant.structureOf("P-E107").at(), new Point(9_600, 700), new Point(12_200, -1_500),
+                new Point(Landscape.EAST, -2_100));
         country("County Road 7", entrance, new Point(-9_200, -2_600), new Point(-11_800, -4_700),
                 new Point(Landscape.WEST, -4_400));
         Point north = plant.structureOf("HUT-N").at();
@@ -127,14 +151,21 @@ public final class BaseMap {
     }
 
     private void towns() {
+        for (Quarter quarter : quarters) {
+            town(quarter.streets(), quarter.centre());
+        }
         for (District district : districts) {
-            Buildings buildings = new Buildings(land, district.streets(), random);
-            for (Street street : district.streets()) {
-                map.line("street", street.name(), street.line());
-                List<List<Point>> houses = buildings.along(street, district.centre());
-                if (!houses.isEmpty()) {
-                    map.shapes("building", "", houses);
-                }
+            town(district.streets(), district.centre());
+        }
+    }
+
+    private void town(List<Street> streets, Point centre) {
+        Buildings buildings = new Buildings(land, streets, random);
+        for (Street street : streets) {
+            map.line("street", street.name(), street.line());
+            List<List<Point>> houses = buildings.along(street, centre);
+            if (!houses.isEmpty()) {
+                map.shapes("building", "", houses);
             }
         }
     }

@@ -9,7 +9,7 @@ import java.util.Map;
 public final class Journey {
     final String start;
     final Map<String, Double> events = new LinkedHashMap<>();
-    final List<String> fibers = new ArrayList<>();
+    final List<Stretch> stretches = new ArrayList<>();
     String end;
     double sheath;
     double glass;
@@ -27,6 +27,11 @@ public final class Journey {
     /** Where it ended: a port, or the end of a fiber or splitter that nothing is joined to. */
     public String end() {
         return end;
+    }
+
+    /** The pieces of cable that it took, in order. */
+    public List<Stretch> stretches() {
+        return stretches;
     }
 
     /** Metres of glass. */

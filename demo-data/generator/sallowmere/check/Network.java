@@ -101,12 +101,14 @@ public final class Network {
         String[] a = from.split("\\|");
         String[] b = to.split("\\|", -1);
         Sheath sheath = sheaths.get(a[1]);
-        double metres = Math.abs(sheath.enclosure(glass.seq(b[0], a[1])) - sheath.enclosure(glass.seq(a[0], a[1])));
+        int leaves = glass.seq(a[0], a[1]);
+        int arrives = glass.seq(b[0], a[1]);
+        double metres = Math.abs(sheath.enclosure(arrives) - sheath.enclosure(leaves));
         journey.sheath += metres;
         double tray = trays.getOrDefault(a[0], 0.0) + trays.getOrDefault(b[0], 0.0);
         journey.glass += metres * (1 + overlengths.get(a[1]) / 100) + tray;
         journey.events.put(b[0].isEmpty() ? to : b[0], journey.glass);
-        journey.fibers.add(a[1] + ":" + a[3]);
+        journey.stretches.add(new Stretch(a[1], Integer.parseInt(a[3]), leaves, arrives));
     }
 
     private static String rear(String port) {

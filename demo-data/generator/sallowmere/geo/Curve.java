@@ -29,9 +29,7 @@ public final class Curve {
             Point from = places.get(i);
             Point to = places.get(i + 1);
             Point after = i + 2 == places.size() ? mirrored(from, to) : places.get(i + 2);
-            for (int step = 0; step < STEPS; step++) {
-                points.add(blend(before, from, to, after, step / (double) STEPS));
-            }
+            points.addAll(piece(List.of(before, from, to, after), STEPS));
         }
         points.add(places.get(places.size() - 1));
         return new Curve(points);
@@ -40,6 +38,15 @@ public final class Curve {
     /** The line through the places, corners kept. */
     public static Curve straight(List<Point> places) {
         return new Curve(places);
+    }
+
+    /** Some places on the smooth curve from the second of four places up to, not including, the third. */
+    public static List<Point> piece(List<Point> four, int count) {
+        List<Point> points = new ArrayList<>();
+        for (int step = 0; step < count; step++) {
+            points.add(blend(four.get(0), four.get(1), four.get(2), four.get(3), step / (double) count));
+        }
+        return points;
     }
 
     private static Point mirrored(Point far, Point about) {

@@ -64,16 +64,17 @@ public final class Landscape {
             double sine = StrictMath.sin(turn);
             points.add(centre.plus(new Point(x * cosine - y * sine, x * sine + y * cosine)));
         }
-        points.add(points.get(0));
         return smoothed(points);
     }
 
-    private static List<Point> smoothed(List<Point> ring) {
-        Curve curve = Curve.through(ring);
+    /** A closed line through the corners, which wrap around so that no corner shows where it closes. */
+    private static List<Point> smoothed(List<Point> corners) {
+        List<Point> around = new ArrayList<>(corners.subList(corners.size() - 2, corners.size()));
+        around.addAll(corners);
+        around.addAll(corners.subList(0, 3));
         List<Point> points = new ArrayList<>();
-        int steps = 56;
-        for (int i = 0; i < steps; i++) {
-            points.add(curve.at(curve.length() * i / steps));
+        for (int i = 2; i < corners.size() + 2; i++) {
+            points.addAll(Curve.piece(around.subList(i - 1, i + 3), 4));
         }
         points.add(points.get(0));
         return points;
@@ -97,6 +98,19 @@ public final class Landscape {
     /** Whether a place is dry: so many metres clear of the water. */
     public boolean dry(Point place, double clear) {
         return river.distance(place) > clear + 75 && !inside(lake, place);
+    }
+
+    /** Whether two places lie on the same bank of the river. */
+    public boolean sameBank(Point one, Point other) {
+        return northOfRiver(one) == northOfRiver(other);
+    }
+
+    private boolean northOfRiver(Point place) {
+        Point nearest = river.at(0);
+        for (Point point : river.points()) {
+            nearest = Math.abs(point.x() - place.x()) < Math.abs(nearest.x() - place.x()) ? point : nearest;
+        }
+        return place.y() > nearest.y();
     }
 
     /** Whether a place lies inside a closed shape. */

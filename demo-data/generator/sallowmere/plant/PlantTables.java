@@ -21,7 +21,7 @@ public final class PlantTables {
     public static final String REMARKED = "FDR-N-3";
 
     // The white number of the re-marked cable is lower by this than the yellow one at the same place.
-    private static final double WHITE_BELOW_YELLOW = 112;
+    private static final double WHITE_BELOW_YELLOW = 160;
     private static final int JOINT_USE_POLES = 1_500;
     private static final double UNKNOWN_SLACK = 0.06;
 

@@ -63,7 +63,9 @@ public final class Districts {
         for (double arc = 0; arc < road.length(); arc += 20) {
             best = road.at(arc).to(tap) < road.at(best).to(tap) ? arc : best;
         }
-        return road.heading(best).left().times(town.side());
+        Point square = road.heading(best).left().times(town.side());
+        double turn = StrictMath.toRadians(town.turn());
+        return square.times(StrictMath.cos(turn)).plus(square.left().times(StrictMath.sin(turn)));
     }
 
     private Point centre(TownPlan town) {
@@ -75,8 +77,8 @@ public final class Districts {
         Point seed = tap(town).at().plus(away(town).times(LATERAL));
         StreetNetwork network = StreetNetwork.grow(
                 centre,
-                1_020 + 80 * random.nextDouble(),
-                860 + 60 * random.nextDouble(),
+                1_150 + 90 * random.nextDouble(),
+                930 + 70 * random.nextDouble(),
                 Math.PI * random.nextDouble(),
                 ground(town),
                 List.of(seed),
@@ -109,6 +111,7 @@ public final class Districts {
     private Predicate<Point> ground(TownPlan town) {
         Point centre = centre(town);
         return place -> land.dry(place, 90)
+                && land.sameBank(place, centre)
                 && ring.south().road().distance(place) > 70
                 && ring.north().road().distance(place) > 70
                 && ring.east().road().distance(place) > 70

@@ -23,12 +23,13 @@ final class StreetNetwork {
 
     private StreetNetwork() {}
 
-    /** Grows a network within an ellipse, on the ground that a test allows; the seeds are crossings in any case. */
+    /** Grows a network within a lobed ellipse, on the ground that a test allows; the seeds are crossings in any case. */
     static StreetNetwork grow(Point centre, double major, double minor, double turn, Predicate<Point> ground,
             List<Point> seeds, Random random) {
         StreetNetwork network = new StreetNetwork();
         seeds.forEach(network::node);
-        for (int tries = 0; tries < 9_000; tries++) {
+        double lobes = 2 * Math.PI * random.nextDouble();
+        for (int tries = 0; tries < 8_000; tries++) {
             double u = 2 * random.nextDouble() - 1;
             double v = 2 * random.nextDouble() - 1;
             double out = u * u + v * v;
@@ -38,7 +39,9 @@ final class StreetNetwork {
             double cosine = StrictMath.cos(turn);
             double sine = StrictMath.sin(turn);
             Point place = centre.plus(new Point(x * cosine - y * sine, x * sine + y * cosine));
-            if (out < 1 && ground.test(place) && network.clear(place, apart)) {
+            double angle = StrictMath.atan2(v, u);
+            double edge = 0.86 + 0.2 * StrictMath.sin(2 * angle + lobes) + 0.16 * StrictMath.sin(3 * angle + 2.2 * lobes);
+            if (out < edge && ground.test(place) && network.clear(place, apart)) {
                 network.node(place);
             }
         }

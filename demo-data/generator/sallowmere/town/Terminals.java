@@ -11,6 +11,9 @@ import sallowmere.plant.Cable;
 final class Terminals {
     private static final double[] LARGE = {0.27, 0.42, 0.57, 0.72, 0.86, 1};
     private static final double[] SMALL = {0.52, 1};
+    // The drop that a fence anchor hits hangs on a terminal about 170 m from its cabinet.
+    private static final String NEAR_CABINET = "DST-02C";
+    private static final double NEAR = 170;
 
     private Terminals() {}
 
@@ -23,7 +26,8 @@ final class Terminals {
         int fiber = 1;
         cable.readAt(0);
         for (int i = 0; i < fractions.length; i++) {
-            int seq = cable.seqNear(cable.last().route() * fractions[i]);
+            boolean near = i == 0 && cable.code().equals(NEAR_CABINET);
+            int seq = cable.seqNear(near ? NEAR : cable.last().route() * fractions[i]);
             String code = Figures.code("DT-" + number + "-", before + i + 1, 2);
             sites.add(new TerminalSite(code, cable, seq, fiber, sizes.get(i)));
             cable.readAt(seq);
