@@ -72,16 +72,36 @@ public final class CutAndTrace {
         CutAnswers own = new CutAnswers(snapshot);
         List<Block> cables = largest(snapshot.network());
         Race ends = new Race("A cut of " + cables.get(0).count() + " fibers, both ends and the circuits, " + when)
-                .variant("recursive SQL", round -> sql.ends(cable(cables, round).firstPiece(), cable(cables, round).count()))
-                .variant("path index, circuits collected", round -> own.ends(cable(cables, round).firstPiece(), cable(cables, round).count()))
+                .variant(
+                        "recursive SQL",
+                        round -> sql.ends(
+                                cable(cables, round).firstPiece(),
+                                cable(cables, round).count()))
+                .variant(
+                        "path index, circuits collected",
+                        round -> own.ends(
+                                cable(cables, round).firstPiece(),
+                                cable(cables, round).count()))
                 .run(WARM_UP, rounds);
         System.out.println(ends.table());
         // The bare look-up, without collecting and sorting for the comparison; its answers were compared just above.
-        System.out.println(bare("path index, two ends and a circuit a fiber", ends, round ->
-                own.across(cable(cables, round + 1).firstPiece(), cable(cables, round + 1).count())));
+        System.out.println(bare(
+                "path index, two ends and a circuit a fiber",
+                ends,
+                round -> own.across(
+                        cable(cables, round + 1).firstPiece(),
+                        cable(cables, round + 1).count())));
         Race hops = new Race("The same cut, every hop listed, " + when)
-                .variant("recursive SQL", round -> sql.hops(cable(cables, round).firstPiece(), cable(cables, round).count()))
-                .variant("path index", round -> own.hops(cable(cables, round).firstPiece(), cable(cables, round).count()))
+                .variant(
+                        "recursive SQL",
+                        round -> sql.hops(
+                                cable(cables, round).firstPiece(),
+                                cable(cables, round).count()))
+                .variant(
+                        "path index",
+                        round -> own.hops(
+                                cable(cables, round).firstPiece(),
+                                cable(cables, round).count()))
                 .run(WARM_UP, rounds);
         System.out.println(hops.table());
     }

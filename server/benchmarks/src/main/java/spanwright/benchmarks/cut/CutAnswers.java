@@ -1,6 +1,5 @@
 package spanwright.benchmarks.cut;
 
-import java.util.Arrays;
 import java.util.stream.IntStream;
 import spanwright.circuits.Circuit;
 import spanwright.circuits.PortRange;
@@ -85,5 +84,4 @@ final class CutAnswers {
         }
         return sum;
     }
-
 }

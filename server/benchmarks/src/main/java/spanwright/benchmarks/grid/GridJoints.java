@@ -16,8 +16,8 @@ import spanwright.splicing.SpliceMethod;
 /** Writes joined ends as ranges of joints: as long as both sides run side by side, rising or falling. */
 final class GridJoints {
 
-    private static final JointFacts FACTS = new JointFacts(
-            null, SpliceMethod.FUSION, null, Trust.POSTED, null, null, null, null, null, null);
+    private static final JointFacts FACTS =
+            new JointFacts(null, SpliceMethod.FUSION, null, Trust.POSTED, null, null, null, null, null, null);
 
     private final Grid grid;
     private final Walks walks;
@@ -63,7 +63,9 @@ final class GridJoints {
         for (int end = joins.glassEnds(); end < joins.ends(); end++) {
             int other = joins.peer(end);
             if (other > end) {
-                add(new EndRange(leg(end), FiberRange.of(number(end))), new EndRange(leg(other), FiberRange.of(number(other))));
+                add(
+                        new EndRange(leg(end), FiberRange.of(number(end))),
+                        new EndRange(leg(other), FiberRange.of(number(other))));
             }
         }
         return joints;

@@ -148,8 +148,7 @@ public final class GridPlant {
         });
     }
 
-    private static RunRow row(
-            int id, int cable, int seq, int node, @Nullable Integer span) {
+    private static RunRow row(int id, int cable, int seq, int node, @Nullable Integer span) {
         return new RunRow(id, cable + 1, seq, node + 1, span, Length.ofMetres(10), Trust.POSTED, null, null);
     }
 
@@ -165,10 +164,8 @@ public final class GridPlant {
                     null));
         }
         for (int cable = 0; cable < grid.cables; cable++) {
-            records.add(new Pass(
-                    2 * cable + 1, grid.from[cable] + 1, cable + 1, 2 * cable + 1, List.of(), List.of()));
-            records.add(
-                    new Pass(2 * cable + 2, grid.to[cable] + 1, cable + 1, 2 * cable + 2, List.of(), List.of()));
+            records.add(new Pass(2 * cable + 1, grid.from[cable] + 1, cable + 1, 2 * cable + 1, List.of(), List.of()));
+            records.add(new Pass(2 * cable + 2, grid.to[cable] + 1, cable + 1, 2 * cable + 2, List.of(), List.of()));
         }
     }
 

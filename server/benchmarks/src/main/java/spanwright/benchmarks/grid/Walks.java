@@ -37,6 +37,7 @@ final class Walks {
     private final Random random;
     /** Fibers of a cable given to circuits so far; they are given from the first on. */
     private final int[] used;
+
     private int usedSections;
 
     Walks(Grid grid, Random random) {
@@ -162,8 +163,7 @@ final class Walks {
         }
         int count = Math.min(grid.fibers[ahead], grid.fibers[back]);
         for (int fiber = Math.max(used[ahead], used[back]); fiber < count; fiber++) {
-            joins.join(
-                    2 * (grid.firstSection[back] + fiber) + 1, 2 * (grid.firstSection[ahead] + fiber));
+            joins.join(2 * (grid.firstSection[back] + fiber) + 1, 2 * (grid.firstSection[ahead] + fiber));
         }
     }
 }

@@ -42,8 +42,8 @@ public final class Race {
                     samples.get(index).add(time);
                 }
                 if (index > 0 && !Objects.deepEquals(expected, answer)) {
-                    throw new IllegalStateException(
-                            title + ", round " + round + ": " + samples.get(index).name() + " answers otherwise");
+                    throw new IllegalStateException(title + ", round " + round + ": "
+                            + samples.get(index).name() + " answers otherwise");
                 }
                 expected = answer;
             }
@@ -67,8 +67,7 @@ public final class Race {
         text.append("\n### ").append(title).append("\n\n");
         text.append("| variant | median | p99 | rounds | times the first |\n|---|---|---|---|---|\n");
         for (int index = 0; index < samples.size(); index++) {
-            text.append(samples.get(index).row())
-                    .append(String.format(Locale.ROOT, " %.1f |%n", timesFaster(index)));
+            text.append(samples.get(index).row()).append(String.format(Locale.ROOT, " %.1f |%n", timesFaster(index)));
         }
         return text.toString();
     }

@@ -40,8 +40,7 @@ public final class Samples {
 
     /** As a row of a table: name, median, 99th percentile, samples. */
     String row() {
-        return String.format(
-                Locale.ROOT, "| %s | %s | %s | %d |", name, text(median()), text(quantile(0.99)), count);
+        return String.format(Locale.ROOT, "| %s | %s | %s | %d |", name, text(median()), text(quantile(0.99)), count);
     }
 
     /** A time in the unit that reads best. */

@@ -43,7 +43,8 @@ public final class SqlNetwork implements AutoCloseable {
             statement.execute("PRAGMA cache_size = -4000000");
             statement.execute("PRAGMA mmap_size = 8000000000");
             statement.execute("CREATE TABLE sym(a INTEGER PRIMARY KEY, b INTEGER NOT NULL)");
-            statement.execute("CREATE TABLE circuit_end(e INTEGER, circuit INTEGER, PRIMARY KEY(e, circuit)) WITHOUT ROWID");
+            statement.execute(
+                    "CREATE TABLE circuit_end(e INTEGER, circuit INTEGER, PRIMARY KEY(e, circuit)) WITHOUT ROWID");
             statement.execute("CREATE TEMP TABLE start(piece INTEGER PRIMARY KEY)");
         }
         connection.setAutoCommit(false);
@@ -72,8 +73,10 @@ public final class SqlNetwork implements AutoCloseable {
     }
 
     private void circuits(Snapshot snapshot) throws SQLException {
-        try (PreparedStatement insert = connection.prepareStatement("INSERT OR IGNORE INTO circuit_end VALUES (?, ?)")) {
-            for (Circuit circuit : (Iterable<Circuit>) snapshot.records().circuits().list()::iterator) {
+        try (PreparedStatement insert =
+                connection.prepareStatement("INSERT OR IGNORE INTO circuit_end VALUES (?, ?)")) {
+            for (Circuit circuit :
+                    (Iterable<Circuit>) snapshot.records().circuits().list()::iterator) {
                 insert(insert, snapshot.network(), circuit, circuit.a());
                 insert(insert, snapshot.network(), circuit, circuit.z());
             }
@@ -83,7 +86,10 @@ public final class SqlNetwork implements AutoCloseable {
     private static void insert(PreparedStatement insert, Network network, Circuit circuit, PortRange ports)
             throws SQLException {
         for (int index = 0; index < ports.ports().count(); index++) {
-            insert.setInt(1, network.endOf(EndKey.of(LegKind.FRONT, ports.panel(), ports.ports().at(index))));
+            insert.setInt(
+                    1,
+                    network.endOf(EndKey.of(
+                            LegKind.FRONT, ports.panel(), ports.ports().at(index))));
             insert.setInt(2, circuit.id());
             insert.execute();
         }

@@ -16,7 +16,8 @@ class GridPlantTest {
         assertThat(plant.sections()).isBetween(10_000, 40_000);
         SnapshotEditor editor = Snapshot.empty().edit();
 
-        plant.list().forEach(record -> assertThat(editor.apply(Change.add(record))).isEmpty());
+        plant.list()
+                .forEach(record -> assertThat(editor.apply(Change.add(record))).isEmpty());
 
         assertThat(editor.finish()).isEmpty();
     }
