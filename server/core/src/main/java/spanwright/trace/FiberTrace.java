@@ -1,0 +1,120 @@
+package spanwright.trace;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import spanwright.network.Block;
+import spanwright.network.Network;
+
+/** Finds the routes through each piece of one fiber: every walk backward from it, joined to every walk onward. */
+final class FiberTrace {
+
+    private static final int[] NOTHING = new int[0];
+
+    private final Network network;
+    private final Walker walker;
+    private final int cable;
+    private final int fiber;
+    private final List<Route> routes = new ArrayList<>();
+
+    FiberTrace(Network network, Walker walker, int cable, int fiber) {
+        this.network = network;
+        this.walker = walker;
+        this.cable = cable;
+        this.fiber = fiber;
+    }
+
+    /**
+     * A route through a piece, run in the cable's direction.
+     *
+     * @param back the ends entered before the piece
+     * @param onward the ends entered from the piece on
+     * @param first the end where it begins; of a circle none
+     * @param last the end where it ends; of a circle none
+     * @param circle whether it is a circle: then the elements of {@code onward} come first
+     * @param closed whether a joint leads from the circle's last piece to its first
+     */
+    record Route(int[] back, int[] onward, int first, int last, boolean circle, boolean closed) {
+
+        private static Route open(Walk back, Walk onward) {
+            return new Route(back.turnedWithoutFirst(), onward.entered(), back.last(), onward.last(), false, false);
+        }
+
+        private static Route circle(int[] back, int[] onward, boolean closed) {
+            return new Route(back, onward, Network.NONE, Network.NONE, true, closed);
+        }
+    }
+
+    List<Route> routes() {
+        List<Block> sections = network.sectionsOf(cable);
+        int from = 0;
+        while (from < sections.size()) {
+            int to = from;
+            while (to + 1 < sections.size() && uncut(sections.get(to).piece(fiber))) {
+                to++;
+            }
+            addRoutes(sections.get(from).piece(fiber), to - from + 1);
+            from = to + 1;
+        }
+        return routes;
+    }
+
+    /** Whether a section's fiber goes on uncut into the next section. */
+    private boolean uncut(int section) {
+        int end = 2 * section + 1;
+        return network.peer(end) != Network.NONE && network.joint(end) == 0;
+    }
+
+    private void addRoutes(int firstSection, int sections) {
+        List<Walk> backward = walker.all(2 * firstSection + 1);
+        List<Walk> onward = walker.all(2 * firstSection);
+        if ((long) backward.size() * onward.size() > walker.mostWalks()) {
+            onward = List.of(walker.plain(2 * firstSection));
+        }
+        for (Walk back : backward) {
+            if (back.stop() == Walk.Stop.CROSSED) {
+                int[] piece = Arrays.copyOf(onward.get(0).entered(), sections);
+                routes.add(Route.circle(back.turnedWithoutFirst(), piece, true));
+            } else if (!back.loop()) {
+                join(back, onward);
+            }
+        }
+        // A circle that closes at the piece is found both ways; it counts once.
+        for (Walk on : onward) {
+            if (on.loop()) {
+                routes.add(Route.circle(NOTHING, on.entered(), on.stop() == Walk.Stop.CIRCLE));
+            }
+        }
+    }
+
+    private void join(Walk back, List<Walk> onward) {
+        Set<Integer> walked = new LinkedHashSet<>();
+        for (int entering : back.turnedWithoutFirst()) {
+            walked.add(entering >> 1);
+        }
+        Set<List<Integer>> circles = new LinkedHashSet<>();
+        for (Walk on : onward) {
+            int met = on.loop() ? -1 : firstOf(walked, on.entered());
+            if (met >= 0) {
+                int[] until = Arrays.copyOf(on.entered(), met);
+                if (circles.add(Arrays.stream(until).boxed().toList())) {
+                    routes.add(Route.circle(back.turnedWithoutFirst(), until, true));
+                }
+            } else if (!on.loop()) {
+                routes.add(Route.open(back, on));
+            }
+        }
+    }
+
+    /** The first index at which a walk comes to one of these pieces; below 0 where it does not. */
+    private static int firstOf(Set<Integer> walked, int[] entered) {
+        for (int index = 0; index < entered.length; index++) {
+            if (walked.contains(entered[index] >> 1)) {
+                return index;
+            }
+        }
+        return -1;
+    }
+}
