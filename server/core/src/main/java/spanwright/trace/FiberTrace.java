@@ -26,24 +26,58 @@ final class FiberTrace {
         this.fiber = fiber;
     }
 
-    /**
-     * A route through a piece, run in the cable's direction.
-     *
-     * @param back the ends entered before the piece
-     * @param onward the ends entered from the piece on
-     * @param first the end where it begins; of a circle none
-     * @param last the end where it ends; of a circle none
-     * @param circle whether it is a circle: then the elements of {@code onward} come first
-     * @param closed whether a joint leads from the circle's last piece to its first
-     */
-    record Route(int[] back, int[] onward, int first, int last, boolean circle, boolean closed) {
+    /** A route through a piece, run in the cable's direction. */
+    static final class Route {
+
+        private final int[] back;
+        private final int[] onward;
+        private final int first;
+        private final int last;
+        private final boolean closed;
+
+        private Route(int[] back, int[] onward, int first, int last, boolean closed) {
+            this.back = back;
+            this.onward = onward;
+            this.first = first;
+            this.last = last;
+            this.closed = closed;
+        }
 
         private static Route open(Walk back, Walk onward) {
-            return new Route(back.turnedWithoutFirst(), onward.entered(), back.last(), onward.last(), false, false);
+            return new Route(back.turnedWithoutFirst(), onward.entered(), back.last(), onward.last(), false);
         }
 
         private static Route circle(int[] back, int[] onward, boolean closed) {
-            return new Route(back, onward, Network.NONE, Network.NONE, true, closed);
+            return new Route(back, onward, Network.NONE, Network.NONE, closed);
+        }
+
+        /** The ends entered before the piece; of a circle those met last. */
+        int[] back() {
+            return back;
+        }
+
+        /** The ends entered from the piece on. */
+        int[] onward() {
+            return onward;
+        }
+
+        /** The end where it begins; NONE for a circle. */
+        int first() {
+            return first;
+        }
+
+        /** The end where it ends; NONE for a circle. */
+        int last() {
+            return last;
+        }
+
+        boolean circle() {
+            return first == Network.NONE;
+        }
+
+        /** Whether a joint leads from a circle's last piece to its first. */
+        boolean closed() {
+            return closed;
         }
     }
 

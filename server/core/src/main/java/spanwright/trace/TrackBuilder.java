@@ -37,6 +37,12 @@ final class TrackBuilder {
             this.at = at;
         }
 
+        /** Whether the track stays at this stop: the same structure, and not from one enclosure to another. */
+        private boolean holds(Structure other, @Nullable Enclosure within) {
+            return structure.id() == other.id()
+                    && (enclosure == null || within == null || enclosure.id() == within.id());
+        }
+
         private Station station() {
             return new Station(
                     structure, enclosure, coilFrom == null || coilTo == null ? at : middle(coilFrom, coilTo), coil);
@@ -162,10 +168,7 @@ final class TrackBuilder {
     /** The track is at a structure, in an enclosure or not: it stays at the same stop, or comes to the next one. */
     private void comeTo(Structure structure, @Nullable Enclosure enclosure) {
         Stop stop = stops.isEmpty() ? null : stops.get(stops.size() - 1);
-        boolean same = stop != null
-                && stop.structure.id() == structure.id()
-                && (stop.enclosure == null || enclosure == null || stop.enclosure.id() == enclosure.id());
-        if (!same) {
+        if (stop == null || !stop.holds(structure, enclosure)) {
             stops.add(new Stop(structure, enclosure, points.get(points.size() - 1)));
         } else if (stop.enclosure == null) {
             stop.enclosure = enclosure;

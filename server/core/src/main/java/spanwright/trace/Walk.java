@@ -1,15 +1,15 @@
 package spanwright.trace;
 
-import java.util.Arrays;
+/** A walk over the network. */
+final class Walk {
 
-/**
- * A walk over the network.
- *
- * @param entered the ends by which it enters its pieces, in order; a splitter is crossed by entering a terminal's outer
- *     end and then another terminal's inner end
- * @param stop why it ends
- */
-record Walk(int[] entered, Stop stop) {
+    private final int[] entered;
+    private final Stop stop;
+
+    Walk(int[] entered, Stop stop) {
+        this.entered = entered;
+        this.stop = stop;
+    }
 
     /** Why a walk ends. */
     enum Stop {
@@ -23,6 +23,19 @@ record Walk(int[] entered, Stop stop) {
         CIRCLE,
         /** It came to a splitter's terminal that it has walked already. */
         CROSSED
+    }
+
+    /**
+     * The ends by which it enters its pieces, in order; a splitter is crossed by entering a terminal's outer end and then
+     * another terminal's inner end. Not to be changed.
+     */
+    int[] entered() {
+        return entered;
+    }
+
+    /** Why it ends. */
+    Stop stop() {
+        return stop;
     }
 
     boolean loop() {
@@ -42,20 +55,5 @@ record Walk(int[] entered, Stop stop) {
             turned[index] = entered[entered.length - 1 - index] ^ 1;
         }
         return turned;
-    }
-
-    @Override
-    public boolean equals(Object other) {
-        return other instanceof Walk walk && stop == walk.stop && Arrays.equals(entered, walk.entered);
-    }
-
-    @Override
-    public int hashCode() {
-        return 31 * Arrays.hashCode(entered) + stop.hashCode();
-    }
-
-    @Override
-    public String toString() {
-        return stop + " " + Arrays.toString(entered);
     }
 }

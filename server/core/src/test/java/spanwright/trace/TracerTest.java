@@ -122,8 +122,7 @@ class TracerTest {
 
     @Test
     void behind_a_splitters_input_there_is_a_path_an_output_those_that_lead_nowhere_too() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 2 : H1 100 H2
                 cable D-1 2 : H2 50 H3
                 enclosure E1 H1 : F-1
@@ -164,8 +163,7 @@ class TracerTest {
 
     @Test
     void an_output_leads_to_the_inputs_only() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 enclosure E1 H1
                 panel E1 P 9
                 splitter E1 S1 1x2
@@ -181,8 +179,8 @@ class TracerTest {
 
         String up = "E1/P/1 >> (E1/P/1) | S1 out 1>in | S1 in ~ S2 out 3";
         assertThat(TraceText.ofPort(plant, "E1/P/1"))
-                .isEqualTo(up + " | S2 out 3>in >> S2 in @ E1\n"
-                        + up + " | S2 out 3>in 2 | (E1/P/4) >> E1/P/4 complete C-1");
+                .isEqualTo(up + " | S2 out 3>in >> S2 in @ E1\n" + up
+                        + " | S2 out 3>in 2 | (E1/P/4) >> E1/P/4 complete C-1");
         assertThat(TraceText.ofCircuit(plant, "C-1"))
                 .isEqualTo(up + " | S2 out 3>in 2 | (E1/P/4) >> E1/P/4 complete C-1");
         assertThat(TraceText.ofCircuit(plant, "C-2")).isEqualTo(up + " >> S2 out 3 @ E1");
@@ -191,8 +189,7 @@ class TracerTest {
 
     @Test
     void splitters_in_a_row_give_every_output_in_order() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 enclosure E1 H1
                 panel E1 P 1
                 splitter E1 S1 1x2
@@ -210,8 +207,7 @@ class TracerTest {
 
     @Test
     void a_circuit_on_two_fibers_has_a_path_a_fiber_in_its_order() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 4 : H1 100 H2
                 enclosure E1 H1 : F-1
                 enclosure E2 H2 : F-1
@@ -222,9 +218,7 @@ class TracerTest {
                 circuit C-1 E1/P/1-2 E2/P/4-3
                 """);
 
-        assertThat(TraceText.ofCircuit(plant, "C-1"))
-                .isEqualTo(
-                        """
+        assertThat(TraceText.ofCircuit(plant, "C-1")).isEqualTo("""
                         E1/P/1 >> (E1/P/1) | F-1:1 E1>E2 100/100 >> F-1 back 1 @ E2
                         E1/P/2 >> (E1/P/2) | F-1:2 E1>E2 100/100 | (E2/P/3) >> E2/P/3 complete C-1""");
         assertThat(TraceText.ofPort(plant, "E1/P/3"))
@@ -234,8 +228,7 @@ class TracerTest {
 
     @Test
     void a_circuit_whose_path_leads_elsewhere_is_not_complete() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 2 : H1 100 H2
                 enclosure E1 H1 : F-1
                 enclosure E2 H2 : F-1
@@ -252,8 +245,7 @@ class TracerTest {
 
     @Test
     void a_ring_leaves_its_enclosure_ahead_from_its_first_row_and_back_from_its_last() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable R-1 2 : H1 100 H2 100 H3 150 H1
                 enclosure E1 H1 tray=1 : R-1/0 R-1/3
                 enclosure E2 H2 tray=1 : R-1
@@ -269,8 +261,7 @@ class TracerTest {
 
     @Test
     void a_circle_of_splices_begins_at_the_piece_asked_for() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 2 : H1 100 H2 100 H3
                 enclosure E1 H1 : F-1
                 enclosure E2 H2 : F-1
@@ -287,8 +278,7 @@ class TracerTest {
 
     @Test
     void a_circle_over_a_jumper_begins_at_the_port_asked_for() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable R-1 1 : H1 100 H2 100 H3 100 H1
                 enclosure E1 H1 : R-1/0 R-1/3
                 panel E1 P 2
@@ -303,8 +293,7 @@ class TracerTest {
 
     @Test
     void an_output_that_leads_back_to_its_own_splitter_is_a_circle() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 1 : H1 100 H2 100 H1
                 enclosure E1 H1 : F-1/0 F-1/2
                 panel E1 P 2
@@ -322,8 +311,7 @@ class TracerTest {
 
     @Test
     void a_planned_joint_is_walked_only_as_if_its_job_were_built() {
-        String drawing =
-                """
+        String drawing = """
                 cable F-1 2 : H1 100 H2
                 cable D-1 2 : H2 100 H3
                 enclosure E2 H2 : F-1 D-1
