@@ -1,3 +1,25 @@
+/** @typedef {{ west: number, east: number, north: number, south: number }} Box on the world's square, north above south */
+
+/**
+ * The box round lines.
+ * @param {Float64Array[]} lines x and y in turn, on the world's square
+ * @returns {Box}
+ */
+export function boxOf(lines) {
+  const box = { west: Infinity, east: -Infinity, north: Infinity, south: -Infinity };
+  for (const line of lines) {
+    for (let index = 0; index < line.length; index += 2) {
+      const x = line[index] ?? 0;
+      const y = line[index + 1] ?? 0;
+      if (x < box.west) box.west = x;
+      if (x > box.east) box.east = x;
+      if (y < box.north) box.north = y;
+      if (y > box.south) box.south = y;
+    }
+  }
+  return box;
+}
+
 /**
  * How the world's square lies on the screen at one moment.
  */
@@ -39,20 +61,11 @@ export class Frame {
   }
 
   /**
-   * Whether any of a line can be on the screen, by its bounding box.
-   * @param {Float64Array} line on the world's square
+   * Whether anything within a box can be on the screen.
+   * @param {Box} box on the world's square
    * @returns {boolean}
    */
-  meets(line) {
-    let [west, east, north, south] = [Infinity, -Infinity, Infinity, -Infinity];
-    for (let index = 0; index < line.length; index += 2) {
-      const x = line[index] ?? 0;
-      const y = line[index + 1] ?? 0;
-      if (x < west) west = x;
-      if (x > east) east = x;
-      if (y < north) north = y;
-      if (y > south) south = y;
-    }
+  meets({ west, east, north, south }) {
     return this.x(east) >= 0 && this.y(south) >= 0 && this.x(west) <= this.width && this.y(north) <= this.height;
   }
 

@@ -6,8 +6,12 @@
 /** Kinds drawn as ways, and how wide at a street's zoom, px. @type {Readonly<Record<string, number>>} */
 const WAYS = Object.freeze({ road: 5, street: 3, rail: 1.4, track: 1, river: 4 });
 
-/** Streets are drawn from this zoom on. */
-const STREETS = 13;
+/** Ways that are broken lines. @type {Readonly<Record<string, number[]>>} */
+const DASHES = Object.freeze({ rail: [6, 4], track: [3, 3] });
+
+/** Small streets are drawn from this zoom on, and buildings. */
+const STREETS = 12.5;
+const BUILDINGS = 14.5;
 
 /**
  * The base map, in the faintest ink: what the plant is found by, never louder than it.
@@ -18,8 +22,7 @@ const STREETS = 13;
  */
 export function paintBase(canvas, frame, inks, base) {
   for (const each of base) {
-    const line = each.rings[0];
-    if (!line || line.length < 4 || !frame.meets(line)) continue;
+    if ((each.rings[0]?.length ?? 0) < 4 || !frame.meets(each.box)) continue;
     if (each.area) paintArea(canvas, frame, inks, each);
     else paintWay(canvas, frame, inks, each);
   }
@@ -32,17 +35,18 @@ export function paintBase(canvas, frame, inks, base) {
  * @param {DrawnBase} area
  */
 function paintArea(canvas, frame, inks, area) {
+  if (area.kind === "building" && frame.zoom < BUILDINGS) return;
   canvas.beginPath();
   for (const ring of area.rings) frame.trace(canvas, ring);
   canvas.closePath();
-  const water = area.kind === "water";
+  const solid = area.kind === "water" || area.kind === "building";
   canvas.fillStyle = inks.faint;
-  canvas.globalAlpha = water ? 0.55 : 0.22;
+  canvas.globalAlpha = solid ? 0.55 : 0.22;
   canvas.fill("evenodd");
   canvas.globalAlpha = 1;
   canvas.strokeStyle = inks.faint;
   canvas.lineWidth = 1;
-  canvas.setLineDash(water ? [] : [2, 3]);
+  canvas.setLineDash(solid ? [] : [2, 3]);
   canvas.stroke();
   canvas.setLineDash([]);
 }
@@ -54,19 +58,27 @@ function paintArea(canvas, frame, inks, area) {
  * @param {DrawnBase} way
  */
 function paintWay(canvas, frame, inks, way) {
-  const small = way.kind === "street" || way.kind === "track";
-  if (small && frame.zoom < STREETS) return;
+  if (way.rank > 3 && frame.zoom < STREETS) return;
   const grown = Math.max(0.35, Math.min(2.6, 2 ** (frame.zoom - 15.5)));
+  const flows = way.kind === "river" || way.kind === "water";
   canvas.beginPath();
   for (const ring of way.rings) frame.trace(canvas, ring);
   canvas.strokeStyle = inks.faint;
   canvas.lineJoin = "round";
-  canvas.setLineDash(way.kind === "rail" ? [6, 4] : way.kind === "track" ? [3, 3] : []);
-  canvas.lineWidth = Math.max(0.8, (WAYS[way.kind] ?? 1.2) * grown);
-  canvas.globalAlpha = way.kind === "river" || way.kind === "water" ? 0.55 : 0.8;
+  canvas.setLineDash(DASHES[way.kind] ?? []);
+  canvas.lineWidth = Math.max(0.8, widthOf(way) * grown);
+  canvas.globalAlpha = flows ? 0.55 : 0.8;
   canvas.stroke();
   canvas.globalAlpha = 1;
   canvas.setLineDash([]);
+}
+
+/**
+ * @param {DrawnBase} way
+ * @returns {number} px at a street's zoom
+ */
+function widthOf({ kind, rank }) {
+  return WAYS[kind === "street" && rank < 3 ? "road" : kind] ?? 1.2;
 }
 
 /**
@@ -83,7 +95,7 @@ export function paintNames(canvas, frame, inks, base, room) {
     const line = each.rings[0];
     if (!line) continue;
     if (line.length === 2) placeName(canvas, frame, inks, each, room);
-    else if (each.area ? frame.zoom > 12 : frame.zoom >= (each.kind === "street" ? 15.5 : 13.5)) wayName(canvas, frame, inks, each, room);
+    else if (each.area ? frame.zoom > 12 : frame.zoom >= (each.rank > 3 ? 15.5 : 13.5)) wayName(canvas, frame, inks, each, room);
   }
 }
 
@@ -114,7 +126,7 @@ function placeName(canvas, frame, inks, place, room) {
  */
 function wayName(canvas, frame, inks, way, room) {
   const line = way.rings[0];
-  if (!line || !frame.meets(line)) return;
+  if (!line || !frame.meets(way.box)) return;
   canvas.font = `italic 11px ${inks.font}`;
   const name = way.name ?? "";
   const spot = way.area ? middleOf(frame, line) : longestPiece(frame, line);

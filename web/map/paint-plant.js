@@ -24,7 +24,7 @@ export function paintSpans(canvas, frame, inks, spans) {
   /** @type {Map<string, DrawnSpan[]>} */
   const alike = new Map();
   for (const span of spans) {
-    if (!frame.meets(span.line)) continue;
+    if (!frame.meets(span.box)) continue;
     const key = `${span.placement} ${span.width} ${span.state === "in service"}`;
     const list = alike.get(key);
     if (list) list.push(span);

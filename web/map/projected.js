@@ -1,3 +1,4 @@
+import { boxOf } from "./frame.js";
 import { importanceOf, weightOf } from "./tags.js";
 
 /** @typedef {import("../server/contract.d.ts").PlantMap} PlantMap */
@@ -28,6 +29,7 @@ import { importanceOf, weightOf } from "./tags.js";
  * @property {string} state
  * @property {number} width px
  * @property {Float64Array} line x and y in turn, on the world's square
+ * @property {import("./frame.js").Box} box round it
  */
 
 /**
@@ -37,7 +39,11 @@ import { importanceOf, weightOf } from "./tags.js";
  * @property {number} rank 1 to 5
  * @property {boolean} area
  * @property {Float64Array[]} rings lines, or an area's rings; a place is one point
+ * @property {import("./frame.js").Box} box round it
  */
+
+/** A way of the base map that reaches this far without a rank is a road, on the world's square (2 km at 48 degrees). */
+const FAR = 0.019;
 
 /**
  * @param {number} lon degrees
@@ -75,7 +81,8 @@ export function projectPlant(answer) {
   for (const feature of answer.features) {
     if (feature.properties.record === "span") {
       const { code, placement, state, fibers } = feature.properties;
-      spans.push({ code, placement, state, width: weightOf(fibers), line: worldLine(/** @type {number[][]} */ (feature.geometry.coordinates)) });
+      const line = worldLine(/** @type {number[][]} */ (feature.geometry.coordinates));
+      spans.push({ code, placement, state, width: weightOf(fibers), line, box: boxOf([line]) });
     } else {
       const { code, kind, state, enclosures } = feature.properties;
       const [lon = 0, lat = 0] = /** @type {number[]} */ (feature.geometry.coordinates);
@@ -94,10 +101,22 @@ export function projectBase(answer) {
   const drawn = answer.features.map((feature) => {
     const { type, coordinates } = feature.geometry;
     const { kind, name, rank } = feature.properties;
-    return { kind, name, rank: rank ?? 3, area: type.endsWith("Polygon"), rings: linesOf(type, coordinates).map(worldLine) };
+    const rings = linesOf(type, coordinates).map(worldLine);
+    const box = boxOf(rings);
+    return { kind, name: name || null, rank: rank ?? rankOf(box), area: type.endsWith("Polygon"), rings, box };
   });
   const order = (/** @type {DrawnBase} */ each) => (each.area ? 0 : (each.rings[0]?.length ?? 0) > 2 ? 1 : 2);
   return drawn.sort((one, other) => order(one) - order(other) || other.rank - one.rank);
+}
+
+/**
+ * The rank of what has none: the farther it reaches, the more it is needed from afar; a place is in the middle.
+ * @param {import("./frame.js").Box} box
+ * @returns {number}
+ */
+function rankOf(box) {
+  const reach = Math.max(box.east - box.west, box.south - box.north);
+  return reach === 0 ? 3 : reach > FAR ? 2 : 4;
 }
 
 /**

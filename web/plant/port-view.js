@@ -17,11 +17,6 @@ export class PortView extends TracedView {
     return ask(pathTo("enclosures", this.code.split("/")[0] ?? ""), {}, signal);
   }
 
-  /** @param {Enclosure} it @returns {import("./record-view.js").Shown} @override */
-  shownOf(it) {
-    return { label: this.code, points: [[it.lon, it.lat]] };
-  }
-
   /** @param {Enclosure} it @override */
   draw(it) {
     const [, name, number] = this.code.split("/");
