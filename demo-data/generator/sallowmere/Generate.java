@@ -44,7 +44,10 @@ public final class Generate {
         Path folder = into.resolve("sallowmere");
         Plant plant = new Plant();
         Ring ring = Ring.build(plant);
-        Point road = plant.structureOf("MH-9").at().minus(plant.structureOf("MH-8").at()).unit();
+        Point road = plant.structureOf("MH-9")
+                .at()
+                .minus(plant.structureOf("MH-8").at())
+                .unit();
         Landscape land = Landscape.around(plant.structureOf("BR-1").at(), road, new Random(SEED + 1));
         List<District> districts = Districts.grow(plant, ring, land, SEED);
         Table sheets = records(folder, plant, ring, districts);
@@ -64,7 +67,8 @@ public final class Generate {
         TrunkGlass.fill(plant, ring, glass);
         List<TakeUp> takeUps = new ArrayList<>();
         for (District district : districts) {
-            TakeUp takeUp = TakeUp.draw(district, new Random(SEED + 100 + district.plan().cabinet()));
+            TakeUp takeUp = TakeUp.draw(
+                    district, new Random(SEED + 100 + district.plan().cabinet()));
             takeUps.add(takeUp);
             DistrictGlass.fill(district, takeUp, glass);
         }

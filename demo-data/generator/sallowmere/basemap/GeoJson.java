@@ -5,6 +5,7 @@ import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
@@ -29,9 +30,8 @@ final class GeoJson {
     }
 
     void shapes(String layer, String name, List<List<Point>> rings) {
-        String all = rings.stream()
-                .map(ring -> "[" + coordinates(wound(ring)) + "]")
-                .collect(Collectors.joining(","));
+        String all =
+                rings.stream().map(ring -> "[" + coordinates(wound(ring)) + "]").collect(Collectors.joining(","));
         feature(layer, name, "MultiPolygon", "[" + all + "]");
     }
 
@@ -43,13 +43,14 @@ final class GeoJson {
     private static List<Point> wound(List<Point> ring) {
         double area = 0;
         for (int i = 1; i < ring.size(); i++) {
-            area += ring.get(i - 1).x() * ring.get(i).y() - ring.get(i).x() * ring.get(i - 1).y();
+            area += ring.get(i - 1).x() * ring.get(i).y()
+                    - ring.get(i).x() * ring.get(i - 1).y();
         }
         if (area >= 0) {
             return ring;
         }
         List<Point> turned = new ArrayList<>(ring);
-        java.util.Collections.reverse(turned);
+        Collections.reverse(turned);
         return turned;
     }
 

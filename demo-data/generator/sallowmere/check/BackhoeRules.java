@@ -57,8 +57,7 @@ final class BackhoeRules {
         double metres = 0;
         for (Map<String, String> row : folder.rows("cable_runs.csv")) {
             boolean first = row.get("cable").equals("FDR-S-1");
-            boolean second = row.get("cable").equals("FDR-S-2")
-                    && Integer.parseInt(row.get("seq")) <= seq("HH-S044");
+            boolean second = row.get("cable").equals("FDR-S-2") && Integer.parseInt(row.get("seq")) <= seq("HH-S044");
             metres += first || second ? SpanLengths.number(row, "slack_m") : 0;
         }
         near("coils of 100 ft before the cut", metres / (100 * FOOT), 12, 0.001);
@@ -74,7 +73,8 @@ final class BackhoeRules {
 
     private Map<String, String> row(String structure) {
         return folder.rows("cable_runs.csv").stream()
-                .filter(row -> row.get("cable").equals("FDR-S-2") && row.get("structure").equals(structure))
+                .filter(row -> row.get("cable").equals("FDR-S-2")
+                        && row.get("structure").equals(structure))
                 .findFirst()
                 .orElseThrow();
     }

@@ -113,7 +113,8 @@ final class Glass {
         String[] parts = end.split("\\|");
         if (parts[2].equals("back") || parts[2].equals("ahead")) {
             int seq = seqs.get(parts[0] + "|" + parts[1]);
-            cuts.computeIfAbsent(parts[1] + ":" + parts[3], key -> new TreeSet<>()).add(seq);
+            cuts.computeIfAbsent(parts[1] + ":" + parts[3], key -> new TreeSet<>())
+                    .add(seq);
         }
     }
 

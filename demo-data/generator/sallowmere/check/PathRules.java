@@ -59,8 +59,13 @@ final class PathRules {
             }
         }
         System.out.printf(
-                Locale.ROOT, "worst subscriber: %s, %.0f m, %.3f dB at 1310, %d splices, %d connectors%n", worst.start,
-                worst.glass, worst.loss(0.35), worst.splices, worst.connectors);
+                Locale.ROOT,
+                "worst subscriber: %s, %.0f m, %.3f dB at 1310, %d splices, %d connectors%n",
+                worst.start,
+                worst.glass,
+                worst.loss(0.35),
+                worst.splices,
+                worst.connectors);
         boolean known = Math.round(worst.glass / 100) == 167 && Math.round(worst.loss(0.35) * 10) == 258;
         if (!known || worst.glass < longest) {
             wrong.add("the worst subscriber is not 16.7 km and 25.8 dB, or another is farther: " + longest + " m");

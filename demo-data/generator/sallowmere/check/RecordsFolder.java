@@ -28,7 +28,9 @@ public final class RecordsFolder {
     /** The rows of a file by the value of a column. */
     public Map<String, List<Map<String, String>>> rowsBy(String file, String column) {
         Map<String, List<Map<String, String>>> by = new LinkedHashMap<>();
-        rows(file).forEach(row -> by.computeIfAbsent(row.get(column), key -> new ArrayList<>()).add(row));
+        rows(file)
+                .forEach(row -> by.computeIfAbsent(row.get(column), key -> new ArrayList<>())
+                        .add(row));
         return by;
     }
 

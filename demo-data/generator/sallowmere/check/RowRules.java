@@ -34,8 +34,13 @@ final class RowRules {
         rules.refer("fiber_flags.csv", "cable", cables);
         rules.refer("counts.csv", "cable", cables);
         rules.refer("enclosures.csv", "structure", structures);
-        for (String file : List.of("enclosure_cables.csv", "splitters.csv", "splices.csv", "panels.csv",
-                "terminations.csv", "end_states.csv")) {
+        for (String file : List.of(
+                "enclosure_cables.csv",
+                "splitters.csv",
+                "splices.csv",
+                "panels.csv",
+                "terminations.csv",
+                "end_states.csv")) {
             rules.refer(file, "enclosure", enclosures);
         }
         rules.refer("enclosure_cables.csv", "cable", cables);

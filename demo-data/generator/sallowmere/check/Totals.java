@@ -129,7 +129,9 @@ final class Totals {
         int dead = 0;
         int lapsed = 0;
         for (Map<String, String> row : folder.rows("fiber_flags.csv")) {
-            dead += row.get("flag").equals("dead") ? Glass.numbers(row.get("fibers")).size() : 0;
+            dead += row.get("flag").equals("dead")
+                    ? Glass.numbers(row.get("fibers")).size()
+                    : 0;
             boolean over = !row.get("until").isEmpty() && row.get("until").compareTo("2026-12-01") < 0;
             lapsed += row.get("flag").equals("reserved") && over ? 1 : 0;
         }

@@ -55,7 +55,8 @@ public final class DistrictGlass {
     public static int portOf(District district, int splitter, int output) {
         int start = (splitter - 1) * 32;
         if (district.plan().cabinet() == CROSSED_CABINET && splitter == 2) {
-            return start + (output >= 9 && output <= 16 ? output + 8 : output >= 17 && output <= 24 ? output - 8 : output);
+            return start
+                    + (output >= 9 && output <= 16 ? output + 8 : output >= 17 && output <= 24 ? output - 8 : output);
         }
         return start + output;
     }
@@ -75,8 +76,7 @@ public final class DistrictGlass {
         glass.pass(closure, feeder, feeder.seqAt(district.tap()));
         glass.pass(closure, lateral, 0);
         feeder.readAt(feeder.seqAt(district.tap()));
-        glass.splice(
-                closure, 1, Ends.back(feeder, first, first + 11), Ends.ahead(lateral, 1, 12), lateral.installed());
+        glass.splice(closure, 1, Ends.back(feeder, first, first + 11), Ends.ahead(lateral, 1, 12), lateral.installed());
         glass.state(closure, Ends.ahead(feeder, first, first + 11), "capped");
         glass.state(closure, Ends.ahead(lateral, 13, 24), "capped");
     }

@@ -14,13 +14,33 @@ public final class Glasswork {
     private final Table passes =
             new Table("enclosure_cables.csv", "enclosure", "cable", "seq", "opened", "tubes_opened");
     private final Table splitters = new Table("splitters.csv", "enclosure", "splitter", "inputs", "outputs", "loss_db");
-    private final Table splices = new Table("splices.csv", "enclosure", "tray", "a", "b", "method", "loss_db", "trust",
-            "verified_on", "spliced_on", "spliced_by", "temporary_until", "job");
+    private final Table splices = new Table(
+            "splices.csv",
+            "enclosure",
+            "tray",
+            "a",
+            "b",
+            "method",
+            "loss_db",
+            "trust",
+            "verified_on",
+            "spliced_on",
+            "spliced_by",
+            "temporary_until",
+            "job");
     private final Table panels = new Table("panels.csv", "enclosure", "panel", "ports", "connector");
-    private final Table terminations = new Table("terminations.csv", "enclosure", "panel", "ports", "end", "method",
-            "loss_db", "trust", "verified_on", "job");
-    private final Table endStates =
-            new Table("end_states.csv", "enclosure", "end", "state", "trust", "verified_on");
+    private final Table terminations = new Table(
+            "terminations.csv",
+            "enclosure",
+            "panel",
+            "ports",
+            "end",
+            "method",
+            "loss_db",
+            "trust",
+            "verified_on",
+            "job");
+    private final Table endStates = new Table("end_states.csv", "enclosure", "end", "state", "trust", "verified_on");
     private final Table jumpers = new Table("jumpers.csv", "a", "b", "length_m");
     private final TrustDealer dealer;
     private final Random random;
@@ -97,8 +117,7 @@ public final class Glasswork {
 
     private void pigtails(String enclosure, String panel, int firstPort, Ends ends, Trust trust) {
         String ports = Figures.range(firstPort, firstPort + ends.count() - 1);
-        terminations.add(
-                enclosure, panel, ports, ends.text(), "pigtail", "", trust.word(), verifiedOn(trust), "");
+        terminations.add(enclosure, panel, ports, ends.text(), "pigtail", "", trust.word(), verifiedOn(trust), "");
     }
 
     /** Brings a splitter's own leads to the rears of ports. */

@@ -13,8 +13,7 @@ import sallowmere.town.TerminalSite;
  * @param splitter number of the splitter
  * @param output the splitter's output
  */
-public record Subscription(
-        District district, int number, TerminalSite terminal, int port, int splitter, int output) {
+public record Subscription(District district, int number, TerminalSite terminal, int port, int splitter, int output) {
 
     /** The port at the headend. */
     public String headendPort() {

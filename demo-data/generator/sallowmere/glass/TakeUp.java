@@ -33,8 +33,8 @@ public final class TakeUp {
         for (int[] drop : drops) {
             int[] output = outputs.get(shuffled.indexOf(drop));
             TerminalSite terminal = district.terminals().get(drop[0]);
-            subscriptions.add(new Subscription(
-                    district, subscriptions.size() + 1, terminal, drop[1], output[0], output[1]));
+            subscriptions.add(
+                    new Subscription(district, subscriptions.size() + 1, terminal, drop[1], output[0], output[1]));
         }
         return new TakeUp(subscriptions);
     }

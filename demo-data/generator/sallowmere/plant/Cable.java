@@ -90,7 +90,8 @@ public final class Cable {
     public int seqNear(double route) {
         int best = 0;
         for (int seq = 0; seq < rows.size(); seq++) {
-            if (Math.abs(rows.get(seq).route() - route) < Math.abs(rows.get(best).route() - route)) {
+            if (Math.abs(rows.get(seq).route() - route)
+                    < Math.abs(rows.get(best).route() - route)) {
                 best = seq;
             }
         }

@@ -41,19 +41,23 @@ public final class PlantTables {
     public static List<Table> of(Plant plant, String mixed, Random random) {
         PlantTables tables = new PlantTables(plant, random);
         return List.of(
-                tables.structures(),
-                tables.spans(),
-                types(),
-                tables.cables(),
-                tables.runs(),
-                tables.marks(mixed));
+                tables.structures(), tables.spans(), types(), tables.cables(), tables.runs(), tables.marks(mixed));
     }
 
     private Table structures() {
         Table table = new Table(
-                "structures.csv", "structure", "kind", "lon", "lat", "accuracy_m", "address", "state", "shared_risk",
+                "structures.csv",
+                "structure",
+                "kind",
+                "lon",
+                "lat",
+                "accuracy_m",
+                "address",
+                "state",
+                "shared_risk",
                 "note");
-        long poles = plant.structures().stream().filter(s -> s.kind().equals("pole")).count();
+        long poles =
+                plant.structures().stream().filter(s -> s.kind().equals("pole")).count();
         int seen = 0;
         for (Structure structure : plant.structures()) {
             String note = structure.note();
@@ -82,8 +86,15 @@ public final class PlantTables {
                 "spans.csv", "span", "from", "to", "placement", "length_m", "line", "state", "shared_risk", "note");
         for (Span span : plant.spans()) {
             table.add(
-                    span.code(), span.from().code(), span.to().code(), span.placement(), "", line(span), "",
-                    span.risk(), "");
+                    span.code(),
+                    span.from().code(),
+                    span.to().code(),
+                    span.placement(),
+                    "",
+                    line(span),
+                    "",
+                    span.risk(),
+                    "");
         }
         return table;
     }
@@ -102,27 +113,55 @@ public final class PlantTables {
 
     private static Table types() {
         Table table = new Table(
-                "cable_types.csv", "cable_type", "fibers", "fibers_per_tube", "fiber_type", "overlength_pct", "ribbon",
-                "fibers_per_ribbon", "colors");
+                "cable_types.csv",
+                "cable_type",
+                "fibers",
+                "fibers_per_tube",
+                "fiber_type",
+                "overlength_pct",
+                "ribbon",
+                "fibers_per_ribbon",
+                "colors");
         for (CableType type : CableType.values()) {
             table.add(
-                    type.code(), type.fibers(), 12, "G.652.D", Figures.decimal(type.overlength(), 2),
-                    type.ribbon() ? "yes" : "no", type.ribbon() ? "12" : "", "TIA-598");
+                    type.code(),
+                    type.fibers(),
+                    12,
+                    "G.652.D",
+                    Figures.decimal(type.overlength(), 2),
+                    type.ribbon() ? "yes" : "no",
+                    type.ribbon() ? "12" : "",
+                    "TIA-598");
         }
         return table;
     }
 
     private Table cables() {
         Table table = new Table(
-                "cables.csv", "cable", "cable_type", "part_of", "marks_ink", "overlength_pct", "reel", "installed_on",
-                "state", "note");
+                "cables.csv",
+                "cable",
+                "cable_type",
+                "part_of",
+                "marks_ink",
+                "overlength_pct",
+                "reel",
+                "installed_on",
+                "state",
+                "note");
         int reel = 40_113;
         for (Cable cable : plant.cables()) {
             reel += 17;
             String own = cable.overlength() == null ? "" : Figures.decimal(cable.overlength(), 2);
             table.add(
-                    cable.code(), cable.type().code(), cable.partOf(), cable.marking().ink(), own, "R-" + reel,
-                    cable.installed(), "", cable.code().equals(REMARKED) ? "re-marked in yellow by its maker" : "");
+                    cable.code(),
+                    cable.type().code(),
+                    cable.partOf(),
+                    cable.marking().ink(),
+                    own,
+                    "R-" + reel,
+                    cable.installed(),
+                    "",
+                    cable.code().equals(REMARKED) ? "re-marked in yellow by its maker" : "");
         }
         return table;
     }

@@ -97,9 +97,10 @@ final class FeederSouth {
 
     private static Structure structure(String code, Point at) {
         return switch (code) {
-            case "BR-1" -> new Structure(code, "point", at, "Wendlecote Bridge", Ring.BRIDGE_RISK, "duct under the deck");
-            case "MH-8", "MH-9" -> new Structure(
-                    code, "manhole", at, "Wendlecote Bridge", Ring.BRIDGE_RISK, "bridge abutment");
+            case "BR-1" ->
+                new Structure(code, "point", at, "Wendlecote Bridge", Ring.BRIDGE_RISK, "duct under the deck");
+            case "MH-8", "MH-9" ->
+                new Structure(code, "manhole", at, "Wendlecote Bridge", Ring.BRIDGE_RISK, "bridge abutment");
             case "HUT-S" -> new Structure(code, "hut", at, "4 Ferry Road, Pinnock Ferry", "", "");
             default -> new Structure(code, code.startsWith("MH") ? "manhole" : "handhole", at, "", "", "");
         };

@@ -32,7 +32,12 @@ public final class Ring {
         Structure vault = plant.structure(new Structure(
                 "EV-1", "vault", ENTRANCE, "Sluice Street, Sallowmere", ENTRANCE_RISK, "both feeders enter here"));
         Structure spare = plant.structure(new Structure(
-                "EV-2", "vault", ENTRANCE.plus(new Point(-110, 90)), "Weighhouse Lane, Sallowmere", "", "vacant ducts"));
+                "EV-2",
+                "vault",
+                ENTRANCE.plus(new Point(-110, 90)),
+                "Weighhouse Lane, Sallowmere",
+                "",
+                "vacant ducts"));
         plant.span(headend, vault, "duct", List.of(), ENTRANCE_RISK);
         plant.span(headend, spare, "duct");
         Trunk south = FeederSouth.build(plant, headend, vault);

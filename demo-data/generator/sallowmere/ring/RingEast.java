@@ -127,7 +127,12 @@ final class RingEast {
     private List<Reel> reels() {
         return List.of(
                 new Reel(CableType.RING, null, "2013-04-16", new Marking("white", "m", 2, true), butt(5_900)),
-                new Reel(CableType.RING_RIBBON, null, "2013-05-07", new Marking("white", "m", 6_480, false), butt(11_700)),
+                new Reel(
+                        CableType.RING_RIBBON,
+                        null,
+                        "2013-05-07",
+                        new Marking("white", "m", 6_480, false),
+                        butt(11_700)),
                 new Reel(CableType.RING, 0.8, "2013-05-28", new Marking("white", "ft", 10_115, true), "HUT-S"));
     }
 

@@ -50,8 +50,8 @@ public final class Trunk {
 
     private static Cable begin(Plant plant, String name, int reel, Reel make, Structure start) {
         String code = name + "-" + (reel + 1);
-        return plant.cable(new Cable(
-                code, make.type(), name, make.overlength(), make.installed(), make.marking(), start, 0));
+        return plant.cable(
+                new Cable(code, make.type(), name, make.overlength(), make.installed(), make.marking(), start, 0));
     }
 
     /** Its name, of which its reels are part. */

@@ -46,11 +46,29 @@ public final class Circuits {
     private void protectedPair(String code, String service, String customer, int first) {
         String fibers = first + "-" + (first + 1);
         table.add(
-                code, service + "; federal restoration code", customer, 1, 1, "1550", "20", code,
-                "HE-1/FDR-S/" + fibers, "HUT-S/FDR-S/" + fibers, "working");
+                code,
+                service + "; federal restoration code",
+                customer,
+                1,
+                1,
+                "1550",
+                "20",
+                code,
+                "HE-1/FDR-S/" + fibers,
+                "HUT-S/FDR-S/" + fibers,
+                "working");
         table.add(
-                code + "P", service + ", protection", customer, 1, 1, "1550", "20", code,
-                "HE-1/FDR-N/" + fibers, "HUT-S/RNG-E/" + fibers, "working");
+                code + "P",
+                service + ", protection",
+                customer,
+                1,
+                1,
+                "1550",
+                "20",
+                code,
+                "HE-1/FDR-N/" + fibers,
+                "HUT-S/RNG-E/" + fibers,
+                "working");
     }
 
     private void government() {
@@ -90,16 +108,33 @@ public final class Circuits {
     private void point(
             String code, String service, String customer, int priority, String feeder, String fibers, String hut) {
         table.add(
-                code, service, customer, priority, 1, fibers.contains("-") ? "1310" : "1310 1550", "14", "",
-                "HE-1/" + feeder + "/" + fibers, hut + "/" + feeder + "/" + fibers, "working");
+                code,
+                service,
+                customer,
+                priority,
+                1,
+                fibers.contains("-") ? "1310" : "1310 1550",
+                "14",
+                "",
+                "HE-1/" + feeder + "/" + fibers,
+                hut + "/" + feeder + "/" + fibers,
+                "working");
     }
 
     private void lease() {
         for (int i = 0; i < 2; i++) {
             table.add(
-                    "LSE-0" + (i + 1), "dark lease", "Thornmere Rural Cooperative", 4, 1, "1550", "", "",
+                    "LSE-0" + (i + 1),
+                    "dark lease",
+                    "Thornmere Rural Cooperative",
+                    4,
+                    1,
+                    "1550",
+                    "",
+                    "",
                     "HE-1/FDR-S/" + (109 + 2 * i) + "-" + (110 + 2 * i),
-                    "HUT-S/FDR-S/" + (37 + 2 * i) + "-" + (38 + 2 * i), "working");
+                    "HUT-S/FDR-S/" + (37 + 2 * i) + "-" + (38 + 2 * i),
+                    "working");
         }
     }
 
@@ -109,9 +144,17 @@ public final class Circuits {
             String code = String.format("PON-%s-%03d", number, subscription.number());
             boolean voice = voice(subscription);
             table.add(
-                    code, voice ? "internet and voice" : "internet", "account " + number + "-"
-                            + (1000 + subscription.number() * 7 % 997), voice ? 4 : 5, 1, "1310 1490", "B+", "",
-                    subscription.headendPort(), subscription.dropPort(), "working");
+                    code,
+                    voice ? "internet and voice" : "internet",
+                    "account " + number + "-" + (1000 + subscription.number() * 7 % 997),
+                    voice ? 4 : 5,
+                    1,
+                    "1310 1490",
+                    "B+",
+                    "",
+                    subscription.headendPort(),
+                    subscription.dropPort(),
+                    "working");
         }
     }
 

@@ -8,8 +8,7 @@ public final class Markers {
 
     /** The flags: nine dead fibers, a lease, suspects, eleven lapsed reservations and three that still hold. */
     public static Table flags() {
-        Table flags = new Table(
-                "fiber_flags.csv", "cable", "fibers", "flag", "from", "to", "owner", "reason", "until");
+        Table flags = new Table("fiber_flags.csv", "cable", "fibers", "flag", "from", "to", "owner", "reason", "until");
         dead(flags);
         flags.add("FDR-S-1", "109-112", "leased", "", "", "Thornmere Rural Cooperative", "dark lease of 2019", "");
         flags.add("FDR-S-2", "109-112", "leased", "", "", "Thornmere Rural Cooperative", "dark lease of 2019", "");
@@ -76,8 +75,8 @@ public final class Markers {
 
     /** Losses measured one way or both; the last rows are the trace of a repair that nobody wrote down. */
     public static Table measurements() {
-        Table table = new Table(
-                "measurements.csv", "what", "wavelength_nm", "direction", "loss_db", "on", "by", "file");
+        Table table =
+                new Table("measurements.csv", "what", "wavelength_nm", "direction", "loss_db", "on", "by", "file");
         double[][] losses = {{0.06, 0.04}, {0.11, 0.03}, {0.05, 0.07}, {0.02, 0.08}};
         for (int i = 0; i < losses.length; i++) {
             String end = "FDR-S-2 ahead " + (i + 1) + " @ C-S03";

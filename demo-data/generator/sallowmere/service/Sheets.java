@@ -29,7 +29,8 @@ public final class Sheets {
         }
         for (int i = 0; i < DAYS.length; i++) {
             District district = districts.get(order.get(i));
-            TerminalSite terminal = district.terminals().get((i * 5 + 2) % district.terminals().size());
+            TerminalSite terminal =
+                    district.terminals().get((i * 5 + 2) % district.terminals().size());
             List<Integer> used = takeUps.get(order.get(i)).usedPorts(terminal);
             int first = used.get(used.size() - 1) + 1;
             int drops = Math.min(1 + random.nextInt(2), terminal.ports() - first + 1);

@@ -39,16 +39,15 @@ final class Backhoe {
     }
 
     private static void readings(Path folder, Network network) {
-        Table table = new Table(
-                "readings.csv", "port", "wavelength_nm", "reading_m", "what", "mark_ft", "past_hh_s044_ft");
+        Table table =
+                new Table("readings.csv", "port", "wavelength_nm", "reading_m", "what", "mark_ft", "past_hh_s044_ft");
         var dark = network.from("HE-1/FDR-S/72");
         double joint = dark.events().get("C-S03");
         table.add("HE-1/FDR-S/72", 1550, "6038", "known joint C-S03", "", "");
         table.add("HE-1/FDR-S/72", 1550, "8155", "known joint C-S04, seen before the cut", "", "");
         double sheath = (READING - joint - TRAY) / RATIO / FOOT;
         double mark = 24_220 - sheath;
-        table.add(
-                "HE-1/FDR-S/72", 1550, "7412", "break", Figures.decimal(mark, 1), Figures.decimal(19_920 - mark, 1));
+        table.add("HE-1/FDR-S/72", 1550, "7412", "break", Figures.decimal(mark, 1), Figures.decimal(19_920 - mark, 1));
         double second = mark - SECOND_BREAK_FEET;
         double whole = network.from("HUT-S/FDR-S/12").events().get("C-S03");
         double back = whole - TRAY - (24_220 - second) * FOOT * RATIO;
@@ -71,7 +70,8 @@ final class Backhoe {
         if (suspects.size() != 25 || !suspects.contains(SPAN)) {
             throw new IllegalStateException("the suspects of story 1 are " + order);
         }
-        long subscribers = cut.stream().filter(circuit -> circuit.startsWith("PON")).count();
+        long subscribers =
+                cut.stream().filter(circuit -> circuit.startsWith("PON")).count();
         if (subscribers != 540) {
             throw new IllegalStateException(subscribers + " subscribers are down, not 540");
         }

@@ -45,7 +45,12 @@ final class WrongTube {
         Journey own = network.from(port);
         Journey crossed = network.from("HE-1/FDR-N/" + other);
         double reading = end(own.events(), "C-N02") + crossed.glass() - end(crossed.events(), "C-N02");
-        table.add(port, 1550, Figures.decimal(reading, 0), Figures.decimal(own.glass(), 1), own.end().replace('|', ' '));
+        table.add(
+                port,
+                1550,
+                Figures.decimal(reading, 0),
+                Figures.decimal(own.glass(), 1),
+                own.end().replace('|', ' '));
     }
 
     private static double end(Map<String, Double> events, String enclosure) {

@@ -1,6 +1,7 @@
 package sallowmere.town;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import sallowmere.geo.Curve;
 import sallowmere.geo.Point;
@@ -25,7 +26,7 @@ record Block(int number, int from, int to, Curve curve) {
             return curve;
         }
         List<Point> turned = new ArrayList<>(curve.points());
-        java.util.Collections.reverse(turned);
+        Collections.reverse(turned);
         return Curve.straight(turned);
     }
 }

@@ -99,12 +99,12 @@ public final class Districts {
         List<Cable> cables = new ArrayList<>();
         List<TerminalSite> terminals = new ArrayList<>();
         for (int i = 0; i < 3; i++) {
-            Cable cable = layer.lay("ABC".charAt(i), trails.get(i), town.lengths().get(i), random);
+            Cable cable =
+                    layer.lay("ABC".charAt(i), trails.get(i), town.lengths().get(i), random);
             cables.add(cable);
             terminals.addAll(Terminals.place(number, cable, terminals.size(), random));
         }
-        return new District(
-                town, trunk(town), tap(town), cabinet, centre, lateral, cables, terminals, names.list());
+        return new District(town, trunk(town), tap(town), cabinet, centre, lateral, cables, terminals, names.list());
     }
 
     /** Dry ground, off the feeders' roads, nearer to this town than to any other. */
@@ -164,7 +164,10 @@ public final class Districts {
                             aerial ? "pole" : "handhole",
                             way.at(way.length() * i / count));
             Span span = plant.span(last, next, aerial && i < count ? "aerial" : "duct");
-            cable.go(span, span.length() * (aerial ? 1.011 : 1.003) + (i == count ? 4 : 0.5), i == count ? Trunk.AERIAL_COIL : 0);
+            cable.go(
+                    span,
+                    span.length() * (aerial ? 1.011 : 1.003) + (i == count ? 4 : 0.5),
+                    i == count ? Trunk.AERIAL_COIL : 0);
             last = next;
         }
         cable.readAt(0);

@@ -41,9 +41,10 @@ public record Quarter(String town, Point centre, List<Street> streets) {
                     && ring.east().road().distance(place) > 45
                     && taken.stream().allMatch(street -> street.to(place) > OFF_OTHER_STREETS);
             Random random = new Random(seed + i);
-            StreetNetwork network = StreetNetwork.grow(
-                    centre, radii[i], radii[i] * 0.88, i, ground, List.of(centre), random);
-            quarters.add(new Quarter(towns[i], centre, Streets.name(network, random).list()));
+            StreetNetwork network =
+                    StreetNetwork.grow(centre, radii[i], radii[i] * 0.88, i, ground, List.of(centre), random);
+            quarters.add(
+                    new Quarter(towns[i], centre, Streets.name(network, random).list()));
         }
         return quarters;
     }

@@ -23,9 +23,15 @@ final class StreetNetwork {
 
     private StreetNetwork() {}
 
-    /** Grows a network within a lobed ellipse, on the ground that a test allows; the seeds are crossings in any case. */
-    static StreetNetwork grow(Point centre, double major, double minor, double turn, Predicate<Point> ground,
-            List<Point> seeds, Random random) {
+    /** Grows a network within a lobed ellipse, on the ground that a test allows; the seeds are crossings. */
+    static StreetNetwork grow(
+            Point centre,
+            double major,
+            double minor,
+            double turn,
+            Predicate<Point> ground,
+            List<Point> seeds,
+            Random random) {
         StreetNetwork network = new StreetNetwork();
         seeds.forEach(network::node);
         double lobes = 2 * Math.PI * random.nextDouble();
@@ -40,7 +46,8 @@ final class StreetNetwork {
             double sine = StrictMath.sin(turn);
             Point place = centre.plus(new Point(x * cosine - y * sine, x * sine + y * cosine));
             double angle = StrictMath.atan2(v, u);
-            double edge = 0.86 + 0.2 * StrictMath.sin(2 * angle + lobes) + 0.16 * StrictMath.sin(3 * angle + 2.2 * lobes);
+            double edge =
+                    0.86 + 0.2 * StrictMath.sin(2 * angle + lobes) + 0.16 * StrictMath.sin(3 * angle + 2.2 * lobes);
             if (out < edge && ground.test(place) && network.clear(place, apart)) {
                 network.node(place);
             }

@@ -55,11 +55,15 @@ final class Streets {
     }
 
     private Block ahead(Block block, int node) {
-        Point heading = network.node(node).minus(network.node(block.other(node))).unit();
+        Point heading =
+                network.node(node).minus(network.node(block.other(node))).unit();
         Block best = null;
         double straightest = STRAIGHT;
         for (Block other : network.meetingAt(node)) {
-            double along = network.node(other.other(node)).minus(network.node(node)).unit().dot(heading);
+            double along = network.node(other.other(node))
+                    .minus(network.node(node))
+                    .unit()
+                    .dot(heading);
             if (nameOf[other.number()] == null && along > straightest) {
                 best = other;
                 straightest = along;

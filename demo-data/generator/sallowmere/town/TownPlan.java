@@ -15,7 +15,14 @@ import java.util.List;
  * @param lengths metres of route of the three distribution cables
  */
 public record TownPlan(
-        int cabinet, String town, String trunk, String tap, double kilometres, int side, int turn, List<Integer> lengths) {
+        int cabinet,
+        String town,
+        String trunk,
+        String tap,
+        double kilometres,
+        int side,
+        int turn,
+        List<Integer> lengths) {
 
     /** The twelve cabinets; lengths come to about 114 km. */
     public static List<TownPlan> all() {

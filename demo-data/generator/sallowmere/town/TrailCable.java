@@ -50,7 +50,8 @@ final class TrailCable {
                 aerial ? CableType.DISTRIBUTION : CableType.DISTRIBUTION_SMALL,
                 "",
                 null,
-                Figures.code("201", 4 + random.nextInt(5), 1) + Figures.code("-", 4 + random.nextInt(6), 2)
+                Figures.code("201", 4 + random.nextInt(5), 1)
+                        + Figures.code("-", 4 + random.nextInt(6), 2)
                         + Figures.code("-", 1 + random.nextInt(28), 2),
                 numbered,
                 cabinet,

@@ -1,0 +1,2 @@
+/** The invented map as GeoJSON. */
+package sallowmere.basemap;

@@ -1,0 +1,2 @@
+/** Tables and numbers as a records folder writes them. */
+package sallowmere.folder;

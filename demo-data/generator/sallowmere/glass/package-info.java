@@ -1,0 +1,2 @@
+/** Enclosures and everything joined in them, and who took service. */
+package sallowmere.glass;

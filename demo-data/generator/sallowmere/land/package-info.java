@@ -1,0 +1,2 @@
+/** River, lake and the edges of the map. */
+package sallowmere.land;

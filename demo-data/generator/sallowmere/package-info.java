@@ -1,0 +1,2 @@
+/** The demo, from nothing to files: geometry, plant, glass, service, map, stories, and a check. */
+package sallowmere;

@@ -1,0 +1,2 @@
+/** Structures, spans and cables as laid, and the tables that tell of them. */
+package sallowmere.plant;

@@ -1,0 +1,2 @@
+/** What arrives from outside in the demo's stories. */
+package sallowmere.story;
