@@ -1,0 +1,42 @@
+package spanwright.exchange;
+
+/** How texts are compared with slices and shown in a fault. */
+final class Texts {
+
+    private static final int MOST_SHOWN = 60;
+
+    private Texts() {}
+
+    /** A text short enough for a sentence. */
+    static String shown(String text) {
+        String line = text.replace('\n', ' ').replace('\r', ' ');
+        return line.length() <= MOST_SHOWN ? line : line.substring(0, MOST_SHOWN) + "...";
+    }
+
+    /** Whether a text equals a slice. */
+    static boolean same(String text, char[] chars, int from, int to) {
+        if (text.length() != to - from) {
+            return false;
+        }
+        for (int index = 0; index < text.length(); index++) {
+            if (text.charAt(index) != chars[from + index]) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    /** Whether a code may not hold a character. */
+    static boolean forbiddenInCode(char c) {
+        return c == ',' || c == '/' || c == ':' || c <= ' ' || c == 127 || (c >= 128 && spaceBeyondAscii(c));
+    }
+
+    private static boolean spaceBeyondAscii(char c) {
+        return Character.isWhitespace(c) || Character.isSpaceChar(c) || Character.isISOControl(c) || c == '\uFEFF';
+    }
+
+    /** A character in words. */
+    static String name(char c) {
+        return c == ' ' ? "a space" : forbiddenInCode(c) && c > ' ' && c < 127 ? "'" + c + "'" : "white space";
+    }
+}
