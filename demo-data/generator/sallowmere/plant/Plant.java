@@ -12,9 +12,9 @@ public final class Plant {
     private final Map<String, Span> spans = new LinkedHashMap<>();
     private final Map<String, Cable> cables = new LinkedHashMap<>();
 
-    /** Sets up a structure without address, risk or note. */
-    public Structure structure(String code, String kind, Point at) {
-        return structure(new Structure(code, kind, at, "", "", ""));
+    /** Sets up a structure on a road, without risk or note. */
+    public Structure structure(String code, String kind, Point at, String road) {
+        return structure(new Structure(code, kind, at, road, "", ""));
     }
 
     /** Sets up a structure; its code must be new. */

@@ -50,13 +50,13 @@ final class FeederNorth {
 
     private static Structure structure(int i, Point at) {
         if (i <= 4) {
-            return new Structure("MH-" + (i + 3), "manhole", at, "", "", "");
+            return new Structure("MH-" + (i + 3), "manhole", at, "Thessle Road", "", "");
         }
         if (i <= 4 + POLES) {
-            return new Structure(Figures.code("P-N", i - 4, 3), "pole", at, "", "", "");
+            return new Structure(Figures.code("P-N", i - 4, 3), "pole", at, "Thessle Road", "", "");
         }
         if (i <= 4 + POLES + HANDHOLES) {
-            return new Structure(Figures.code("HH-N", i - 4 - POLES, 3), "handhole", at, "", "", "");
+            return new Structure(Figures.code("HH-N", i - 4 - POLES, 3), "handhole", at, "Thessle Road", "", "");
         }
         return new Structure("HUT-N", "hut", at, "17 Sawpit Lane, Bracken Forks", "", "");
     }

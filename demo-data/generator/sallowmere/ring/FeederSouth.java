@@ -102,7 +102,7 @@ final class FeederSouth {
             case "MH-8", "MH-9" ->
                 new Structure(code, "manhole", at, "Wendlecote Bridge", Ring.BRIDGE_RISK, "bridge abutment");
             case "HUT-S" -> new Structure(code, "hut", at, "4 Ferry Road, Pinnock Ferry", "", "");
-            default -> new Structure(code, code.startsWith("MH") ? "manhole" : "handhole", at, "", "", "");
+            default -> new Structure(code, code.startsWith("MH") ? "manhole" : "handhole", at, "Valley Road", "", "");
         };
     }
 

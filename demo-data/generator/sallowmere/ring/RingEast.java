@@ -95,7 +95,7 @@ final class RingEast {
         for (int i = 1; i <= count; i++) {
             poles++;
             Point at = road.at(arc + length * i / count);
-            Structure pole = plant.structure(Figures.code("P-E", poles, 3), "pole", at);
+            Structure pole = plant.structure(Figures.code("P-E", poles, 3), "pole", at, "Eastern Drove");
             reach(pole, "aerial", poles % 9 == 0 ? Trunk.AERIAL_COIL : 0);
         }
         return arc + length;
@@ -111,7 +111,7 @@ final class RingEast {
             }
             handholes++;
             Point at = road.at(arc + length * i / count);
-            Structure handhole = plant.structure(Figures.code("HH-E", handholes, 3), "handhole", at);
+            Structure handhole = plant.structure(Figures.code("HH-E", handholes, 3), "handhole", at, "Eastern Drove");
             reach(handhole, placement, handholes % 4 == 0 ? Trunk.COIL : 0);
         }
         return arc + length;

@@ -162,7 +162,8 @@ public final class Districts {
                     : plant.structure(
                             (aerial ? "P-L" : "HH-L") + number + "-" + i,
                             aerial ? "pole" : "handhole",
-                            way.at(way.length() * i / count));
+                            way.at(way.length() * i / count),
+                            town.town() + " Lane");
             Span span = plant.span(last, next, aerial && i < count ? "aerial" : "duct");
             cable.go(
                     span,
