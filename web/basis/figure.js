@@ -1,31 +1,43 @@
 import { html } from "lit";
-import { length, loss, count, units } from "../quantity/index.js";
+import { count, decimal, length, loss, units } from "../quantity/index.js";
 import { basisLook } from "./basis.js";
 
 /** @typedef {import("./basis.js").Basis} Basis */
+/** @typedef {import("../quantity/format.js").Reading} Reading */
+
+/** @typedef {"length" | "loss" | "count" | "percent" | "dispersion" | "delay"} Kind metres, dB, how many, per cent, ps/nm, ps */
+
+/** How each kind reads. @type {Readonly<Record<Kind, (value: number) => Reading>>} */
+const READINGS = Object.freeze({
+  length: (value) => length(value, units.unit),
+  loss,
+  count: (value) => count(value),
+  percent: (value) => ({ number: decimal(value, 2), unit: "%" }),
+  dispersion: (value) => ({ number: decimal(value, 1), unit: "ps/nm" }),
+  delay: (value) => ({ number: decimal(value, 2), unit: "ps" }),
+});
 
 /**
  * @typedef {object} Figure a number on the screen, and how it is known
  * @property {string} what the number is, e.g. `Sheath of FDR-S-1`
- * @property {"length" | "loss" | "count"} kind
- * @property {number} value metres, dB, or how many
+ * @property {Kind} kind
+ * @property {number} value in the kind's unit
  * @property {Basis} basis
  */
 
 /**
  * How a figure reads at present.
  * @param {Figure} figure
- * @returns {import("../quantity/format.js").Reading}
+ * @returns {Reading}
  */
 export function readingOf(figure) {
-  if (figure.kind === "length") return length(figure.value, units.unit);
-  return figure.kind === "loss" ? loss(figure.value) : count(figure.value);
+  return READINGS[figure.kind](figure.value);
 }
 
 /**
  * A number that opens its basis by click or key.
  * @param {string} what
- * @param {"length" | "loss" | "count"} kind
+ * @param {Kind} kind
  * @param {number | null | undefined} value null: not known
  * @param {Basis} basis
  * @returns {unknown}
@@ -41,11 +53,12 @@ export function figure(what, kind, value, basis) {
 }
 
 /**
- * @param {Event} event
+ * Opens the basis of a number that was clicked or pressed.
+ * @param {Event} event on the number
  * @param {Figure} shown
  */
-function openBasis(event, shown) {
+export function openBasis(event, shown) {
   event.stopPropagation();
-  const button = /** @type {HTMLElement} */ (event.currentTarget);
-  button.dispatchEvent(new CustomEvent("sw-basis", { bubbles: true, composed: true, detail: { figure: shown, from: button } }));
+  const from = /** @type {Element} */ (event.currentTarget);
+  from.dispatchEvent(new CustomEvent("sw-basis", { bubbles: true, composed: true, detail: { figure: shown, from } }));
 }

@@ -17,7 +17,7 @@ export class BasisNote extends LitElement {
     this.figure = null;
     /** @type {string} time zone of the records */
     this.zone = "UTC";
-    /** @type {HTMLElement | null} where the focus goes back to */
+    /** @type {Element | null} where the focus goes back to */
     this.from = null;
     new UnitController(this);
     this.addEventListener("keydown", (event) => {
@@ -33,7 +33,7 @@ export class BasisNote extends LitElement {
   /**
    * Says how a number is known.
    * @param {Figure} figure
-   * @param {HTMLElement} from the number's own button
+   * @param {Element} from the number's own button
    */
   async open(figure, from) {
     this.figure = figure;
@@ -46,7 +46,7 @@ export class BasisNote extends LitElement {
   close(event) {
     event.stopPropagation();
     this.figure = null;
-    this.from?.focus();
+    if (this.from instanceof HTMLElement) this.from.focus();
   }
 
   /** @override */

@@ -75,6 +75,18 @@ function newStop(element, at, stops) {
 }
 
 /**
+ * How the loss at a stop is known: measured where all of it is, a planning value where all of it is, else a sum of both.
+ * @param {Stop} stop
+ * @returns {{ how: string, source: string }}
+ */
+export function stopBasis(stop) {
+  const lossy = stop.elements.filter((element) => element.kind !== "through");
+  const ways = new Set(lossy.map((element) => element.basis));
+  const how = ways.size === 1 ? ([...ways][0] ?? "sum") : "sum";
+  return { how, source: lossy.map((element) => `${element.kind}: ${element.source}`).join("; ") };
+}
+
+/**
  * The element that holds a place.
  * @param {Path} path
  * @param {number} glass metres from the path's start

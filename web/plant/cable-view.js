@@ -2,7 +2,7 @@ import { html, nothing } from "lit";
 import { ask, pathTo } from "../server/index.js";
 import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
-import { dayInWords, decimal } from "../quantity/index.js";
+import { dayInWords } from "../quantity/index.js";
 import { RecordView } from "./record-view.js";
 import { fact, heading, marksRead } from "./parts.js";
 import { tubeChart, tubeLegend } from "./tube-chart.js";
@@ -71,7 +71,7 @@ export class CableView extends RecordView {
       ${fact("Sheath", figure(`Sheath of ${it.code}`, "length", it.sheath_m, basis))}
       ${fact("Route", figure(`Route of ${it.code}`, "length", it.route_m, { how: "sum", source: "Spans along its run" }))}
       ${fact("In coils", figure(`Sheath of ${it.code} in coils`, "length", it.slack_m, { how: "sum", source: "Coils along its run" }))}
-      ${fact("Excess length", html`<span class="number">${decimal(it.overlength_pct, 2)}</span> <span class="unit">%</span> <span class="lighter">${it.overlength_source}</span>`)}
+      ${fact("Excess length", figure(`Excess length of ${it.code}'s glass over its sheath`, "percent", it.overlength_pct, { how: "recorded", source: it.overlength_source, changed: it.changed }))}
       ${fact("Reel", it.reel)}${fact("Laid", it.installed_on === null ? null : dayInWords(it.installed_on))}
       ${fact("Marks", `${it.marks_ink} set governs`)}${fact("Note", it.note)}
       ${fact("Other counts", it.counts.length > 0 ? it.counts.map((each) => `${each.fibers} is ${each.name} ${each.numbers}`).join("; ") : null)}

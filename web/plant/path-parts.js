@@ -1,6 +1,5 @@
 import { html, nothing } from "lit";
 import { figure } from "../basis/index.js";
-import { decimal } from "../quantity/index.js";
 import { fact } from "./parts.js";
 import { hopList } from "./hops.js";
 
@@ -62,7 +61,7 @@ export function pathParts(path) {
  * @returns {unknown}
  */
 function several(number, thing) {
-  return html`<span class="number">${number}</span> ${thing}${number === 1 ? "" : "s"}`;
+  return html`${figure(`How many ${thing}s the path has`, "count", number, { how: "counted", source: "Elements of the path" })} ${thing}${number === 1 ? "" : "s"}`;
 }
 
 /**
@@ -75,7 +74,7 @@ function budgetLine(path) {
   const source = budget.source ?? (budget.class ? `Class ${budget.class}` : "The circuit's own budget");
   const left = figure("Left of the budget", "loss", budget.left_db, sum(`${source}: ${budget.max_db} dB less ${budget.margin_db} dB margin, less the expected loss`));
   const verdict = budget.overload ? "too little loss for the receiver" : budget.passes ? "left" : "over";
-  return html`${left} ${verdict} <span class="lighter">of</span> <span class="number">${decimal(budget.max_db, 1)}</span> <span class="unit">dB</span>${budget.class ? ` (${budget.class})` : ""}${budget.passes && !budget.passes_at_limit ? html`, <span class="lighter">over at the limits</span>` : nothing}`;
+  return html`${left} ${verdict} <span class="lighter">of</span> ${figure("Budget of the path", "loss", budget.max_db, { how: "recorded", source })}${budget.class ? ` (${budget.class})` : ""}${budget.passes && !budget.passes_at_limit ? html`, <span class="lighter">over at the limits</span>` : nothing}`;
 }
 
 /**
@@ -85,5 +84,6 @@ function budgetLine(path) {
 function dispersionLine(path) {
   const { dispersion_ps_per_nm: chromatic, pmd_ps: pmd } = path.totals;
   if (chromatic === null) return html`<span class="not-known">not known</span>`;
-  return html`<span class="number">${decimal(chromatic, 1)}</span> <span class="unit">ps/nm</span>${pmd === null ? nothing : html`, PMD <span class="number">${decimal(pmd, 2)}</span> <span class="unit">ps</span>`} <span class="lighter">from the fiber type</span>`;
+  const basis = { how: "type", source: "The fiber types' zero-dispersion wavelength, slope and PMD coefficient" };
+  return html`${figure(`Chromatic dispersion at ${path.wavelength_nm} nm`, "dispersion", chromatic, basis)}${pmd === null ? nothing : html`, <span class="lighter">PMD</span> ${figure("Polarization mode dispersion", "delay", pmd, basis)}`}`;
 }

@@ -1,6 +1,7 @@
 import { LitElement, html, nothing } from "lit";
+import { figure } from "../basis/index.js";
 import { hrefTo, link } from "../address/index.js";
-import { decimal, timeInWords } from "../quantity/index.js";
+import { timeInWords } from "../quantity/index.js";
 
 /** @typedef {import("../server/contract.d.ts").Status} Status */
 
@@ -29,7 +30,7 @@ export class StartView extends LitElement {
     return html`<header class="heading"><p class="what">records of</p><h1>${status.owner ?? "an unnamed owner"}</h1></header>
       ${empty ? html`<p>These records are empty. Load a records folder with <code>load FOLDER --records FILE</code>.</p>` : this.begin()}
       <table class="counts"><caption>The records hold</caption><tbody>
-        ${Object.entries(counts).filter(([name]) => name !== "postings").map(([name, value]) => html`<tr><th scope="row">${name.replaceAll("_", " ")}</th><td class="right number">${decimal(value, 0)}</td></tr>`)}
+        ${Object.entries(counts).filter(([name]) => name !== "postings").map(([name, value]) => html`<tr><th scope="row">${name.replaceAll("_", " ")}</th><td class="right">${figure(name.replaceAll("_", " "), "count", value, { how: "counted" })}</td></tr>`)}
       </tbody></table>
       ${posting === null ? nothing : html`<p class="changed">Last posting: ${link("posting", String(posting.posting), `posting ${posting.posting}`)}, ${posting.by},
         ${timeInWords(posting.time, status.time_zone)}: ${posting.reason}. <a href=${hrefTo("postings")}>All postings</a></p>`}`;

@@ -2,7 +2,7 @@ import { html, nothing } from "lit";
 import { ask, pathTo } from "../server/index.js";
 import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
-import { wind } from "../quantity/index.js";
+import { decimal, wind } from "../quantity/index.js";
 import { RecordView } from "./record-view.js";
 import { fact, heading, listed, marksRead } from "./parts.js";
 
@@ -30,7 +30,7 @@ export class StructureView extends RecordView {
     return html`${heading(it.kind === "point" ? "marked place" : it.kind, it.code, it.state)}
       <dl class="facts">
         ${fact("Address", it.address)}
-        ${fact("Position", html`<span class="number">${it.lat.toFixed(6)}, ${it.lon.toFixed(6)}</span>`)}
+        ${fact("Position", html`<span class="number">${decimal(it.lat, 6)}, ${decimal(it.lon, 6)}</span>`)}
         ${fact("Within", figure(`Accuracy of ${it.code}'s position`, "length", it.accuracy_m, recorded))}
         ${fact("Shares", it.shared_risk.length > 0 ? it.shared_risk.join(", ") : null)}
         ${fact("Note", it.note)}

@@ -1,7 +1,8 @@
 import { nothing, svg } from "lit";
 import { CHIP_WIDTH, drawnChip } from "../color/index.js";
 import { decimal } from "../quantity/index.js";
-import { sectionsOf, stopsOf } from "../path/index.js";
+import { openBasis } from "../basis/index.js";
+import { sectionsOf, stopBasis, stopsOf } from "../path/index.js";
 import { withoutOverlap } from "./window.js";
 
 /** @typedef {import("./window.js").Window} Window */
@@ -102,8 +103,16 @@ function stopLabels(stops, window) {
     const width = Math.max(stop.at.length * LETTER, (lost.length + 3) * 5.6);
     return { item: { stop, lost }, middle: window.x(stop.glass), width, weight: stop.through ? 0 : 1 + stop.loss };
   });
-  return withoutOverlap(wanted, window.left - 24, window.right + 24).map(({ item, middle }) => svg`<g class=${`stop-label ${item.stop.through ? "through" : ""} ${sureness(item.stop)}`}>
+  return withoutOverlap(wanted, window.left - 24, window.right + 24).map(({ item, middle }) => svg`<g class=${`stop-label ${item.stop.through ? "through" : ""} ${sureness(item.stop)}`} @click=${(/** @type {Event} */ event) => opened(event, item.stop)}>
     <text x=${middle} y="13">${item.stop.at}</text>${item.lost === "" ? nothing : svg`<text class="stop-loss" x=${middle} y="26">${item.lost}<tspan> dB</tspan></text>`}</g>`);
+}
+
+/**
+ * @param {Event} event
+ * @param {Stop} stop
+ */
+function opened(event, stop) {
+  if (!stop.through) openBasis(event, { what: `Loss at ${stop.at}`, kind: "loss", value: stop.loss, basis: stopBasis(stop) });
 }
 
 /**

@@ -2,11 +2,14 @@ import { html, nothing } from "lit";
 import { figure } from "../basis/index.js";
 import { link } from "../address/index.js";
 import { inWords, length, loss, units } from "../quantity/index.js";
-import { elementAt, lossAt, placeAt } from "../path/index.js";
+import { elementAt, lossAt, placeAt, stopBasis, stopsOf } from "../path/index.js";
 
 /** @typedef {import("../server/contract.d.ts").Path} Path */
 /** @typedef {import("../path/track.js").Measure} Measure */
 /** @typedef {import("./curve-drawing.js").Curve} Curve */
+
+/** The pointer stands on a stop when no more glass than a tray holds parts them, metres. */
+const NEAR_STOP = 5;
 
 /**
  * Where a place lies between structures.
@@ -44,7 +47,20 @@ export function readout(curves, glass) {
     ${figure(`Sheath ${from}`, "length", place.sheath, { how, source })} <span class="lighter">sheath</span>
     ${figure(`Route ${from}`, "length", place.route, { how: "sum", source: "Spans walked" })} <span class="lighter">route</span>
     ${curves.map(({ path: each, curve }) => html`<span class="readout-loss">${figure(`Expected loss ${from} at ${each.wavelength_nm} nm`, "loss", lossAt(curve, glass), { how: "sum", source: "Expected values of all that lies between" })} <span class="lighter">${each.wavelength_nm}</span></span>`)}
-    <span class="readout-place">${figure(`Sheath past ${at.before}`, "length", at.beyond, { how, source })} <span class="lighter">past</span> ${link("structure", at.before)}${at.after === at.before ? nothing : html` <span class="lighter">toward</span> ${link("structure", at.after)}`}</span></span>`;
+    <span class="readout-place">${figure(`Sheath past ${at.before}`, "length", at.beyond, { how, source })} <span class="lighter">past</span> ${link("structure", at.before)}${at.after === at.before ? nothing : html` <span class="lighter">toward</span> ${link("structure", at.after)}`}</span>${stopThere(path, glass)}</span>`;
+}
+
+/**
+ * What is lost at the stop that the pointer stands on.
+ * @param {Path} path
+ * @param {number} glass metres from the path's start
+ * @returns {unknown}
+ */
+function stopThere(path, glass) {
+  const stop = stopsOf(path).find((each) => !each.through && Math.abs(each.glass - glass) <= NEAR_STOP);
+  if (!stop) return nothing;
+  const view = stop.elements.every((element) => element.kind === "jumper") ? "structure" : "enclosure";
+  return html`<span class="readout-place">${figure(`Loss at ${stop.at}`, "loss", stop.loss, stopBasis(stop))} <span class="lighter">at</span> ${link(view, stop.at)}</span>`;
 }
 
 /**
