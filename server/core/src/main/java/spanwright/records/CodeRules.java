@@ -1,6 +1,5 @@
 package spanwright.records;
 
-import java.util.List;
 import spanwright.journal.Recorded;
 
 /** Codes are unique within their kind; a panel's and a splitter's within their enclosure. */
@@ -8,7 +7,7 @@ final class CodeRules {
 
     private CodeRules() {}
 
-    static void ask(RecordsView view, Recorded record, List<Refusal> refusals) {
+    static void ask(RecordsView view, Recorded record, Refusals refusals) {
         String code = Codes.of(record);
         if (code == null) {
             return;
@@ -16,12 +15,11 @@ final class CodeRules {
         int holder = view.identity(record.kind(), code);
         if (holder != 0 && holder != record.id()) {
             String plain = code.substring(code.indexOf('/') + 1);
-            refusals.add(new Refusal(
+            refusals.add(
                     "code-twice",
-                    "'" + plain + "' is there already; a code is used once",
                     Names.codeColumn(record.kind()),
-                    record,
-                    view.record(record.kind(), holder)));
+                    "'" + plain + "' is there already; a code is used once",
+                    view.record(record.kind(), holder));
         }
     }
 }

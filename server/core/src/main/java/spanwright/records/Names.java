@@ -1,14 +1,19 @@
 package spanwright.records;
 
+import java.util.Locale;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import spanwright.journal.RecordKind;
+import spanwright.journal.Recorded;
+import spanwright.plant.Pass;
 import spanwright.plant.RunRow;
 import spanwright.plant.Span;
 
 /** How a refusal names records and columns: by the codes and words of the records folder. */
 final class Names {
+
+    private static final int MOST = 5;
 
     private Names() {}
 
@@ -31,6 +36,23 @@ final class Names {
         };
     }
 
+    /** A record in words, such as {@code structure HH-1}. */
+    static String of(RecordsView view, Recorded record) {
+        String code = Codes.of(record);
+        String what = record.kind().name().toLowerCase(Locale.ROOT).replace('_', ' ');
+        return switch (record.kind()) {
+            case RUN_ROW -> of(view, (RunRow) record);
+            case PASS -> "cable " + cable(view, ((Pass) record).cable()) + " in enclosure "
+                    + enclosure(view, ((Pass) record).enclosure());
+            case SPLITTER, PANEL -> what + " " + plain(code);
+            default -> code == null ? "the " + what : what + " " + code;
+        };
+    }
+
+    private static String plain(@Nullable String code) {
+        return code == null ? "" : code.substring(code.indexOf('/') + 1);
+    }
+
     /** {@code F-1 row 2}. */
     static String of(RecordsView view, RunRow row) {
         return cable(view, row.cable()) + " row " + row.seq();
@@ -50,15 +72,22 @@ final class Names {
 
     /** {@code S-1, S-2 and S-3}, the first few of many. */
     static String list(Stream<String> names) {
+        return list(names, " and ");
+    }
+
+    /** {@code 0, 2 or 5}, the first few of many. */
+    static String choice(Stream<String> names) {
+        return list(names, " or ");
+    }
+
+    private static String list(Stream<String> names, String last) {
         var all = names.limit(MOST + 1).collect(Collectors.toList());
         if (all.size() > MOST) {
             return String.join(", ", all.subList(0, MOST)) + " and more";
         }
-        int last = all.size() - 1;
-        return last < 1 ? String.join("", all) : String.join(", ", all.subList(0, last)) + " and " + all.get(last);
+        int end = all.size() - 1;
+        return end < 1 ? String.join("", all) : String.join(", ", all.subList(0, end)) + last + all.get(end);
     }
-
-    private static final int MOST = 5;
 
     /** {@code S-1 (P-1 to P-2)}. */
     static String of(RecordsView view, Span span) {

@@ -3,6 +3,7 @@ package spanwright.records;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import net.sf.geographiclib.Geodesic;
 import net.sf.geographiclib.GeodesicMask;
@@ -44,33 +45,23 @@ public final class SpanRules {
         return Geodesic.WGS84.Inverse(one.lat(), one.lon(), other.lat(), other.lon(), GeodesicMask.DISTANCE).s12;
     }
 
-    static void ask(RecordsView view, Span span, List<Refusal> refusals) {
+    static void ask(RecordsView view, Span span, Refusals refusals) {
         Line line = span.line();
         if (span.from() == span.to()) {
             if (span.measuredLength() == null) {
-                refusals.add(new Refusal(
-                        "span-without-length",
-                        "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
-                                + " and has no length; give its length_m, or another structure to end at",
-                        "length_m",
-                        span,
-                        null));
+                refusals.add("span-without-length", "length_m", "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
+                                + " and has no length; give its length_m, or another structure to end at");
             }
             if (line != null) {
-                refusals.add(new Refusal(
-                        "span-line-at-one-structure",
-                        "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
-                                + " and has a line; leave the line blank, it lies at the structure",
-                        "line",
-                        span,
-                        null));
+                refusals.add("span-line-at-one-structure", "line", "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
+                                + " and has a line; leave the line blank, it lies at the structure");
             }
         } else if (line != null) {
             askLine(view, span, line, refusals);
         }
     }
 
-    private static void askLine(RecordsView view, Span span, Line line, List<Refusal> refusals) {
+    private static void askLine(RecordsView view, Span span, Line line, Refusals refusals) {
         Position from = view.structures().get(span.from()).position();
         Position to = view.structures().get(span.to()).position();
         Position first = line.positions().get(0);
@@ -78,18 +69,13 @@ public final class SpanRules {
         if (!near(first, from) || !near(last, to)) {
             double off = Math.min(
                     Math.max(metres(first, from), metres(last, to)), Math.max(metres(first, to), metres(last, from)));
-            refusals.add(new Refusal(
-                    "span-line-elsewhere",
-                    String.format(
-                            java.util.Locale.ROOT,
+            refusals.add("span-line-elsewhere", "line", String.format(
+                            Locale.ROOT,
                             "the line of span %s ends %.1f m from its structure; it begins and ends within 1 m of %s and %s",
                             span.code(),
                             off,
                             Names.structure(view, span.from()),
-                            Names.structure(view, span.to())),
-                    "line",
-                    span,
-                    null));
+                            Names.structure(view, span.to())));
         }
     }
 }
