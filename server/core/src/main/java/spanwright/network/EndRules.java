@@ -32,12 +32,14 @@ final class EndRules {
     private final RecordsView records;
     private final NetworkEditor network;
     private final EndNames names;
+    private final UsedEnds used;
     private final Map<String, Map<Long, Integer>> plannedByJob = new HashMap<>();
 
     EndRules(RecordsView records, NetworkEditor network) {
         this.records = records;
         this.network = network;
         this.names = new EndNames(records);
+        this.used = new UsedEnds(records, this);
     }
 
     /** Why a change may not be applied; every broken rule at once, one refusal for each earlier record it clashes with. */
@@ -46,7 +48,26 @@ final class EndRules {
         if (after instanceof Joint joint) {
             return refuseJoint(joint);
         }
-        return after instanceof Circuit circuit ? refuseCircuit(circuit) : List.of();
+        return after instanceof Circuit circuit ? refuseCircuit(circuit) : used.refuse(change);
+    }
+
+    /** What is wrong with the ends of what the applied changes touched, seen as a whole. */
+    List<Refusal> finish() {
+        return used.finish();
+    }
+
+    /** The joint that uses an end, in the glass or planned within any job; 0 where none does. */
+    int userOf(Leg leg, long key) {
+        int joint = jointAt(leg, key);
+        for (String job : joint == 0 ? records.plannedJobs() : List.<String>of()) {
+            joint = Math.max(joint, plannedAt(job, key));
+        }
+        return joint;
+    }
+
+    /** Joints in the glass that name a leg out of the network. */
+    int[] looseJoints(Leg leg) {
+        return network.looseJoints(leg);
     }
 
     private List<Refusal> refuseJoint(Joint joint) {
@@ -165,6 +186,7 @@ final class EndRules {
 
     /** Notes a change that has been applied. */
     void applied(Change change) {
+        used.applied(change);
         if (change.before() instanceof Joint joint && joint.planned()) {
             Map<Long, Integer> ends = plannedOf(joint.plannedJob());
             for (int index = 0; index < joint.count(); index++) {

@@ -47,7 +47,11 @@ public final class SnapshotEditor {
 
     /** What is wrong with what the applied changes touched, seen as a whole; nothing where all is right. */
     public List<Refusal> finish() {
-        return entryRules.finish();
+        List<Refusal> refusals = new ArrayList<>(entryRules.finish());
+        if (refusals.isEmpty()) {
+            refusals.addAll(endRules.finish());
+        }
+        return refusals;
     }
 
     /** All changes applied or replayed, in order. */

@@ -35,7 +35,8 @@ final class CableRules {
             refusals.add(
                     "part-of-itself",
                     "part_of",
-                    "part_of '" + partOf + "' is the cable's own code; name the longer cable that this reel is part of");
+                    "part_of '" + partOf
+                            + "' is the cable's own code; name the longer cable that this reel is part of");
         } else if (partOf != null) {
             view.cables()
                     .find(partOf)
@@ -71,8 +72,10 @@ final class CableRules {
         Map<String, Integer> known = partsOf;
         if (known == null) {
             Map<String, Integer> found = new HashMap<>();
-            view.cables().list().filter(cable -> cable.partOf() != null).forEach(cable -> found.putIfAbsent(
-                    cable.partOf(), cable.id()));
+            view.cables()
+                    .list()
+                    .filter(cable -> cable.partOf() != null)
+                    .forEach(cable -> found.putIfAbsent(cable.partOf(), cable.id()));
             partsOf = found;
             known = found;
         }
@@ -118,9 +121,8 @@ final class CableRules {
         view.runRows()
                 .owned(Relation.CABLE_RUN_ROWS, row.cable())
                 .flatMap(one -> view.sheathMarks().owned(Relation.RUN_ROW_MARKS, one.id()))
-                .filter(other -> other.id() != mark.id()
-                        && other.ink().equals(mark.ink())
-                        && other.unit() != mark.unit())
+                .filter(other ->
+                        other.id() != mark.id() && other.ink().equals(mark.ink()) && other.unit() != mark.unit())
                 .findFirst()
                 .ifPresent(other -> refusals.add(
                         "two-units-in-one-ink",

@@ -142,9 +142,7 @@ public final class EntryRules {
 
     private void touchEnclosure(@Nullable Enclosure before, @Nullable Enclosure after) {
         if (before != null && after != null && before.structure() != after.structure()) {
-            view.passes()
-                    .owned(Relation.ENCLOSURE_PASSES, after.id())
-                    .forEach(pass -> touchedRows.add(pass.runRow()));
+            view.passes().owned(Relation.ENCLOSURE_PASSES, after.id()).forEach(pass -> touchedRows.add(pass.runRow()));
         }
     }
 
@@ -160,7 +158,11 @@ public final class EntryRules {
         touchedRows.forEach(row -> view.findPassAt(row).ifPresent(pass -> {
             Refusals found = new Refusals(pass);
             PassRules.askPlace(
-                    view, pass, view.enclosures().get(pass.enclosure()), view.runRows().get(row), found);
+                    view,
+                    pass,
+                    view.enclosures().get(pass.enclosure()),
+                    view.runRows().get(row),
+                    found);
             refusals.addAll(found.list());
         }));
         return refusals;

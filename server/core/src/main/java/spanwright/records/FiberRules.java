@@ -78,8 +78,7 @@ final class FiberRules {
             refusals.add(
                     "number-above-count",
                     column,
-                    ports.ports() + " is too large; the ports of panel " + panel.code() + " are 1 to "
-                            + panel.ports());
+                    ports.ports() + " is too large; the ports of panel " + panel.code() + " are 1 to " + panel.ports());
         }
     }
 }

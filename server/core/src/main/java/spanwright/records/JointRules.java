@@ -52,9 +52,10 @@ final class JointRules {
             refusals.add(
                     "not-spliced",
                     column,
-                    "a port is not spliced; " + (joint.type() == JointKind.SPLICE
-                            ? "enter a termination or a jumper"
-                            : "name a cable's fibers or a splitter's input or outputs"));
+                    "a port is not spliced; "
+                            + (joint.type() == JointKind.SPLICE
+                                    ? "enter a termination or a jumper"
+                                    : "name a cable's fibers or a splitter's input or outputs"));
         }
     }
 

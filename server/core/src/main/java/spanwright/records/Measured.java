@@ -26,9 +26,11 @@ final class Measured {
 
     private static Predicate<String> names(RecordsView view, Recorded record) {
         return switch (record.kind()) {
-            case CABLE -> what -> begins(what, ((Cable) record).code(), ':') || begins(what, ((Cable) record).code(), ' ');
-            case ENCLOSURE -> what -> begins(what, ((Enclosure) record).code(), '/')
-                    || what.endsWith(at(((Enclosure) record).code()));
+            case CABLE ->
+                what -> begins(what, ((Cable) record).code(), ':') || begins(what, ((Cable) record).code(), ' ');
+            case ENCLOSURE ->
+                what -> begins(what, ((Enclosure) record).code(), '/')
+                        || what.endsWith(at(((Enclosure) record).code()));
             case PASS -> end(Names.cable(view, ((Pass) record).cable()), view, ((Pass) record).enclosure());
             case SPLITTER -> end(((Splitter) record).code(), view, ((Splitter) record).enclosure());
             case PANEL -> {

@@ -42,8 +42,9 @@ final class Names {
         String what = record.kind().name().toLowerCase(Locale.ROOT).replace('_', ' ');
         return switch (record.kind()) {
             case RUN_ROW -> of(view, (RunRow) record);
-            case PASS -> "cable " + cable(view, ((Pass) record).cable()) + " in enclosure "
-                    + enclosure(view, ((Pass) record).enclosure());
+            case PASS ->
+                "cable " + cable(view, ((Pass) record).cable()) + " in enclosure "
+                        + enclosure(view, ((Pass) record).enclosure());
             case SPLITTER, PANEL -> what + " " + plain(code);
             default -> code == null ? "the " + what : what + " " + code;
         };

@@ -47,14 +47,22 @@ final class RemovalRules {
                 add(users, "the run of cable", cablesOf(view, view.owned(Relation.SPAN_RUN_ROWS, record.id())));
             case FIBER_TYPE -> {
                 String code = ((FiberType) record).code();
-                add(users, "cable type", typesWhere(view, type -> type.fiberType().equals(code)));
+                add(
+                        users,
+                        "cable type",
+                        typesWhere(view, type -> type.fiberType().equals(code)));
             }
             case COLOR_CODE -> {
                 String code = ((ColorCode) record).code();
                 add(users, "cable type", typesWhere(view, type -> type.colors().equals(code)));
             }
             case CABLE_TYPE ->
-                add(users, "cable", view.cables().owned(Relation.CABLE_TYPE_CABLES, record.id()).map(Cable::code));
+                add(
+                        users,
+                        "cable",
+                        view.cables()
+                                .owned(Relation.CABLE_TYPE_CABLES, record.id())
+                                .map(Cable::code));
             case CABLE -> usersOf(view, (Cable) record, users);
             case RUN_ROW -> usersOf(view, (RunRow) record, users);
             case ENCLOSURE -> usersOf(view, (Enclosure) record, users);
@@ -89,15 +97,15 @@ final class RemovalRules {
         int id = structure.id();
         add(users, "span", view.spans().owned(Relation.STRUCTURE_SPANS, id).map(Span::code));
         add(users, "the run of cable", cablesOf(view, view.owned(Relation.STRUCTURE_RUN_ROWS, id)));
-        add(users, "enclosure", view.enclosures().owned(Relation.STRUCTURE_ENCLOSURES, id).map(Enclosure::code));
+        add(
+                users,
+                "enclosure",
+                view.enclosures().owned(Relation.STRUCTURE_ENCLOSURES, id).map(Enclosure::code));
     }
 
     private static void usersOf(RecordsView view, Cable cable, List<String> users) {
         int id = cable.id();
-        add(
-                users,
-                "its run row",
-                view.runOf(id).stream().map(row -> Integer.toString(row.seq())));
+        add(users, "its run row", view.runOf(id).stream().map(row -> Integer.toString(row.seq())));
         add(
                 users,
                 "its value at",
@@ -106,7 +114,10 @@ final class RemovalRules {
                 users,
                 "its flag on",
                 view.fiberFlags().owned(Relation.CABLE_FLAGS, id).map(flag -> flag.fibers() + ""));
-        add(users, "its count", view.fiberCounts().owned(Relation.CABLE_COUNTS, id).map(count -> count.name()));
+        add(
+                users,
+                "its count",
+                view.fiberCounts().owned(Relation.CABLE_COUNTS, id).map(count -> count.name()));
     }
 
     private static void usersOf(RecordsView view, RunRow row, List<String> users) {
@@ -128,14 +139,20 @@ final class RemovalRules {
                 users,
                 "the place in it of cable",
                 view.passes().owned(Relation.ENCLOSURE_PASSES, id).map(pass -> Names.cable(view, pass.cable())));
-        add(users, "splitter", view.splitters().owned(Relation.ENCLOSURE_SPLITTERS, id).map(Splitter::code));
+        add(
+                users,
+                "splitter",
+                view.splitters().owned(Relation.ENCLOSURE_SPLITTERS, id).map(Splitter::code));
         add(users, "panel", view.panels().owned(Relation.ENCLOSURE_PANELS, id).map(Panel::code));
     }
 
     private static void usersOf(RecordsView view, Pass pass, List<String> users) {
         String cable = Names.cable(view, pass.cable());
-        addStates(view, pass.enclosure(), users, (kind, owner) -> owner == pass.runRow()
-                && (kind == LegKind.BACK || kind == LegKind.AHEAD));
+        addStates(
+                view,
+                pass.enclosure(),
+                users,
+                (kind, owner) -> owner == pass.runRow() && (kind == LegKind.BACK || kind == LegKind.AHEAD));
         add(
                 users,
                 "the flag on",
@@ -150,12 +167,18 @@ final class RemovalRules {
     }
 
     private static void usersOf(RecordsView view, Splitter splitter, List<String> users) {
-        addStates(view, splitter.enclosure(), users, (kind, owner) -> owner == splitter.id()
-                && (kind == LegKind.IN || kind == LegKind.OUT));
+        addStates(
+                view,
+                splitter.enclosure(),
+                users,
+                (kind, owner) -> owner == splitter.id() && (kind == LegKind.IN || kind == LegKind.OUT));
     }
 
     private static void usersOf(RecordsView view, Panel panel, List<String> users) {
-        add(users, "circuit", view.circuits().owned(Relation.PANEL_CIRCUITS, panel.id()).map(Circuit::code));
+        add(
+                users,
+                "circuit",
+                view.circuits().owned(Relation.PANEL_CIRCUITS, panel.id()).map(Circuit::code));
     }
 
     /** Says whether a leg is meant. */

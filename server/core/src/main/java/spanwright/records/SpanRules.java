@@ -49,11 +49,17 @@ public final class SpanRules {
         Line line = span.line();
         if (span.from() == span.to()) {
             if (span.measuredLength() == null) {
-                refusals.add("span-without-length", "length_m", "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
+                refusals.add(
+                        "span-without-length",
+                        "length_m",
+                        "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
                                 + " and has no length; give its length_m, or another structure to end at");
             }
             if (line != null) {
-                refusals.add("span-line-at-one-structure", "line", "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
+                refusals.add(
+                        "span-line-at-one-structure",
+                        "line",
+                        "span " + span.code() + " begins and ends at " + Names.structure(view, span.from())
                                 + " and has a line; leave the line blank, it lies at the structure");
             }
         } else if (line != null) {
@@ -69,7 +75,10 @@ public final class SpanRules {
         if (!near(first, from) || !near(last, to)) {
             double off = Math.min(
                     Math.max(metres(first, from), metres(last, to)), Math.max(metres(first, to), metres(last, from)));
-            refusals.add("span-line-elsewhere", "line", String.format(
+            refusals.add(
+                    "span-line-elsewhere",
+                    "line",
+                    String.format(
                             Locale.ROOT,
                             "the line of span %s ends %.1f m from its structure; it begins and ends within 1 m of %s and %s",
                             span.code(),
