@@ -1,57 +1,11 @@
 import { nothing, svg } from "lit";
 import { decimal, roundValues } from "../quantity/index.js";
-import { lossAt, powerCurve } from "../path/index.js";
+import { lossAt } from "../path/index.js";
+import { budgetOf, yOf } from "./curve-field.js";
 
 /** @typedef {import("./window.js").Window} Window */
-/** @typedef {import("../server/contract.d.ts").Path} Path */
-
-/** @typedef {{ path: Path, curve: Array<[number, number]> }} Curve */
-
-/**
- * @typedef {object} Field the place of the curves on the paper
- * @property {number} top px
- * @property {number} bottom px
- * @property {number} most dB at the bottom
- */
-
-/**
- * @param {Path[]} paths one a wavelength
- * @returns {Curve[]}
- */
-export function curvesOf(paths) {
-  return paths.map((path) => ({ path, curve: powerCurve(path) }));
-}
-
-/**
- * Fits the curves, and the budget where it is not far below them.
- * @param {Curve[]} curves
- * @param {number} top px
- * @param {number} bottom px
- * @returns {Field}
- */
-export function fieldOf(curves, top, bottom) {
-  const lost = Math.max(0.5, ...curves.map(({ path }) => path.totals.loss_db));
-  const allowed = curves.map(({ path }) => budgetOf(path)).filter((each) => each !== null);
-  const shown = allowed.filter((each) => each < lost * 2.2);
-  return { top, bottom, most: Math.max(lost, ...shown) * 1.06 };
-}
-
-/**
- * @param {Path} path
- * @returns {number | null} dB that the path may lose
- */
-function budgetOf({ budget }) {
-  return budget === null ? null : budget.max_db - budget.margin_db;
-}
-
-/**
- * @param {Field} field
- * @param {number} db
- * @returns {number} px
- */
-export function yOf(field, db) {
-  return field.top + (db / field.most) * (field.bottom - field.top);
-}
+/** @typedef {import("./curve-field.js").Curve} Curve */
+/** @typedef {import("./curve-field.js").Field} Field */
 
 /**
  * The curves as computed steps and slopes, on a ground of dB lines.
@@ -71,9 +25,10 @@ export function drawnCurves(curves, field, window) {
  * @returns {unknown}
  */
 function ground(field, window) {
-  const values = roundValues(0, field.most, Math.max(2, Math.floor((field.bottom - field.top) / 22)));
+  const values = roundValues(field.least, field.most, Math.max(2, Math.floor((field.bottom - field.top) / 22)));
+  const places = (values[1] ?? 1) - (values[0] ?? 0) < 0.1 ? 2 : (values[1] ?? 1) - (values[0] ?? 0) < 1 ? 1 : 0;
   return values.map((db) => svg`<line class="rule" x1=${window.left} y1=${yOf(field, db)} x2=${window.right} y2=${yOf(field, db)}></line>
-    <text class="rule-label" x=${window.left - 6} y=${yOf(field, db) + 4}>${db === 0 ? "0 dB" : decimal(-db, db % 1 === 0 ? 0 : 1)}</text>`);
+    <text class="rule-label" x=${window.left - 6} y=${yOf(field, db) + 4}>${db === 0 ? "0 dB" : decimal(-db, places)}</text>`);
 }
 
 /**
@@ -85,7 +40,7 @@ function ground(field, window) {
 function budgetLine(curves, field, window) {
   const path = curves[0]?.path;
   const allowed = path ? budgetOf(path) : null;
-  if (allowed === null || allowed > field.most) return nothing;
+  if (allowed === null || allowed > field.most || allowed < field.least) return nothing;
   const y = yOf(field, allowed);
   return svg`<line class="budget-line" x1=${window.left} y1=${y} x2=${window.right} y2=${y}></line>
     <text class="budget-label" x=${window.left + 4} y=${y - 4}>budget ${decimal(allowed, 1)} dB${path?.budget?.class ? `, ${path.budget.class}` : ""}</text>`;

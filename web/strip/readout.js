@@ -6,7 +6,10 @@ import { elementAt, lossAt, placeAt, stopBasis, stopsOf } from "../path/index.js
 
 /** @typedef {import("../server/contract.d.ts").Path} Path */
 /** @typedef {import("../path/track.js").Measure} Measure */
-/** @typedef {import("./curve-drawing.js").Curve} Curve */
+/** @typedef {import("./curve-field.js").Curve} Curve */
+
+/** The pointer stands at a structure when less sheath parts them, metres. */
+const AT = 0.05;
 
 /** The pointer stands on a stop when no more glass than a tray holds parts them, metres. */
 const NEAR_STOP = 5;
@@ -47,7 +50,18 @@ export function readout(curves, glass) {
     ${figure(`Sheath ${from}`, "length", place.sheath, { how, source })} <span class="lighter">sheath</span>
     ${figure(`Route ${from}`, "length", place.route, { how: "sum", source: "Spans walked" })} <span class="lighter">route</span>
     ${curves.map(({ path: each, curve }) => html`<span class="readout-loss">${figure(`Expected loss ${from} at ${each.wavelength_nm} nm`, "loss", lossAt(curve, glass), { how: "sum", source: "Expected values of all that lies between" })} <span class="lighter">${each.wavelength_nm}</span></span>`)}
-    <span class="readout-place">${figure(`Sheath past ${at.before}`, "length", at.beyond, { how, source })} <span class="lighter">past</span> ${link("structure", at.before)}${at.after === at.before ? nothing : html` <span class="lighter">toward</span> ${link("structure", at.after)}`}</span>${stopThere(path, glass)}</span>`;
+    <span class="readout-place">${placeText(at, { how, source })}</span>${stopThere(path, glass)}</span>`;
+}
+
+/**
+ * @param {{ before: string, after: string, beyond: number }} at
+ * @param {import("../basis/basis.js").Basis} basis of the length
+ * @returns {unknown}
+ */
+function placeText(at, basis) {
+  if (at.beyond < AT) return html`<span class="lighter">at</span> ${link("structure", at.before)}`;
+  const toward = at.after === at.before ? nothing : html` <span class="lighter">toward</span> ${link("structure", at.after)}`;
+  return html`${figure(`Sheath past ${at.before}`, "length", at.beyond, basis)} <span class="lighter">past</span> ${link("structure", at.before)}${toward}`;
 }
 
 /**
@@ -76,5 +90,6 @@ export function spokenPlace(curves, glass, measure) {
   const place = placeAt(path.track, glass);
   const at = between(path, glass);
   const lost = curves.map(({ path: each, curve }) => `${inWords(loss(lossAt(curve, glass)))} at ${each.wavelength_nm} nm`);
-  return `${inWords(length(place[measure], units.unit))} ${measure}, ${inWords(length(at.beyond, units.unit))} past ${at.before}, ${lost.join(", ")}`;
+  const where = at.beyond < AT ? `at ${at.before}` : `${inWords(length(at.beyond, units.unit))} past ${at.before}`;
+  return `${inWords(length(place[measure], units.unit))} ${measure}, ${where}, ${lost.join(", ")}`;
 }

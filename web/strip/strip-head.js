@@ -32,9 +32,9 @@ export function stripHead(strip, path) {
  */
 function controls(strip) {
   const send = (/** @type {string} */ name, /** @type {unknown} */ detail) => strip.dispatchEvent(new CustomEvent(name, { bubbles: true, detail }));
-  return html`<fieldset class="choice"><legend>Wavelengths, nm</legend>${strip.offered.map((nm) => html`<label><input type="checkbox" .checked=${strip.chosen.includes(nm)}
+  return html`<fieldset class="choice"><legend><span class="unseen">Wavelengths, </span>nm</legend>${strip.offered.map((nm) => html`<label><input type="checkbox" .checked=${strip.chosen.includes(nm)}
       @change=${() => send("sw-wavelength", nm)}><span>${nm}</span></label>`)}</fieldset>
-    <fieldset class="choice"><legend>Distance in</legend>${MEASURES.map((measure) => html`<label><input type="radio" name="measure" .checked=${strip.measure === measure}
+    <fieldset class="choice"><legend><span class="unseen">Distance </span>in</legend>${MEASURES.map((measure) => html`<label><input type="radio" name="measure" .checked=${strip.measure === measure}
       @change=${() => send("sw-measure", measure)}><span>${measure}</span></label>`)}</fieldset>
     <span class="strip-zoom"><button type="button" @click=${() => strip.zoom(0.5)}>Closer</button><button type="button" @click=${() => strip.zoom(2)}>Farther</button><button
       type="button" ?disabled=${strip.stretch === null} @click=${() => (strip.stretch = null)}>Whole</button></span>`;

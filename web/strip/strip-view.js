@@ -3,7 +3,8 @@ import { hrefTo } from "../address/index.js";
 import { UnitController } from "../quantity/index.js";
 import { lossAt, trackLength } from "../path/index.js";
 import { LINE, drawnLine } from "./line-drawing.js";
-import { curvesOf, drawnCurves, fieldOf, yOf } from "./curve-drawing.js";
+import { drawnCurves } from "./curve-drawing.js";
+import { curvesOf, fieldOf, yOf } from "./curve-field.js";
 import { drawnAxis } from "./axis.js";
 import { readout, spokenPlace } from "./readout.js";
 import { stripHead } from "./strip-head.js";
@@ -209,11 +210,11 @@ export class StripView extends LitElement {
     </section>`;
   }
 
-  /** @param {Path} path @param {import("./curve-drawing.js").Curve[]} curves @returns {unknown} */
+  /** @param {Path} path @param {import("./curve-field.js").Curve[]} curves @returns {unknown} */
   paper(path, curves) {
     const { window, size } = this;
     const axis = size.height - 20;
-    const field = fieldOf(curves, LINE + 26, axis - 4);
+    const field = fieldOf(curves, window, this.stretch === null, LINE + 26, axis - 4);
     return html`<div class="strip-paper" role="slider" tabindex="0" aria-label="Place on the path" aria-orientation="horizontal"
       aria-valuemin="0" aria-valuemax=${Math.round(this.whole)} aria-valuenow=${Math.round(this.pointer ?? 0)} aria-valuetext=${spokenPlace(curves, this.pointer ?? 0, this.measure)}
       @pointermove=${this.hovered} @pointerleave=${() => (this.pinned ? undefined : this.point(null))} @click=${this.clicked} @keydown=${this.pressed}>
@@ -223,8 +224,8 @@ export class StripView extends LitElement {
   }
 
   /**
-   * @param {import("./curve-drawing.js").Curve[]} curves
-   * @param {import("./curve-drawing.js").Field} field
+   * @param {import("./curve-field.js").Curve[]} curves
+   * @param {import("./curve-field.js").Field} field
    * @param {Window} window
    * @param {number} axis px
    * @returns {unknown}

@@ -1,6 +1,7 @@
 /** The strip's window and its labels. */
 import assert from "node:assert/strict";
 import { test } from "node:test";
+import { fieldOf, yOf } from "../strip/curve-field.js";
 import { Window, moved, showing, withoutOverlap, zoomed } from "../strip/window.js";
 
 test("glass lies to scale between the two sides", () => {
@@ -39,4 +40,20 @@ test("labels give way to heavier ones and stay inside", () => {
   assert.deepEqual(placed.map((each) => each.item), ["a", "c", "d"].filter((each) => placed.some((one) => one.item === each)));
   assert.ok(placed.some((each) => each.item === "c") && !placed.some((each) => each.item === "b"));
   for (const each of placed) assert.ok(each.middle >= 20 && each.middle <= 190);
+});
+
+/** @returns {any} a curve that steps 0.6 dB at its start and slopes to 2.6 dB, with a budget of 5 dB */
+const curve = () => ({ path: { budget: { max_db: 5, margin_db: 1 } }, curve: [[0, 0], [0, 0.6], [1000, 2.6]] });
+
+test("the whole curve is drawn from 0 dB on, down to the budget where it is not far", () => {
+  const field = fieldOf([curve()], new Window(0, 1000, 0, 500), true, 0, 100);
+  assert.equal(field.least, 0);
+  assert.ok(field.most > 4 && field.most < 4.5);
+  assert.equal(yOf(field, 0), 0);
+  assert.equal(yOf(field, field.most), 100);
+});
+
+test("a part of the curve fills the paper", () => {
+  const field = fieldOf([curve()], new Window(500, 600, 0, 500), false, 0, 100);
+  assert.ok(field.least > 1.5 && field.least < 1.6 && field.most > 1.8 && field.most < 1.9, JSON.stringify(field));
 });
