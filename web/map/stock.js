@@ -1,4 +1,4 @@
-import { ask } from "../server/index.js";
+import { ask, askAnytime } from "../server/index.js";
 import { projectBase, projectPlant } from "./projected.js";
 
 /** @typedef {import("./projected.js").DrawnBase} DrawnBase */
@@ -59,7 +59,7 @@ export class Stock {
     const params = { ...wide, zoom: level };
     const timer = setTimeout(() => this.overdue(abort), SLOW_MS);
     try {
-      const [plant, base] = await Promise.all([ask("/map/plant", params, abort.signal), ask("/map/base", params, abort.signal)]);
+      const [plant, base] = await Promise.all([ask("/map/plant", params, abort.signal), askAnytime("/map/base", params, abort.signal)]);
       Object.assign(this, projectPlant(plant));
       this.base = projectBase(base);
       this.thinned = plant.truncated;

@@ -1,5 +1,5 @@
 import { html, nothing } from "lit";
-import { ask } from "../server/index.js";
+import { askAnytime } from "../server/index.js";
 import { link } from "../address/index.js";
 import { decimal, timeInWords } from "../quantity/index.js";
 import { RecordView } from "./record-view.js";
@@ -15,13 +15,13 @@ import { heading } from "./parts.js";
 export class PostingsView extends RecordView {
   /** @param {AbortSignal} signal @override */
   question(signal) {
-    return ask("/postings", {}, signal);
+    return askAnytime("/postings", {}, signal);
   }
 
   /** @param {number | null} before */
   async more(before) {
     const shown = this.asking.answer;
-    await this.asking.run((signal) => ask("/postings", { before }, signal));
+    await this.asking.run((signal) => askAnytime("/postings", { before }, signal));
     const next = this.asking.answer;
     if (shown && next && next !== shown) this.asking.answer = { ...next, postings: [...shown.postings, ...next.postings] };
     this.requestUpdate();
@@ -43,13 +43,13 @@ export class PostingsView extends RecordView {
 export class PostingView extends RecordView {
   /** @param {AbortSignal} signal @override */
   question(signal) {
-    return ask(`/postings/${encodeURIComponent(this.code)}`, {}, signal);
+    return askAnytime(`/postings/${encodeURIComponent(this.code)}`, {}, signal);
   }
 
   /** @param {number | null} from */
   async more(from) {
     const shown = this.asking.answer;
-    await this.asking.run((signal) => ask(`/postings/${encodeURIComponent(this.code)}`, { from_change: from }, signal));
+    await this.asking.run((signal) => askAnytime(`/postings/${encodeURIComponent(this.code)}`, { from_change: from }, signal));
     const next = this.asking.answer;
     if (shown && next && next !== shown) this.asking.answer = { ...next, changes: [...shown.changes, ...next.changes] };
     this.requestUpdate();

@@ -31,13 +31,24 @@ export function answerFrom(asOf, asIf) {
 }
 
 /**
- * Asks the server.
+ * Asks the server, from the records chosen.
  * @param {string} path parts already encoded, as {@link pathTo} makes them
  * @param {Record<string, Param>} [params] null, undefined and empty ones are left out
  * @param {AbortSignal} [signal]
  * @returns {Promise<any>} the answer, of the type that the contract names
  */
-export async function ask(path, params = {}, signal) {
+export function ask(path, params = {}, signal) {
+  return askAnytime(path, { ...params, as_of: standing.asOf, as_if: standing.asIf }, signal);
+}
+
+/**
+ * Asks the server what does not depend on which records are chosen: the base map, the journal.
+ * @param {string} path parts already encoded
+ * @param {Record<string, Param>} [params] null, undefined and empty ones are left out
+ * @param {AbortSignal} [signal]
+ * @returns {Promise<any>} the answer, of the type that the contract names
+ */
+export async function askAnytime(path, params = {}, signal) {
   const response = await reach(addressOf(path, params), signal);
   if (response.ok) return response.json();
   throw await problemOf(response);
@@ -60,8 +71,7 @@ export function pathTo(kind, code) {
  */
 function addressOf(path, params) {
   const query = new URLSearchParams();
-  const all = { ...params, as_of: standing.asOf, as_if: standing.asIf };
-  for (const [name, value] of Object.entries(all)) {
+  for (const [name, value] of Object.entries(params)) {
     if (value !== null && value !== undefined && value !== "") query.set(name, String(value));
   }
   const text = query.toString();
