@@ -60,6 +60,7 @@ export class ShellView extends LitElement {
     addEventListener("hashchange", this.hashed);
     addEventListener("keydown", this.pressed);
     matchMedia("(prefers-color-scheme: dark)").addEventListener("change", () => this.themed());
+    matchMedia("print").addEventListener("change", () => this.themed());
     void this.readStatus();
     void this.trace();
   }
