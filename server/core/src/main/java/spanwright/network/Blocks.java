@@ -90,23 +90,30 @@ abstract class Blocks {
         };
     }
 
-    /** The end of a leg in its block, or NONE where there is no such number. */
-    final int endIn(int block, LegKind kind, int number) {
-        int first = field(block, FIRST);
-        int count = field(block, COUNT);
-        int inputs = field(block, INPUTS);
+    /** The end numbered 1 of a leg in its block; the one numbered n is 2 (n - 1) further. */
+    final int firstEnd(int block, LegKind kind) {
+        int first = 2 * field(block, FIRST);
         return switch (kind) {
-            case AHEAD, REAR -> number <= count ? 2 * (first + number - 1) : NONE;
-            case BACK, FRONT -> number <= count ? 2 * (first + number - 1) + 1 : NONE;
-            case IN -> number <= inputs ? 2 * (first + number - 1) : NONE;
-            case OUT -> number <= count - inputs ? 2 * (first + inputs + number - 1) : NONE;
+            case AHEAD, REAR, IN -> first;
+            case BACK, FRONT -> first + 1;
+            case OUT -> first + 2 * field(block, INPUTS);
+        };
+    }
+
+    /** How many ends a leg has in its block. */
+    final int endCount(int block, LegKind kind) {
+        return switch (kind) {
+            case AHEAD, BACK, REAR, FRONT -> field(block, COUNT);
+            case IN -> field(block, INPUTS);
+            case OUT -> field(block, COUNT) - field(block, INPUTS);
         };
     }
 
     final int endOf(long key) {
         LegKind kind = EndKey.kind(key);
         int block = blockOfLeg(kind, EndKey.owner(key));
-        return block == NONE ? NONE : endIn(block, kind, EndKey.number(key));
+        int number = EndKey.number(key);
+        return block == NONE || number > endCount(block, kind) ? NONE : firstEnd(block, kind) + 2 * (number - 1);
     }
 
     final long keyOf(int end) {

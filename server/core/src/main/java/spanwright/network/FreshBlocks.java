@@ -1,8 +1,10 @@
 package spanwright.network;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import spanwright.plant.Cable;
 import spanwright.plant.RunRow;
@@ -39,13 +41,13 @@ final class FreshBlocks {
 
     void renew(DirtyPlant dirty) {
         List<Integer> settled = new ArrayList<>(dirty.rows);
-        List<Integer> cut = new ArrayList<>();
+        Map<Integer, List<Integer>> cut = new LinkedHashMap<>();
         for (int cable : dirty.cables) {
             List<Integer> wanted = cutsOf(cable);
             if (!dirty.wholly.contains(cable) && standsSo(cable, wanted)) {
                 settled.addAll(wanted);
             } else {
-                cut.add(cable);
+                cut.put(cable, wanted);
                 gatherCable(cable, wanted);
             }
         }
@@ -158,8 +160,7 @@ final class FreshBlocks {
         blocks.kill(block);
     }
 
-    private void layCable(int cable) {
-        List<Integer> cuts = cutsOf(cable);
+    private void layCable(int cable, List<Integer> cuts) {
         if (cuts.isEmpty()) {
             return;
         }

@@ -1,6 +1,5 @@
 package spanwright.network;
 
-import java.util.Optional;
 import spanwright.plant.FiberRange;
 import spanwright.plant.Pass;
 import spanwright.records.RecordsView;
@@ -26,60 +25,60 @@ final class JointLinker {
         this.loose = loose;
     }
 
-    /** Puts a joint into the glass; none of its ends is named by another. */
+    /**
+     * Puts a joint into the glass; none of its ends is named by another.
+     *
+     * @throws IllegalStateException where one is
+     */
     void link(Joint joint) {
-        int blockA = blockOf(joint.a().leg());
-        int blockB = blockOf(joint.b().leg());
-        boolean joins = blockA != NONE
-                && blockB != NONE
-                && records.enclosures()
-                        .find(joint.enclosure())
-                        .filter(InService::is)
-                        .isPresent();
-        for (int index = 0; index < joint.count(); index++) {
-            int endA = claim(blockA, joint.a(), index, joint.id());
-            int endB = claim(blockB, joint.b(), index, joint.id());
+        LegEnds endsA = LegEnds.of(blocks, joint.a().leg());
+        LegEnds endsB = LegEnds.of(blocks, joint.b().leg());
+        boolean joins = endsA.present() && endsB.present() && inService(joint.enclosure());
+        FiberRange numbersA = joint.a().numbers();
+        FiberRange numbersB = joint.b().numbers();
+        for (int index = 0; index < numbersA.count(); index++) {
+            int endA = endsA.at(numbersA.at(index));
+            int endB = endsB.at(numbersB.at(index));
+            claim(endA, joint.id());
+            claim(endB, joint.id());
             if (joins && endA != NONE && endB != NONE) {
                 links.connect(endA, endB);
             }
         }
-        noteLoose(joint, true);
+        noteLoose(joint, endsA, endsB, true);
     }
 
-    private int blockOf(Leg leg) {
-        return blocks.blockOfLeg(leg.kind(), leg.owner());
+    private boolean inService(int enclosure) {
+        return records.enclosures().find(enclosure).filter(InService::is).isPresent();
     }
 
-    private int claim(int block, EndRange ends, int index, int joint) {
-        if (block == NONE) {
-            return NONE;
+    private void claim(int end, int joint) {
+        if (end == NONE) {
+            return;
         }
-        int end = blocks.endIn(block, ends.leg().kind(), ends.numbers().at(index));
-        if (end != NONE) {
-            int earlier = links.joint(end);
-            if (earlier != 0) {
-                throw new IllegalStateException("joint " + joint + " on an end of joint " + earlier);
-            }
-            links.part(end);
-            links.name(end, joint);
+        int earlier = links.joint(end);
+        if (earlier != 0) {
+            throw new IllegalStateException("joint " + joint + " on an end of joint " + earlier);
         }
-        return end;
+        links.part(end);
+        links.name(end, joint);
     }
 
-    private void noteLoose(Joint joint, boolean put) {
-        noteLoose(joint.a().leg(), joint.id(), put);
+    private void noteLoose(Joint joint, LegEnds endsA, LegEnds endsB, boolean put) {
+        noteLoose(joint.a().leg(), endsA, joint.id(), put);
         if (!joint.b().leg().equals(joint.a().leg())) {
-            noteLoose(joint.b().leg(), joint.id(), put);
+            noteLoose(joint.b().leg(), endsB, joint.id(), put);
         }
     }
 
-    private void noteLoose(Leg leg, int joint, boolean put) {
-        if (blockOf(leg) == NONE) {
-            if (put) {
-                loose.add(leg, joint);
-            } else {
-                loose.remove(leg, joint);
-            }
+    private void noteLoose(Leg leg, LegEnds ends, int joint, boolean put) {
+        if (ends.present()) {
+            return;
+        }
+        if (put) {
+            loose.add(leg, joint);
+        } else {
+            loose.remove(leg, joint);
         }
     }
 
@@ -89,22 +88,20 @@ final class JointLinker {
      * @param heal whether a fiber that nothing cuts any more goes through again
      */
     void unlink(Joint joint, boolean heal) {
-        release(joint.a(), joint.id());
-        release(joint.b(), joint.id());
+        LegEnds endsA = LegEnds.of(blocks, joint.a().leg());
+        LegEnds endsB = LegEnds.of(blocks, joint.b().leg());
+        release(endsA, joint.a().numbers(), joint.id());
+        release(endsB, joint.b().numbers(), joint.id());
         if (heal) {
             heal(joint.a());
             heal(joint.b());
         }
-        noteLoose(joint, false);
+        noteLoose(joint, endsA, endsB, false);
     }
 
-    private void release(EndRange ends, int joint) {
-        int block = blockOf(ends.leg());
-        if (block == NONE) {
-            return;
-        }
-        for (int index = 0; index < ends.count(); index++) {
-            int end = blocks.endIn(block, ends.leg().kind(), ends.numbers().at(index));
+    private void release(LegEnds ends, FiberRange numbers, int joint) {
+        for (int index = 0; index < numbers.count(); index++) {
+            int end = ends.at(numbers.at(index));
             if (end != NONE && links.joint(end) == joint) {
                 links.part(end);
                 links.name(end, 0);
@@ -128,18 +125,15 @@ final class JointLinker {
     }
 
     private void settleRow(int row, FiberRange fibers) {
-        int back = blocks.find(Blocks.BACK, row);
-        int ahead = blocks.find(Blocks.AHEAD, row);
-        if (back == NONE || ahead == NONE) {
+        LegEnds back = LegEnds.of(blocks, new Leg(LegKind.BACK, row));
+        LegEnds ahead = LegEnds.of(blocks, new Leg(LegKind.AHEAD, row));
+        if (!back.present() || !ahead.present()) {
             return;
         }
-        Optional<Pass> pass = records.findPassAt(row);
+        Pass pass = records.findPassAt(row).orElse(null);
         for (int index = 0; index < fibers.count(); index++) {
             int fiber = fibers.at(index);
-            settle(
-                    blocks.endIn(back, LegKind.BACK, fiber),
-                    blocks.endIn(ahead, LegKind.AHEAD, fiber),
-                    pass.isPresent() && opens(pass.get(), fiber));
+            settle(back.at(fiber), ahead.at(fiber), pass != null && opens(pass, fiber));
         }
     }
 
@@ -171,22 +165,18 @@ final class JointLinker {
         link(joint);
     }
 
-    private void displace(EndRange ends) {
-        int block = blockOf(ends.leg());
-        for (int index = 0; block != NONE && index < ends.count(); index++) {
-            int end = blocks.endIn(block, ends.leg().kind(), ends.numbers().at(index));
+    private void displace(EndRange range) {
+        LegEnds ends = LegEnds.of(blocks, range.leg());
+        for (int index = 0; index < range.count(); index++) {
+            int end = ends.at(range.numbers().at(index));
             if (end != NONE) {
-                freePeerOf(end);
+                int other = links.peer(end);
                 links.part(end);
                 links.name(end, 0);
+                if (other != NONE) {
+                    links.name(other, 0);
+                }
             }
-        }
-    }
-
-    private void freePeerOf(int end) {
-        int other = links.peer(end);
-        if (other != NONE) {
-            links.name(other, 0);
         }
     }
 }

@@ -14,6 +14,9 @@ final class Links {
     Links(PagedInts peer, PagedInts joint) {
         this.peer = peer.edit();
         this.joint = joint.edit();
+        if (pieces() == 0) {
+            touched.addAll();
+        }
     }
 
     int peer(int end) {
@@ -37,6 +40,9 @@ final class Links {
         int before = pieces();
         peer.grow(2 * pieces, NONE);
         joint.grow(2 * pieces, 0);
+        if (touched.all()) {
+            return;
+        }
         for (int piece = before; piece < pieces; piece++) {
             touched.add(piece, pieces);
         }
@@ -81,6 +87,13 @@ final class Links {
 
     private void touch(int end) {
         touched.add(end >> 1, pieces());
+    }
+
+    /** A plain copy of all peers. */
+    int[] peers() {
+        int[] peers = new int[peer.size()];
+        peer.copyTo(0, peers.length, peers);
+        return peers;
     }
 
     PagedInts buildPeers() {

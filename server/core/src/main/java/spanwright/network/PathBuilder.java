@@ -8,7 +8,7 @@ final class PathBuilder {
 
     private static final int NONE = -1;
 
-    private final Links links;
+    private final int[] peers;
     private final int[] pathOf;
     private int[] paths = new int[1 << 10];
     private int[] slices;
@@ -16,7 +16,7 @@ final class PathBuilder {
     private int used;
 
     private PathBuilder(Links links, int pieces) {
-        this.links = links;
+        this.peers = links.peers();
         this.pathOf = new int[pieces];
         this.slices = new int[Math.max(16, pieces + (pieces >>> 3))];
     }
@@ -49,9 +49,9 @@ final class PathBuilder {
     private void layOpen(int firstPiece, int count) {
         for (int piece = firstPiece; piece < firstPiece + count; piece++) {
             if (pathOf[piece] == NONE) {
-                if (links.peer(2 * piece) == NONE) {
+                if (peers[2 * piece] == NONE) {
                     layFrom(2 * piece);
-                } else if (links.peer(2 * piece + 1) == NONE) {
+                } else if (peers[2 * piece + 1] == NONE) {
                     layFrom(2 * piece + 1);
                 }
             }
@@ -78,7 +78,7 @@ final class PathBuilder {
             slices[used++] = end;
             pathOf[end >> 1] = path;
             last = end ^ 1;
-            end = links.peer(last);
+            end = peers[last];
         } while (end != NONE && end != start);
         int length = used - offset - 1;
         slices[offset] = end == start ? -length : length;

@@ -162,25 +162,27 @@ final class PathEditor {
 
     PathIndex build() {
         PathIndex built = new PathIndex(pathOf.build(), paths.build(), slices.build(), unused, garbage);
-        int limit = Math.max(GARBAGE_AT_LEAST, built.slices.size() / 4);
-        return garbage > limit ? packed(built) : built;
+        int kept = built.slices.size() - garbage;
+        return garbage > Math.max(GARBAGE_AT_LEAST, kept / 2) ? packed(built, kept) : built;
     }
 
-    private static PathIndex packed(PathIndex loose) {
-        int[] slices = new int[loose.slices.size() - loose.garbage];
-        PagedInts.Editor paths = loose.paths.edit();
+    private static PathIndex packed(PathIndex loose, int kept) {
+        int[] from = new int[loose.slices.size()];
+        loose.slices.copyTo(0, from.length, from);
+        int[] paths = new int[loose.paths.size()];
+        loose.paths.copyTo(0, paths.length, paths);
+        int[] slices = new int[kept];
         int used = 0;
-        for (int path = 0; path < loose.limit(); path++) {
-            if (loose.exists(path)) {
-                int offset = loose.paths.get(path * STRIDE);
-                int count = 1 + loose.length(path);
-                for (int index = 0; index < count; index++) {
-                    slices[used + index] = loose.slices.get(offset + index);
-                }
-                paths.set(path * STRIDE, used);
+        for (int at = PathIndex.OFFSET; at < paths.length; at += STRIDE) {
+            int offset = paths[at];
+            if (offset != PathIndex.UNUSED) {
+                int count = 1 + Math.abs(from[offset]);
+                System.arraycopy(from, offset, slices, used, count);
+                paths[at] = used;
                 used += count;
             }
         }
-        return new PathIndex(loose.pathOf, paths.build(), PagedInts.copyOf(slices, used), loose.unused, 0);
+        return new PathIndex(
+                loose.pathOf, PagedInts.copyOf(paths, paths.length), PagedInts.copyOf(slices, used), loose.unused, 0);
     }
 }

@@ -19,14 +19,19 @@ final class TouchedPieces {
         }
         if (size == pieces.length) {
             if (size > Math.max(FEW, inAll / 2)) {
-                all = true;
-                pieces = new int[0];
-                size = 0;
+                addAll();
                 return;
             }
             pieces = Arrays.copyOf(pieces, size * 2);
         }
         pieces[size++] = piece;
+    }
+
+    /** Notes all pieces. */
+    void addAll() {
+        all = true;
+        pieces = new int[0];
+        size = 0;
     }
 
     /** Whether so many are touched that all count as touched. */

@@ -96,6 +96,10 @@ public final class PagedInts {
 
     /** Copies {@code count} ints from an index on to the head of a plain array. */
     public void copyTo(int index, int count, int[] into) {
+        copyTo(nodes, index, count, into);
+    }
+
+    private static void copyTo(int[][][] nodes, int index, int count, int[] into) {
         int done = 0;
         while (done < count) {
             int from = index + done;
@@ -140,6 +144,11 @@ public final class PagedInts {
         /** How many ints there are now. */
         public int size() {
             return size;
+        }
+
+        /** Copies {@code count} ints from an index on to the head of a plain array. */
+        public void copyTo(int index, int count, int[] into) {
+            PagedInts.copyTo(nodes, index, count, into);
         }
 
         /** Writes one int; the index lies below the size. */

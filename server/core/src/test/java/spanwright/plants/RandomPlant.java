@@ -32,7 +32,7 @@ public final class RandomPlant {
         new RouteDraw(draft, chance).draw(scale * chance.between(3, 12));
         new CableDraw(draft, chance).draw(scale * chance.between(2, 12));
         new EnclosureDraw(draft, chance).draw();
-        new JointDraw(draft, chance).draw();
+        new JointDraw(draft, chance).draw(entered(draft.records()));
         new ServiceDraw(draft, chance).draw(entered(draft.records()));
         return new RandomPlant(draft.records());
     }

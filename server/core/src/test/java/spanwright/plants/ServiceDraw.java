@@ -123,7 +123,7 @@ final class ServiceDraw {
                 if (!fronts.isEmpty()) {
                     long far = chance.of(fronts);
                     circuit(one(end), one(far));
-                    if (chance.in(15)) {
+                    if (chance.in(50)) {
                         circuit(one(far), one(end));
                     }
                 }
