@@ -160,9 +160,33 @@ final class CableChanges {
         if (at.seq() == 0 || at.seq() == run.size() - 1) {
             return;
         }
-        Cable cable = records.cables().get(pass.cable());
+        Cable rest = restOf(records.cables().get(pass.cable()));
+        RunRow start = new RunRow(
+                entering.next(RecordKind.RUN_ROW),
+                rest.id(),
+                0,
+                at.structure(),
+                null,
+                Length.ZERO,
+                Trust.POSTED,
+                null,
+                null);
+        List<Pass> passes = records.passesOf(pass.cable());
+        List<RunRow> beyond = run.subList(at.seq() + 1, run.size());
+        boolean laid = entering.add(rest)
+                && entering.add(start)
+                && beyond.stream().allMatch(row -> entering.replace(row, moved(row, rest.id(), row.seq() - at.seq())))
+                && passes.stream().allMatch(this::moveToItsCable)
+                && entering.add(new Pass(
+                        entering.next(RecordKind.PASS), pass.enclosure(), rest.id(), start.id(), List.of(), List.of()));
+        if (laid) {
+            moveJoints(new Leg(LegKind.AHEAD, at.id()), new Leg(LegKind.AHEAD, start.id()));
+        }
+    }
+
+    private Cable restOf(Cable cable) {
         int id = entering.next(RecordKind.CABLE);
-        Cable rest = new Cable(
+        return new Cable(
                 id,
                 cable.code() + "-" + id,
                 cable.cableType(),
@@ -173,31 +197,13 @@ final class CableChanges {
                 null,
                 cable.state(),
                 null);
-        RunRow start = new RunRow(
-                entering.next(RecordKind.RUN_ROW), id, 0, at.structure(), null, Length.ZERO, Trust.POSTED, null, null);
-        List<Pass> beyond = records.passesOf(cable.id());
-        boolean laid = entering.add(rest) && entering.add(start);
-        for (int seq = at.seq() + 1; laid && seq < run.size(); seq++) {
-            laid = entering.replace(run.get(seq), moved(run.get(seq), id, seq - at.seq()));
-        }
-        for (Pass other : beyond) {
-            if (laid && records.runRows().get(other.runRow()).cable() == id) {
-                laid = entering.replace(
-                        other,
-                        new Pass(
-                                other.id(),
-                                other.enclosure(),
-                                id,
-                                other.runRow(),
-                                other.opened(),
-                                other.tubesOpened()));
-            }
-        }
-        if (laid
-                && entering.add(new Pass(
-                        entering.next(RecordKind.PASS), pass.enclosure(), id, start.id(), List.of(), List.of()))) {
-            moveJoints(new Leg(LegKind.AHEAD, at.id()), new Leg(LegKind.AHEAD, start.id()));
-        }
+    }
+
+    /** Makes a pass that of the cable to which its run row belongs now. */
+    private boolean moveToItsCable(Pass pass) {
+        int cable = records.runRows().get(pass.runRow()).cable();
+        return entering.replace(
+                pass, new Pass(pass.id(), pass.enclosure(), cable, pass.runRow(), pass.opened(), pass.tubesOpened()));
     }
 
     private void moveJoints(Leg from, Leg to) {

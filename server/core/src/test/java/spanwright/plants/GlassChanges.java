@@ -110,7 +110,7 @@ final class GlassChanges {
 
     private void turn(Joint joint) {
         FiberRange numbers = joint.b().numbers();
-        EndRange turned = new EndRange(joint.b().leg(), new FiberRange(numbers.last(), numbers.first()));
+        EndRange turned = new EndRange(joint.b().leg(), new FiberRange(numbers.at(numbers.count() - 1), numbers.at(0)));
         entering.replace(
                 joint, new Joint(joint.id(), joint.type(), joint.enclosure(), joint.a(), turned, joint.facts()));
     }
