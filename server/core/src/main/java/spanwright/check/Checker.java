@@ -17,6 +17,7 @@ public final class Checker {
             new GlassRules(),
             new PortRules(),
             new EntrySlipRules(),
+            new CircuitPathRules(),
             new CircuitFrontRules(),
             new MeasurementRules(),
             new DueRules());
