@@ -28,4 +28,9 @@ public record Connector(
     public ElementKind kind() {
         return ElementKind.CONNECTOR;
     }
+
+    /** The termination at its rear where that has no pigtail, so no splice of its own; null where there is none. */
+    public @Nullable Joint directTermination() {
+        return termination == null || termination.facts().method() != null ? null : termination;
+    }
 }
