@@ -16,8 +16,8 @@ import spanwright.plant.Trust;
 import spanwright.quantity.Loss;
 import spanwright.quantity.Wavelength;
 import spanwright.records.Relation;
-import spanwright.splicing.Flag;
 import spanwright.splicing.FiberFlag;
+import spanwright.splicing.Flag;
 import spanwright.trace.Fiber;
 import spanwright.trace.Path;
 import spanwright.trace.Splice;
@@ -50,7 +50,8 @@ final class CircuitPathRules implements Rule {
 
     private static void path(Checked checked, Circuit circuit, Path path, Consumer<Finding> found) {
         if (!path.complete()) {
-            String reached = path.loop() ? "in a circle" : "to " + path.ends().get(1).name();
+            String reached =
+                    path.loop() ? "in a circle" : "to " + path.ends().get(1).name();
             found.accept(finding(
                     Severity.ERROR,
                     "circuit-without-path",
@@ -86,7 +87,10 @@ final class CircuitPathRules implements Rule {
 
     private static int row(Fiber fiber, int enclosure) {
         for (int row = 0; row < fiber.lay().rows().size(); row++) {
-            if (fiber.lay().findEnclosure(row).filter(at -> at.id() == enclosure).isPresent()) {
+            if (fiber.lay()
+                    .findEnclosure(row)
+                    .filter(at -> at.id() == enclosure)
+                    .isPresent()) {
                 return row;
             }
         }

@@ -75,18 +75,36 @@ class CheckerTest {
 
     private static Snapshot temporarySplice(LocalDate until) {
         return with(Drawing.of(SOUND), records -> {
-            Joint splice = records.joints().list().filter(joint -> joint.count() == 2 && joint.b().leg().kind() == LegKind.AHEAD && joint.a().leg().kind() == LegKind.BACK)
-                    .findFirst().orElseThrow();
+            Joint splice = records.joints()
+                    .list()
+                    .filter(joint -> joint.count() == 2
+                            && joint.b().leg().kind() == LegKind.AHEAD
+                            && joint.a().leg().kind() == LegKind.BACK)
+                    .findFirst()
+                    .orElseThrow();
             return new Joint(
-                    splice.id(), splice.type(), splice.enclosure(), splice.a(), splice.b(),
+                    splice.id(),
+                    splice.type(),
+                    splice.enclosure(),
+                    splice.a(),
+                    splice.b(),
                     temporary(splice.facts(), until));
         });
     }
 
     private static Snapshot flagged(Flag flag, LocalDate until) {
-        return with(Drawing.of(SOUND), records -> new FiberFlag(
-                1, records.cables().find("F-1").orElseThrow().id(), FiberRange.of(1), flag, null, null, "Someone",
-                null, until));
+        return with(
+                Drawing.of(SOUND),
+                records -> new FiberFlag(
+                        1,
+                        records.cables().find("F-1").orElseThrow().id(),
+                        FiberRange.of(1),
+                        flag,
+                        null,
+                        null,
+                        "Someone",
+                        null,
+                        until));
     }
 
     @Test
@@ -102,7 +120,8 @@ class CheckerTest {
                 .contains(
                         "error circuit-without-path circuits.csv C-1",
                         "warning opened-without-state end_states.csv E2");
-        assertThat(check(broken)).anySatisfy(finding -> assertThat(finding.text()).contains("F-1 back 1 @ E2"));
+        assertThat(check(broken))
+                .anySatisfy(finding -> assertThat(finding.text()).contains("F-1 back 1 @ E2"));
     }
 
     @Test
@@ -121,13 +140,19 @@ class CheckerTest {
 
         assertThat(lines(Drawing.of(bare))).containsExactly("warning opened-without-state end_states.csv E2");
         assertThat(lines(with(Drawing.of(bare), capped))).isEmpty();
-        assertThat(lines(with(Drawing.of(SOUND), records -> new EndState(
-                        1,
-                        records.enclosures().find("E2").orElseThrow().id(),
-                        new EndRange(new Leg(LegKind.BACK, records.runOf(1).get(1).id()), FiberRange.of(1)),
-                        EndCondition.STORED,
-                        Trust.POSTED,
-                        null))))
+        assertThat(lines(with(
+                        Drawing.of(SOUND),
+                        records -> new EndState(
+                                1,
+                                records.enclosures().find("E2").orElseThrow().id(),
+                                new EndRange(
+                                        new Leg(
+                                                LegKind.BACK,
+                                                records.runOf(1).get(1).id()),
+                                        FiberRange.of(1)),
+                                EndCondition.STORED,
+                                Trust.POSTED,
+                                null))))
                 .containsExactly("error state-contradicts-glass end_states.csv E2");
     }
 
@@ -149,8 +174,10 @@ class CheckerTest {
     void marks_that_turn_and_marks_in_the_wrong_unit() {
         String run = "cable F-1 2 : H1 100 H2 100 H3\n";
 
-        assertThat(lines(Drawing.of(run + "mark F-1 0 - 1000\nmark F-1 1 1102\nmark F-1 2 1204"))).isEmpty();
-        assertThat(lines(Drawing.of(run + "mark F-1 0 - 1204\nmark F-1 1 1102\nmark F-1 2 1000"))).isEmpty();
+        assertThat(lines(Drawing.of(run + "mark F-1 0 - 1000\nmark F-1 1 1102\nmark F-1 2 1204")))
+                .isEmpty();
+        assertThat(lines(Drawing.of(run + "mark F-1 0 - 1204\nmark F-1 1 1102\nmark F-1 2 1000")))
+                .isEmpty();
         assertThat(lines(Drawing.of(run + "mark F-1 0 - 1000\nmark F-1 1 1102\nmark F-1 2 1000")))
                 .containsExactly("error marks-turn sheath_marks.csv F-1");
         assertThat(check(Drawing.of(run + "mark F-1 0 - 1000\nmark F-1 1 1335\nmark F-1 2 1670")))
@@ -167,8 +194,10 @@ class CheckerTest {
 
         assertThat(lines(Drawing.of(run + "1095"))).isEmpty();
         assertThat(lines(Drawing.of(run + "1130"))).isEmpty();
-        assertThat(lines(Drawing.of(run + "1094.9"))).containsExactly("warning sheath-against-route sheath_marks.csv F-1");
-        assertThat(lines(Drawing.of(run + "1130.1"))).containsExactly("warning sheath-against-route sheath_marks.csv F-1");
+        assertThat(lines(Drawing.of(run + "1094.9")))
+                .containsExactly("warning sheath-against-route sheath_marks.csv F-1");
+        assertThat(lines(Drawing.of(run + "1130.1")))
+                .containsExactly("warning sheath-against-route sheath_marks.csv F-1");
     }
 
     @Test
@@ -185,8 +214,16 @@ class CheckerTest {
         Snapshot abandoned = with(sound, records -> {
             Span span = records.spans().list().findFirst().orElseThrow();
             return new Span(
-                    span.id(), span.code(), span.from(), span.to(), span.placement(), span.measuredLength(),
-                    span.line(), PlantState.ABANDONED, List.of(), null);
+                    span.id(),
+                    span.code(),
+                    span.from(),
+                    span.to(),
+                    span.placement(),
+                    span.measuredLength(),
+                    span.line(),
+                    PlantState.ABANDONED,
+                    List.of(),
+                    null);
         });
 
         assertThat(lines(sound)).isEmpty();
@@ -219,8 +256,7 @@ class CheckerTest {
                 enclosure E1 H1 : D-7
                 splitter E1 S1 1x4
                 splice E1 : S1 out 1-2 = D-7 ahead 1-2
-                """)))
-                .containsExactly("warning splitter-not-fed splitters.csv E1/S1");
+                """))).containsExactly("warning splitter-not-fed splitters.csv E1/S1");
     }
 
     @Test
@@ -258,14 +294,14 @@ class CheckerTest {
                 term E1/P/2-3 = S1 out 1-2
                 circuit C-1 E1/P/1 E1/P/2
                 circuit C-2 E1/P/1 E1/P/3
-                """)))
-                .isEmpty();
+                """))).isEmpty();
     }
 
     @Test
     void a_circuit_held_against_its_budget() {
         // 1.5 km x 0.35 + 3 fusion splices x 0.10 + 2 connector pairs x 0.50 = 1.825 dB, 6 m of tray glass apart
-        assertThat(lines(Drawing.of(SOUND.replace("E3/P/1\n", "E3/P/1 budget=1.85\n")))).isEmpty();
+        assertThat(lines(Drawing.of(SOUND.replace("E3/P/1\n", "E3/P/1 budget=1.85\n"))))
+                .isEmpty();
         assertThat(lines(Drawing.of(SOUND.replace("E3/P/1\n", "E3/P/1 budget=1.8\n"))))
                 .containsExactly("warning circuit-over-budget circuits.csv C-1");
         assertThat(lines(Drawing.of(SOUND.replace("E3/P/1\n", "E3/P/1 budget=B+\n"))))
@@ -281,7 +317,8 @@ class CheckerTest {
 
     @Test
     void a_circuit_on_joints_of_unknown_trust() {
-        String unknown = SOUND.replace("splice E2 : F-1 back 1-2 = D-7 ahead 1-2", "splice E2 : F-1 back 1-2 = D-7 ahead 1-2 trust=unknown");
+        String unknown = SOUND.replace(
+                "splice E2 : F-1 back 1-2 = D-7 ahead 1-2", "splice E2 : F-1 back 1-2 = D-7 ahead 1-2 trust=unknown");
 
         assertThat(lines(Drawing.of(unknown))).containsExactly("note circuit-on-unknown-joints circuits.csv C-1");
     }
@@ -298,7 +335,8 @@ class CheckerTest {
 
     @Test
     void a_mechanical_splice_without_a_last_day() {
-        String mechanical = SOUND.replace("splice E2 : F-1 back 1-2 = D-7 ahead 1-2", "splice E2 : F-1 back 1-2 = D-7 ahead 1-2 mechanical");
+        String mechanical = SOUND.replace(
+                "splice E2 : F-1 back 1-2 = D-7 ahead 1-2", "splice E2 : F-1 back 1-2 = D-7 ahead 1-2 mechanical");
 
         assertThat(lines(Drawing.of(mechanical))).containsExactly("note mechanical-without-end splices.csv E2");
     }
@@ -309,7 +347,8 @@ class CheckerTest {
 
         assertThat(lines(Drawing.of(SOUND + measured)))
                 .containsExactly("note measured-one-way measurements.csv F-1 back 1 @ E2");
-        assertThat(lines(Drawing.of(SOUND + measured + "measured \"F-1 back 1 @ E2\" 1550 ba 0.1"))).isEmpty();
+        assertThat(lines(Drawing.of(SOUND + measured + "measured \"F-1 back 1 @ E2\" 1550 ba 0.1")))
+                .isEmpty();
     }
 
     @Test
