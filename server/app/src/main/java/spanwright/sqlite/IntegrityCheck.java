@@ -6,6 +6,7 @@ import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.CancellationException;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CompletionStage;
 import org.jspecify.annotations.Nullable;
@@ -78,7 +79,10 @@ final class IntegrityCheck {
 
     /** Gives the check up if it is still running. */
     synchronized void stop() throws SQLException {
-        begun = true;
+        if (!begun) {
+            begun = true;
+            result.completeExceptionally(new CancellationException("the file was closed"));
+        }
         Statement statement = running;
         if (statement != null) {
             statement.cancel();

@@ -1,11 +1,8 @@
 package spanwright.sqlite;
 
 import java.io.IOException;
-import java.nio.channels.FileChannel;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
-import java.nio.file.StandardOpenOption;
 import java.sql.Connection;
 import java.sql.SQLException;
 import java.sql.Statement;
@@ -50,16 +47,13 @@ final class Store implements AutoCloseable {
     }
 
     private void append(List<Draft> drafts) throws SQLException {
-        boolean kept = false;
         Connection writing = connection();
         try {
             write(drafts, stateWriter(writing), journalWriter(writing));
             writing.commit();
-            kept = true;
-        } finally {
-            if (!kept) {
-                undo(writing);
-            }
+        } catch (SQLException | RuntimeException | Error fault) {
+            undo(writing, fault);
+            throw fault;
         }
     }
 
@@ -70,7 +64,8 @@ final class Store implements AutoCloseable {
         }
     }
 
-    private Connection connection() throws SQLException {
+    /** The connection that writes. */
+    Connection connection() throws SQLException {
         Connection open = connection;
         if (open == null) {
             open = Connections.writing(file);
@@ -98,10 +93,25 @@ final class Store implements AutoCloseable {
     }
 
     /** Takes back what was written, and forgets the statements: batches may be half filled. */
-    private void undo(Connection writing) throws SQLException {
+    private void undo(Connection writing, Throwable fault) {
         state = null;
         journal = null;
-        writing.rollback();
+        try {
+            writing.rollback();
+        } catch (SQLException already) {
+            // Some faults, such as a full disk, have SQLite take it back itself. So as to be sure, begin afresh.
+            fault.addSuppressed(already);
+            connection = null;
+            close(writing, fault);
+        }
+    }
+
+    private static void close(Connection writing, Throwable fault) {
+        try {
+            writing.close();
+        } catch (SQLException unclosed) {
+            fault.addSuppressed(unclosed);
+        }
     }
 
     private void make(List<Draft> drafts) throws SQLException, IOException {
@@ -119,31 +129,12 @@ final class Store implements AutoCloseable {
                     statement.execute("PRAGMA journal_mode = WAL");
                 }
             }
-            force(making);
-            Files.move(making, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
+            Disk.moveInto(making, file);
             made = true;
-            forceFolder(file);
         } finally {
             if (!made) {
                 Files.deleteIfExists(making);
                 Files.deleteIfExists(RecordsFile.log(making));
-            }
-        }
-    }
-
-    /** Has the system write all of a file to the disk. */
-    static void force(Path file) throws IOException {
-        try (FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE)) {
-            channel.force(true);
-        }
-    }
-
-    /** Has the system write the name of a file to the disk, where it can be asked to. */
-    static void forceFolder(Path file) throws IOException {
-        Path folder = file.toAbsolutePath().getParent();
-        if (folder != null && !System.getProperty("os.name", "").startsWith("Windows")) {
-            try (FileChannel channel = FileChannel.open(folder, StandardOpenOption.READ)) {
-                channel.force(true);
             }
         }
     }

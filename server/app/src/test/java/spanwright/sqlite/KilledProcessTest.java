@@ -1,0 +1,113 @@
+package spanwright.sqlite;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.BufferedReader;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.sql.Connection;
+import java.sql.DriverManager;
+import java.sql.SQLException;
+import java.util.List;
+import java.util.Random;
+import java.util.concurrent.TimeUnit;
+import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import spanwright.journal.Change;
+import spanwright.network.RecordsText;
+import spanwright.network.Snapshot;
+import spanwright.network.SnapshotEditor;
+
+/** Invariant 1 of the package, put to the test by killing the process that writes. */
+class KilledProcessTest {
+
+    @TempDir
+    private Path folder;
+
+    @Test
+    void what_was_acknowledged_before_a_kill_is_there_and_nothing_is_half_there() throws Exception {
+        killOften(6, 20260331);
+    }
+
+    @Test
+    @Tag("slow")
+    void what_was_acknowledged_before_fifty_kills_is_there_and_nothing_is_half_there() throws Exception {
+        killOften(50, System.nanoTime());
+    }
+
+    private void killOften(int kills, long seed) throws IOException, SQLException, InterruptedException {
+        Random random = new Random(seed);
+        Path file = folder.resolve("plant");
+        int acknowledged = 0;
+        for (int kill = 0; kill < kills; kill++) {
+            if (kill % 5 == 4) {
+                // Begin anew, so that the making of a file is killed too.
+                Files.deleteIfExists(file);
+                Files.deleteIfExists(RecordsFile.log(file));
+                acknowledged = 0;
+            }
+            acknowledged = Math.max(acknowledged, killOne(file, random));
+            String run = "seed " + seed + ", kill " + kill + ", acknowledged " + acknowledged;
+            if (acknowledged > 0 || Store.exists(file)) {
+                check(file, acknowledged, run);
+            }
+        }
+    }
+
+    /** Lets a process post for a moment and kills it; gives the last posting that it was told of. */
+    private static int killOne(Path file, Random random) throws IOException, InterruptedException {
+        Process process = PostingProcess.start(file, random.nextLong());
+        int acknowledged = 0;
+        try (BufferedReader lines = process.inputReader(StandardCharsets.UTF_8)) {
+            assertThat(lines.readLine()).isEqualTo("opened");
+            Thread killer = new Thread(() -> sleepAndKill(process, random.nextInt(1500)));
+            killer.start();
+            for (String line = lines.readLine(); line != null; line = lines.readLine()) {
+                if (line.startsWith("posted ") && line.length() > "posted ".length()) {
+                    acknowledged = Math.max(acknowledged, Integer.parseInt(line.substring("posted ".length())));
+                }
+            }
+            killer.join();
+        }
+        assertThat(process.waitFor(30, TimeUnit.SECONDS)).isTrue();
+        return acknowledged;
+    }
+
+    private static void sleepAndKill(Process process, int milliseconds) {
+        try {
+            Thread.sleep(milliseconds);
+        } catch (InterruptedException early) {
+            Thread.currentThread().interrupt();
+        }
+        process.destroyForcibly();
+    }
+
+    private static void check(Path file, int acknowledged, String run) throws SQLException {
+        try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+            int last = ledger.current().records().posting();
+            assertThat(last).as(run).isGreaterThanOrEqualTo(acknowledged);
+            assertThat(ledger.integrity().toCompletableFuture().join().findings())
+                    .as(run)
+                    .isEmpty();
+            assertThat(RecordsText.of(ledger.current())).as(run).isEqualTo(RecordsText.of(replayed(ledger, last)));
+        }
+        try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
+            List<String> counts = Ledgers.rows(
+                    connection, "SELECT count(*), max(number), coalesce(sum(changes), 0) >= 0 FROM posting");
+            assertThat(counts.get(0)).as(run).matches("(\\d+)\\|\\1\\|1|0\\|null\\|1");
+        }
+    }
+
+    private static Snapshot replayed(SqliteLedger ledger, int last) {
+        SnapshotEditor editor = Snapshot.empty().edit();
+        for (int number = 1; number <= last; number++) {
+            for (Change change : ledger.changesOf(number)) {
+                editor.replay(change);
+            }
+        }
+        return editor.build(last);
+    }
+}
