@@ -21,7 +21,7 @@ import { formatRange, parseRange, rangeSize } from "../quantity/index.js";
  * @property {Side} b
  * @property {number} count pairs joined
  * @property {string[]} trays
- * @property {string} trust of all its joints
+ * @property {"known" | "planned" | "unknown"} trust of all its joints
  */
 
 /**
@@ -33,8 +33,8 @@ import { formatRange, parseRange, rangeSize } from "../quantity/index.js";
  */
 
 /**
- * The bands of an enclosure: neighbouring ranges that run on side by side, and are trusted alike, are one, so that what is
- * crossed or doubtful stands out.
+ * The bands of an enclosure: neighbouring ranges that run on side by side are one, so that what is crossed stands out; what
+ * is only planned or of unknown trust stays apart from what is known.
  * Jumpers, which lie outside, are left out.
  * @param {Enclosure} enclosure
  * @returns {Band[]}
@@ -61,7 +61,15 @@ export function bandsOf(enclosure) {
 function bandOf(enclosure, joint, order) {
   const a = sideOf(enclosure, joint.a);
   const b = sideOf(enclosure, joint.b);
-  return { what: "band", order, a, b, count: joint.count, trays: joint.tray === null ? [] : [joint.tray], trust: joint.trust };
+  return { what: "band", order, a, b, count: joint.count, trays: joint.tray === null ? [] : [joint.tray], trust: sureness(joint.trust) };
+}
+
+/**
+ * @param {string} trust of a joint
+ * @returns {Band["trust"]}
+ */
+function sureness(trust) {
+  return trust === "planned" || trust === "unknown" ? trust : "known";
 }
 
 /**

@@ -2,6 +2,7 @@ import { html, nothing, svg } from "lit";
 import { parseColor, patchShapes } from "../color/index.js";
 import { wind } from "../quantity/index.js";
 import { tubeOf } from "./ends.js";
+import { endAtBox } from "./enclosure-boxes.js";
 import { DRAWING, layOut, onOutline, rangesText, throughRanges, wayRound, widthOf } from "./enclosure-layout.js";
 import { placeLabels } from "./labels.js";
 
@@ -119,21 +120,6 @@ function endOf(band, side, layout) {
 }
 
 /**
- * @param {Band} band
- * @param {Side} side
- * @param {Layout} layout
- * @returns {{ at: Point, toward: Point }} the side of the box that faces the leg at the band's other end
- */
-function endAtBox(band, side, layout) {
-  const box = layout.boxes.find((each) => each.id === side.box);
-  const other = layout.gates.find((each) => each.id === (side === band.a ? band.b.gate : band.a.gate));
-  const right = Math.sin(other?.at ?? 0) >= 0 ? 1 : -1;
-  const x = (box?.x ?? DRAWING.cx) + (right * (box?.width ?? 0)) / 2;
-  const y = box?.y ?? DRAWING.cy;
-  return { at: { x, y }, toward: { x: x + right * 28, y } };
-}
-
-/**
  * @param {Curve} curve
  * @returns {string} for the d of an SVG path
  */
@@ -148,7 +134,7 @@ function pathOf({ p0, p1, p2, p3 }) {
  * @returns {unknown}
  */
 function drawnBand(band, curve, width) {
-  const said = `${band.a.of} ${band.a.numbers} = ${band.b.of} ${band.b.numbers}, ${band.trust}`;
+  const said = `${band.a.of} ${band.a.numbers} = ${band.b.of} ${band.b.numbers}${band.trust === "known" ? "" : `, trust ${band.trust}`}`;
   return svg`<g class=${`band trust-${band.trust}`}><title>${said}</title>
     <path class="band-edge" d=${pathOf(curve)} stroke-width=${width}></path>
     ${width > 3 ? svg`<path class="band-body" d=${pathOf(curve)} stroke-width=${width - 1.6}></path>` : nothing}</g>`;

@@ -7,7 +7,7 @@ import { bandsOf, restsOf } from "./enclosure-bands.js";
 /** @typedef {import("./enclosure-bands.js").Rest} Rest */
 
 /** The drawing's size and the outline in it, px. */
-export const DRAWING = Object.freeze({ width: 520, height: 348, cx: 260, cy: 174, rx: 118, ry: 100 });
+export const DRAWING = Object.freeze({ width: 520, height: 368, cx: 260, cy: 188, rx: 118, ry: 100 });
 
 /** Widths of bands, px: the widest leg's bands together, the least of one, the most a fiber, and the gap between two. */
 const BAND = Object.freeze({ leg: 60, least: 2, fiber: 0.9, gap: 3 });
@@ -219,7 +219,16 @@ function boxesOf(enclosure, bands, gates) {
   const all = [...panels, ...splitters].sort((one, other) => pull(one.id, bands, gates) - pull(other.id, bands, gates));
   const height = Math.min(28, 140 / Math.max(1, all.length) - 6);
   const top = DRAWING.cy - (all.length * (height + 6) - 6) / 2;
-  return all.map((each, index) => ({ ...each, x: DRAWING.cx, y: top + index * (height + 6) + height / 2, width: Math.max(96, each.label.length * 6.4 + 12), height }));
+  const x = DRAWING.cx - (DRAWING.rx - 62) * lean(gates);
+  return all.map((each, index) => ({ ...each, x, y: top + index * (height + 6) + height / 2, width: Math.max(96, each.label.length * 6.4 + 12), height }));
+}
+
+/**
+ * @param {Gate[]} gates
+ * @returns {number} -1 where all legs leave westward, 1 where all leave eastward: boxes give way to the other side
+ */
+function lean(gates) {
+  return gates.length === 0 ? 0 : gates.reduce((sum, gate) => sum + Math.sin(gate.at), 0) / gates.length;
 }
 
 /**

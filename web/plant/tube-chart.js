@@ -18,6 +18,7 @@ export function tubeChart(cable, sections) {
   const places = cable.type.fibers_per_tube;
   return html`<table class="tube-chart" @keydown=${moveCell}>
     <caption class="unseen">Tubes of ${cable.code}, a row each, with every fiber's state</caption>
+    <colgroup><col class="tube-column"></colgroup>
     <tbody>${cable.tubes.map((tube, row) => {
       const { first, last } = parseRange(tube.fibers);
       const fibers = Array.from({ length: Math.min(places, last - first + 1) }, (_, index) => first + index);

@@ -37,11 +37,13 @@ test("tubes exchanged stand out as bands of their own", () => {
   assert.deepEqual(bands.map((each) => `${each.a.numbers} = ${each.b.numbers}`), ["1-72 = 1-72", "73-84 = 217-228", "85-216 = 85-216", "217-228 = 73-84", "229-288 = 229-288"]);
 });
 
-test("a range that falls goes on downwards only, and one that is trusted otherwise is another band", () => {
+test("a range that falls goes on downwards only, and one of unknown trust is another band", () => {
   const flipped = bandsOf(enclosure([joint(leg("F", "back", "1-12"), leg("G", "ahead", "12-1")), joint(leg("F", "back", "13-24"), leg("G", "ahead", "13-24"))]));
   assert.equal(flipped.length, 2);
   const doubtful = bandsOf(enclosure([joint(leg("F", "back", "1-12"), leg("G", "ahead", "1-12")), joint(leg("F", "back", "13-24"), leg("G", "ahead", "13-24"), { trust: "unknown" })]));
-  assert.deepEqual(doubtful.map((each) => each.trust), ["posted", "unknown"]);
+  assert.deepEqual(doubtful.map((each) => each.trust), ["known", "unknown"]);
+  const verified = bandsOf(enclosure([joint(leg("F", "back", "1-12"), leg("G", "ahead", "1-12")), joint(leg("F", "back", "13-24"), leg("G", "ahead", "13-24"), { trust: "verified" })]));
+  assert.equal(verified.length, 1);
 });
 
 test("jumpers are not drawn within the outline", () => {
