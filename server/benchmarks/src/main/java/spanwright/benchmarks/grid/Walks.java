@@ -68,9 +68,13 @@ final class Walks {
     private void group() {
         int count = GROUPS[random.nextInt(GROUPS.length)];
         int node = random.nextInt(grid.nodes());
+        int direction = way(node, count);
+        if (direction < 0) {
+            return;
+        }
         int firstPort = ports.size();
         int[] tips = port(node, count);
-        int end = walk(node, tips, 5 + random.nextInt(56));
+        int end = walk(node, direction, tips, 5 + random.nextInt(56));
         int lastPort = ports.size();
         connect(tips, port(end, count));
         for (int index = 0; index < count; index++) {
@@ -80,9 +84,13 @@ final class Walks {
 
     private void tree() {
         int node = random.nextInt(grid.nodes());
+        int direction = way(node, 1);
+        if (direction < 0) {
+            return;
+        }
         int feederPort = ports.size();
         int[] tip = port(node, 1);
-        int at = walk(node, tip, 5 + random.nextInt(26));
+        int at = walk(node, direction, tip, 5 + random.nextInt(26));
         int in = joins.newEnd();
         joins.join(tip[0], in);
         int[] outs = new int[OUTPUTS];
@@ -92,7 +100,7 @@ final class Walks {
         splitters.add(new Split(at, in, outs[0]));
         for (int first = 0; first < OUTPUTS; first += 8) {
             int[] tips = Arrays.copyOfRange(outs, first, first + 8);
-            int end = walk(at, tips, 1 + random.nextInt(4));
+            int end = walk(at, random.nextInt(4), tips, 1 + random.nextInt(4));
             int lastPort = ports.size();
             connect(tips, port(end, tips.length));
             for (int index = 0; index < tips.length; index++) {
@@ -108,9 +116,9 @@ final class Walks {
     }
 
     /** Takes the tips along, one fiber each, and gives the node where the walk came to its end. */
-    private int walk(int start, int[] tips, int hops) {
+    private int walk(int start, int firstDirection, int[] tips, int hops) {
         int node = start;
-        int direction = random.nextInt(4);
+        int direction = firstDirection;
         for (int hop = 0; hop < hops; hop++) {
             int turned = turn(node, direction, tips.length);
             if (turned < 0) {
@@ -128,11 +136,26 @@ final class Walks {
         int[] tried = {first, direction, (direction + 1) % 4, (direction + 3) % 4};
         for (int way : tried) {
             int cable = grid.cable(node, way);
-            if (cable >= 0 && used[cable] + count <= grid.fibers[cable] * 3 / 4) {
+            if (room(cable, count)) {
                 return way;
             }
         }
         return -1;
+    }
+
+    /** A direction with room for a group, whichever; -1 where there is none. */
+    private int way(int node, int count) {
+        int first = random.nextInt(4);
+        for (int turn = 0; turn < 4; turn++) {
+            if (room(grid.cable(node, (first + turn) % 4), count)) {
+                return (first + turn) % 4;
+            }
+        }
+        return -1;
+    }
+
+    private boolean room(int cable, int count) {
+        return cable >= 0 && used[cable] + count <= grid.fibers[cable] * 3 / 4;
     }
 
     private int advance(int node, int cable, int[] tips) {
