@@ -53,7 +53,7 @@ final class FixedRules {
 
     /** Fiber types and colour orders are referred to by code, and measurements name what they are of in words. */
     private static void askCode(RecordsView view, Recorded before, Refusals refusals) {
-        boolean named = before instanceof FiberType || before instanceof ColorCode
+        boolean named = (before instanceof FiberType || before instanceof ColorCode)
                 ? !RemovalRules.users(view, before).isEmpty()
                 : Measured.list(view, before).findFirst().isPresent();
         if (named) {
