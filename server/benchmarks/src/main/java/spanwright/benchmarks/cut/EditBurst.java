@@ -75,7 +75,7 @@ final class EditBurst {
                 joint.type(),
                 joint.enclosure(),
                 joint.a(),
-                new EndRange(joint.b().leg(), new FiberRange(numbers.last(), numbers.first())),
+                new EndRange(joint.b().leg(), new FiberRange(/* first= */ numbers.last(), /* last= */ numbers.first())),
                 joint.facts());
         refuse(editor.apply(Change.remove(joint)));
         refuse(editor.apply(Change.add(turned)));

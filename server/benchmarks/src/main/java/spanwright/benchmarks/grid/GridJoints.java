@@ -101,7 +101,7 @@ final class GridJoints {
                 break;
             }
             int way = number(other) - number(joins.peer(end(cable, fiber + count - 1, side)));
-            if (Math.abs(way) != 1 || step != 0 && way != step) {
+            if (Math.abs(way) != 1 || (step != 0 && way != step)) {
                 break;
             }
             step = way;

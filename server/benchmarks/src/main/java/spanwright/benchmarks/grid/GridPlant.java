@@ -101,9 +101,10 @@ public final class GridPlant {
 
     private void structures() {
         for (int node = 0; node < grid.nodes(); node++) {
-            Position position = new Position(
-                    ORIGIN.lon() + node % grid.side * SPACING_DEGREES,
-                    ORIGIN.lat() - (double) (node / grid.side) * SPACING_DEGREES);
+            int row = node / grid.side;
+            int column = node % grid.side;
+            Position position =
+                    new Position(ORIGIN.lon() + column * SPACING_DEGREES, ORIGIN.lat() - row * SPACING_DEGREES);
             records.add(new Structure(
                     node + 1,
                     "HH-" + (node + 1),

@@ -30,7 +30,7 @@ public final class Samples {
     public double quantile(double share) {
         long[] sorted = Arrays.copyOf(times, count);
         Arrays.sort(sorted);
-        return sorted[(int) Math.min(count - 1L, Math.floor(share * count))];
+        return sorted[Math.min(count - 1, (int) (share * count))];
     }
 
     /** The middle time. */
