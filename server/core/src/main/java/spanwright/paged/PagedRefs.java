@@ -1,6 +1,8 @@
 package spanwright.paged;
 
 import java.util.Arrays;
+import java.util.Objects;
+import java.util.function.IntConsumer;
 import java.util.function.IntFunction;
 import org.jspecify.annotations.Nullable;
 
@@ -69,6 +71,31 @@ public final class PagedRefs<T> {
             pages[number] = page;
         }
         return page;
+    }
+
+    /**
+     * Tells every index at which another array holds something else, rising. Pages that both share are passed
+     * over whole, so neighbours in time are compared at the price of what changed.
+     */
+    public void differing(PagedRefs<T> other, IntConsumer hearer) {
+        int last = (Math.max(size, other.size) + MASK) >>> SHIFT;
+        for (int number = 0; number < last; number++) {
+            if (!sharesPage(other, number)) {
+                int end = Math.min((number + 1) << SHIFT, Math.max(size, other.size));
+                for (int index = number << SHIFT; index < end; index++) {
+                    if (!Objects.equals(find(index), other.find(index))) {
+                        hearer.accept(index);
+                    }
+                }
+            }
+        }
+    }
+
+    private boolean sharesPage(PagedRefs<T> other, int number) {
+        if (number >= pages.length || number >= other.pages.length) {
+            return false;
+        }
+        return pages[number] == other.pages[number] && (pages[number] != null || loader == other.loader);
     }
 
     /** Begins a changed copy. */

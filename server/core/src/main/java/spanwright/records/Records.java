@@ -5,6 +5,7 @@ import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.function.IntConsumer;
 import org.jspecify.annotations.Nullable;
 import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
@@ -61,6 +62,14 @@ public final class Records extends RecordsView {
     /** The last posting that they include; 0 where there is none. */
     public int posting() {
         return posting;
+    }
+
+    /**
+     * Tells the identity of every record of a kind that other records hold otherwise, or not, or alone. It costs
+     * what was changed in between, so neighbours in time are cheap to compare.
+     */
+    public void differing(RecordKind kind, Records other, IntConsumer hearer) {
+        byKind.get(kind.ordinal()).differing(other.byKind.get(kind.ordinal()), hearer);
     }
 
     /** Begins the next state. */

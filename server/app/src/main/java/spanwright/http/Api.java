@@ -1,0 +1,4 @@
+package spanwright.http;
+
+/** What the routes answer from. */
+public record Api() {}
