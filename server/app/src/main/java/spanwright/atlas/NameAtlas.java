@@ -49,11 +49,10 @@ public final class NameAtlas implements AutoCloseable {
         Changed changed = new Changed();
         found.changed(named.kind()).stream().forEach(changed::add);
         if (named == Named.PANEL || named == Named.SPLITTER) {
-            Relation relation =
-                    named == Named.PANEL ? Relation.ENCLOSURE_PANELS : Relation.ENCLOSURE_SPLITTERS;
-            found.changed(RecordKind.ENCLOSURE).stream().forEach(enclosure -> IntStream.of(
-                            records.owned(relation, enclosure))
-                    .forEach(changed::add));
+            Relation relation = named == Named.PANEL ? Relation.ENCLOSURE_PANELS : Relation.ENCLOSURE_SPLITTERS;
+            found.changed(RecordKind.ENCLOSURE).stream()
+                    .forEach(enclosure ->
+                            IntStream.of(records.owned(relation, enclosure)).forEach(changed::add));
         }
         return changed;
     }
@@ -70,8 +69,7 @@ public final class NameAtlas implements AutoCloseable {
         return texts;
     }
 
-    private static void add(
-            NameText text, Records records, Named named, @Nullable Recorded record) {
+    private static void add(NameText text, Records records, Named named, @Nullable Recorded record) {
         if (record != null) {
             named.names(records, record).forEach(name -> text.add(record.id(), name));
         }

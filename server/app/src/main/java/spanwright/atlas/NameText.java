@@ -20,6 +20,7 @@ final class NameText {
     private int length;
     /** Where each name begins; one more for the end. */
     private int[] starts = new int[1 << 8];
+
     private int[] ids = new int[1 << 8];
     private int count;
 
@@ -93,7 +94,7 @@ final class NameText {
             return size == wanted ? Closeness.WHOLE : Closeness.BEGINNING;
         }
         byte before = text[at - 1];
-        boolean inWord = before >= 'a' && before <= 'z' || before >= '0' && before <= '9' || before < 0;
+        boolean inWord = (before >= 'a' && before <= 'z') || (before >= '0' && before <= '9') || before < 0;
         return inWord ? Closeness.WITHIN : Closeness.WORD;
     }
 }

@@ -50,20 +50,18 @@ public enum Named {
 
     /** The names of a record, as written. */
     Stream<String> names(Records records, Recorded record) {
-        Stream<String> names =
-                switch (this) {
-                    case CIRCUIT -> Stream.of(((Circuit) record).code());
-                    case CABLE -> Stream.of(((Cable) record).code(), ((Cable) record).partOf());
-                    case ENCLOSURE -> Stream.of(((Enclosure) record).code());
-                    case STRUCTURE -> Stream.of(((Structure) record).code());
-                    case PANEL -> Stream.of(within(records, ((Panel) record).enclosure(), ((Panel) record).code()));
-                    case SPLITTER -> Stream.of(
-                            within(records, ((Splitter) record).enclosure(), ((Splitter) record).code()));
-                    case SPAN -> Stream.of(((Span) record).code());
-                    case CUSTOMER -> Stream.of(((Circuit) record).customer());
-                    case PLACE -> Stream.of(((BaseFeature) record).name());
-                    case ADDRESS -> Stream.of(((Structure) record).address());
-                };
+        Stream<String> names = switch (this) {
+            case CIRCUIT -> Stream.of(((Circuit) record).code());
+            case CABLE -> Stream.of(((Cable) record).code(), ((Cable) record).partOf());
+            case ENCLOSURE -> Stream.of(((Enclosure) record).code());
+            case STRUCTURE -> Stream.of(((Structure) record).code());
+            case PANEL -> Stream.of(within(records, ((Panel) record).enclosure(), ((Panel) record).code()));
+            case SPLITTER -> Stream.of(within(records, ((Splitter) record).enclosure(), ((Splitter) record).code()));
+            case SPAN -> Stream.of(((Span) record).code());
+            case CUSTOMER -> Stream.of(((Circuit) record).customer());
+            case PLACE -> Stream.of(((BaseFeature) record).name());
+            case ADDRESS -> Stream.of(((Structure) record).address());
+        };
         return names.filter(Objects::nonNull);
     }
 

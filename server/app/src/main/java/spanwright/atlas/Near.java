@@ -4,6 +4,7 @@ import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.EnumMap;
 import java.util.EnumSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import java.util.concurrent.ExecutorService;
@@ -37,7 +38,6 @@ final class Near<T> implements AutoCloseable {
     private final ExecutorService background = Executors.newSingleThreadExecutor(task -> {
         Thread thread = new Thread(task, "atlas");
         thread.setDaemon(true);
-        thread.setPriority(Thread.MIN_PRIORITY);
         return thread;
     });
 
@@ -71,9 +71,8 @@ final class Near<T> implements AutoCloseable {
     }
 
     private @Nullable Found<T> nearest(Records asked) {
-        Made<T>[] all = all();
         Found<T> best = null;
-        for (Made<T> made : all) {
+        for (Made<T> made : all()) {
             Found<T> found = compare(made, asked);
             if (best == null || found.count < best.count) {
                 best = found;
@@ -82,10 +81,9 @@ final class Near<T> implements AutoCloseable {
         return best;
     }
 
-    @SuppressWarnings("unchecked")
-    private Made<T>[] all() {
+    private List<Made<T>> all() {
         synchronized (kept) {
-            return kept.toArray(new Made[0]);
+            return List.copyOf(kept);
         }
     }
 

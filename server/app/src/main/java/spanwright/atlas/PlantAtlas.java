@@ -63,11 +63,14 @@ public final class PlantAtlas implements AutoCloseable {
         Changed changed = new Changed();
         found.changed(RecordKind.SPAN).stream().forEach(changed::add);
         // A structure that moved takes the ends of its straight spans with it.
-        found.changed(RecordKind.STRUCTURE).stream().forEach(structure -> IntStream.of(
-                        records.owned(Relation.STRUCTURE_SPANS, structure))
-                .forEach(changed::add));
+        found.changed(RecordKind.STRUCTURE).stream()
+                .forEach(structure -> IntStream.of(records.owned(Relation.STRUCTURE_SPANS, structure))
+                        .forEach(changed::add));
         IntConsumer look = id -> {
-            if (records.spans().find(id).filter(span -> lies(records, span, box)).isPresent()) {
+            if (records.spans()
+                    .find(id)
+                    .filter(span -> lies(records, span, box))
+                    .isPresent()) {
                 into.add(id);
             }
         };
@@ -79,8 +82,7 @@ public final class PlantAtlas implements AutoCloseable {
         changed.stream().forEach(look);
     }
 
-    private static void structures(
-            Records records, Near.Found<Index> found, Box box, Weight weight, Gathered into) {
+    private static void structures(Records records, Near.Found<Index> found, Box box, Weight weight, Gathered into) {
         Changed changed = new Changed();
         found.changed(RecordKind.STRUCTURE).stream().forEach(changed::add);
         found.changed(RecordKind.ENCLOSURE).stream().forEach(enclosure -> {
@@ -99,7 +101,10 @@ public final class PlantAtlas implements AutoCloseable {
             }
         });
         changed.stream().forEach(id -> {
-            if (records.structures().find(id).filter(s -> Weight.of(records, s) == weight).isPresent()) {
+            if (records.structures()
+                    .find(id)
+                    .filter(s -> Weight.of(records, s) == weight)
+                    .isPresent()) {
                 look.accept(id);
             }
         });
@@ -168,8 +173,10 @@ public final class PlantAtlas implements AutoCloseable {
             for (Weight weight : Weight.values()) {
                 points.put(weight, new PackedTree.Builder(0));
             }
-            records.structures().list().forEach(structure -> points.get(Weight.of(records, structure))
-                    .add(structure.id(), Box.at(structure.position())));
+            records.structures()
+                    .list()
+                    .forEach(structure -> points.get(Weight.of(records, structure))
+                            .add(structure.id(), Box.at(structure.position())));
             points.forEach((weight, builder) -> structures.put(weight, builder.build()));
         }
 

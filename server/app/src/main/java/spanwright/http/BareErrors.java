@@ -2,7 +2,6 @@ package spanwright.http;
 
 import java.nio.ByteBuffer;
 import java.util.List;
-import org.eclipse.jetty.http.HttpFields;
 import org.eclipse.jetty.http.HttpHeader;
 import org.eclipse.jetty.server.Request;
 import org.eclipse.jetty.server.Response;
@@ -19,12 +18,6 @@ final class BareErrors extends ErrorHandler {
         response.getHeaders().put(HttpHeader.CONTENT_TYPE, Problem.CONTENT_TYPE);
         response.write(true, body(status), callback);
         return true;
-    }
-
-    @Override
-    public ByteBuffer badMessageError(int status, String reason, HttpFields.Mutable fields) {
-        fields.put(HttpHeader.CONTENT_TYPE, Problem.CONTENT_TYPE);
-        return body(status);
     }
 
     private static ByteBuffer body(int status) {

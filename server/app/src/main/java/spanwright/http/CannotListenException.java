@@ -9,7 +9,8 @@ public final class CannotListenException extends RuntimeException {
     private static final long serialVersionUID = 1;
 
     CannotListenException(String host, int port) {
-        super("Cannot listen at " + host + " port " + port
-                + ": another program has it, or the address is not this machine's. Name another with --port or --host.");
+        super(
+                "Cannot listen at " + host + " port " + port
+                        + ": another program has it, or the address is not this machine's. Name another with --port or --host.");
     }
 }

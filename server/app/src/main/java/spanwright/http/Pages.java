@@ -71,7 +71,9 @@ final class Pages {
 
     /** The sources of inline scripts that the start page may run: the SHA-256 of each, as a policy writes it. */
     String inlineScripts() {
-        return read(START).map(page -> inlineScripts(new String(page.bytes, StandardCharsets.UTF_8))).orElse("");
+        return read(START)
+                .map(page -> inlineScripts(new String(page.bytes, StandardCharsets.UTF_8)))
+                .orElse("");
     }
 
     static String inlineScripts(String html) {

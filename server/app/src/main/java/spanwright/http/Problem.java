@@ -96,9 +96,12 @@ record Problem(
                 json.text("parameter", parameter);
             }
             if (!faults.isEmpty()) {
-                json.list("faults", faults, (item, fault) -> item.whole("change", fault.change)
-                        .text("column", fault.column)
-                        .text("text", fault.text));
+                json.list(
+                        "faults",
+                        faults,
+                        (item, fault) -> item.whole("change", fault.change)
+                                .text("column", fault.column)
+                                .text("text", fault.text));
             }
         });
     }

@@ -13,7 +13,9 @@ final class Revalidation {
         ctx.header("ETag", tag);
         String held = ctx.header("If-None-Match");
         boolean same = held != null
-                && Arrays.stream(held.split(",")).map(String::strip).anyMatch(each -> each.equals("*") || weak(each).equals(weak(tag)));
+                && Arrays.stream(held.split(","))
+                        .map(String::strip)
+                        .anyMatch(each -> each.equals("*") || weak(each).equals(weak(tag)));
         if (same) {
             ctx.status(304);
         }

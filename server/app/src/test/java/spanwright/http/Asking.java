@@ -25,8 +25,8 @@ final class Asking {
     }
 
     HttpResponse<byte[]> post(String path, String body, String... headers) {
-        HttpRequest.Builder request = HttpRequest.newBuilder(base.resolve(path))
-                .POST(HttpRequest.BodyPublishers.ofString(body));
+        HttpRequest.Builder request =
+                HttpRequest.newBuilder(base.resolve(path)).POST(HttpRequest.BodyPublishers.ofString(body));
         return send(headers.length == 0 ? request : request.headers(headers));
     }
 

@@ -49,7 +49,8 @@ class WebServerTest {
 
         assertThat(answer.statusCode()).isEqualTo(404);
         assertThat(answer.headers().firstValue("Content-Type")).contains("application/problem+json");
-        assertThat(new String(answer.body(), UTF_8)).contains("\"code\":\"not_found\"", "\"instance\":\"/nothing/here\"");
+        assertThat(new String(answer.body(), UTF_8))
+                .contains("\"code\":\"not_found\"", "\"instance\":\"/nothing/here\"");
     }
 
     @Test
@@ -90,15 +91,16 @@ class WebServerTest {
         assertThat(answer.headers().firstValue("Content-Type")).contains("text/javascript; charset=utf-8");
         assertThat(answer.headers().firstValue("Cache-Control")).contains("public, max-age=31536000, immutable");
         String tag = answer.headers().firstValue("ETag").orElseThrow();
-        HttpResponse<byte[]> again =
-                asking.get("/webjars/leaflet/1.9.4/dist/leaflet-src.esm.js", "If-None-Match", tag);
+        HttpResponse<byte[]> again = asking.get("/webjars/leaflet/1.9.4/dist/leaflet-src.esm.js", "If-None-Match", tag);
         assertThat(again.statusCode()).isEqualTo(304);
         assertThat(again.body()).isEmpty();
     }
 
     @Test
     void large_answers_are_packed_for_who_can_unpack_them() {
-        assertThat(asking.get("/openapi.json", "Accept-Encoding", "gzip").headers().firstValue("Content-Encoding"))
+        assertThat(asking.get("/openapi.json", "Accept-Encoding", "gzip")
+                        .headers()
+                        .firstValue("Content-Encoding"))
                 .contains("gzip");
         assertThat(asking.get("/openapi.json").headers().firstValue("Content-Encoding"))
                 .isEmpty();
@@ -109,7 +111,8 @@ class WebServerTest {
         HttpResponse<byte[]> answer = asking.get("/openapi.json?as_off=3");
 
         assertThat(answer.statusCode()).isEqualTo(400);
-        assertThat(new String(answer.body(), UTF_8)).contains("There is no parameter as_off", "\"parameter\":\"as_off\"");
+        assertThat(new String(answer.body(), UTF_8))
+                .contains("There is no parameter as_off", "\"parameter\":\"as_off\"");
     }
 
     @Test
