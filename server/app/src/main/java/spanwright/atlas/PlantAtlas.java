@@ -1,9 +1,8 @@
 package spanwright.atlas;
 
 import java.util.Arrays;
-import java.util.EnumMap;
 import java.util.EnumSet;
-import java.util.Map;
+import java.util.List;
 import java.util.OptionalInt;
 import java.util.Set;
 import java.util.function.IntConsumer;
@@ -95,7 +94,7 @@ public final class PlantAtlas implements AutoCloseable {
                 into.add(id);
             }
         };
-        found.index().structures.get(weight).within(box, id -> {
+        found.index().structures(weight).within(box, id -> {
             if (!changed.contains(id)) {
                 look.accept(id);
             }
@@ -143,20 +142,42 @@ public final class PlantAtlas implements AutoCloseable {
         near.close();
     }
 
-    /**
-     * What lies in a box, by identity.
-     *
-     * @param spans spans, in no order
-     * @param structures structures, the weightiest first
-     * @param all false where some were left out
-     */
-    public record Found(int[] spans, int[] structures, boolean all) {}
+    /** What lies in a box, by identity. */
+    public static final class Found {
+
+        private final int[] spans;
+        private final int[] structures;
+        private final boolean all;
+
+        private Found(int[] spans, int[] structures, boolean all) {
+            this.spans = spans;
+            this.structures = structures;
+            this.all = all;
+        }
+
+        /** Spans, in no order. */
+        public IntStream spans() {
+            return IntStream.of(spans);
+        }
+
+        /** Structures, the weightiest first. */
+        public IntStream structures() {
+            return IntStream.of(structures);
+        }
+
+        /** False where some were left out. */
+        public boolean all() {
+            return all;
+        }
+    }
 
     /** The trees of one state. */
     private static final class Index {
 
         private final PackedTree spans;
-        private final Map<Weight, PackedTree> structures = new EnumMap<>(Weight.class);
+        /** By weight. */
+        private final List<PackedTree> structures;
+
         private final Records of;
 
         Index(Records records) {
@@ -169,15 +190,17 @@ public final class PlantAtlas implements AutoCloseable {
                 }
             });
             spans = lines.build();
-            Map<Weight, PackedTree.Builder> points = new EnumMap<>(Weight.class);
-            for (Weight weight : Weight.values()) {
-                points.put(weight, new PackedTree.Builder(0));
-            }
-            records.structures()
-                    .list()
-                    .forEach(structure -> points.get(Weight.of(records, structure))
-                            .add(structure.id(), Box.at(structure.position())));
-            points.forEach((weight, builder) -> structures.put(weight, builder.build()));
+            List<PackedTree.Builder> points = Arrays.stream(Weight.values())
+                    .map(weight -> new PackedTree.Builder(0))
+                    .toList();
+            records.structures().list().forEach(structure -> points.get(
+                            Weight.of(records, structure).ordinal())
+                    .add(structure.id(), Box.at(structure.position())));
+            structures = points.stream().map(PackedTree.Builder::build).toList();
+        }
+
+        PackedTree structures(Weight weight) {
+            return structures.get(weight.ordinal());
         }
 
         OptionalInt structureOf(int enclosure) {

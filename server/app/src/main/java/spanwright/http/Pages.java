@@ -61,7 +61,7 @@ final class Pages {
             }
             byte[] bytes = in.readAllBytes();
             String type = TYPES.get(file.substring(file.lastIndexOf('.') + 1));
-            Optional<Page> page = Optional.of(new Page(bytes, String.valueOf(type), tag(bytes)));
+            Optional<Page> page = Optional.of(new Page(bytes, String.valueOf(type)));
             pages.put(file, page);
             return page;
         } catch (IOException unreadable) {
@@ -99,7 +99,17 @@ final class Pages {
     }
 
     /** One file. */
-    private record Page(byte[] bytes, String type, String tag) {
+    private static final class Page {
+
+        private final byte[] bytes;
+        private final String type;
+        private final String tag;
+
+        Page(byte[] bytes, String type) {
+            this.bytes = bytes;
+            this.type = type;
+            this.tag = tag(bytes);
+        }
 
         void answer(Context ctx, boolean library) {
             // A library's address holds its version, so what stands there never changes.

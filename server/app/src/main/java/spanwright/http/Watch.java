@@ -2,10 +2,9 @@ package spanwright.http;
 
 import java.time.Duration;
 import java.util.Map;
+import java.util.Timer;
+import java.util.TimerTask;
 import java.util.concurrent.ConcurrentHashMap;
-import java.util.concurrent.Executors;
-import java.util.concurrent.ScheduledExecutorService;
-import java.util.concurrent.TimeUnit;
 
 /**
  * Stops answers that take too long: their thread is interrupted, which every answer notices at its next object.
@@ -16,16 +15,20 @@ final class Watch implements AutoCloseable {
 
     private final long limitNanos;
     private final Map<Thread, Long> begun = new ConcurrentHashMap<>();
-    private final ScheduledExecutorService clock = Executors.newSingleThreadScheduledExecutor(task -> {
-        Thread thread = new Thread(task, "time-limit");
-        thread.setDaemon(true);
-        return thread;
-    });
+    private final Timer clock = new Timer("time-limit", true);
 
     Watch(Duration limit) {
         this.limitNanos = limit.toNanos();
         long every = Math.max(5, Math.min(500, limit.toMillis() / 4));
-        clock.scheduleWithFixedDelay(this::stopLate, every, every, TimeUnit.MILLISECONDS);
+        clock.schedule(
+                new TimerTask() {
+                    @Override
+                    public void run() {
+                        stopLate();
+                    }
+                },
+                every,
+                every);
     }
 
     /** The answer of the calling thread begins. */
@@ -54,6 +57,6 @@ final class Watch implements AutoCloseable {
 
     @Override
     public void close() {
-        clock.shutdownNow();
+        clock.cancel();
     }
 }

@@ -67,12 +67,12 @@ class PlantAtlasTest {
         PlantAtlas.Found found = atlas.within(records, ALL, 10, 1_000, 1_000);
 
         assertThat(found.all()).isFalse();
-        assertThat(IntStream.of(found.structures())
+        assertThat(found.structures()
                         .mapToObj(records.structures()::get)
                         .map(Structure::type))
                 .isNotEmpty()
                 .allSatisfy(type -> assertThat(type.word()).isIn("building", "hut", "vault", "cabinet"));
-        assertThat(found.spans()).hasSize(199);
+        assertThat(found.spans().count()).isEqualTo(199);
     }
 
     @Test
@@ -82,9 +82,9 @@ class PlantAtlasTest {
         PlantAtlas.Found found = atlas.within(records, ALL, 18, 10, 20);
 
         assertThat(found.all()).isFalse();
-        assertThat(found.structures()).hasSize(10);
-        assertThat(found.spans()).hasSize(20);
-        assertThat(IntStream.of(found.structures()).mapToObj(records.structures()::get))
+        assertThat(found.structures().count()).isEqualTo(10);
+        assertThat(found.spans().count()).isEqualTo(20);
+        assertThat(found.structures().mapToObj(records.structures()::get))
                 .allSatisfy(
                         structure -> assertThat(Weight.of(records, structure)).isEqualTo(Weight.LARGE));
     }
@@ -116,8 +116,8 @@ class PlantAtlasTest {
         return new Box(west, south, west + 0.05, south + 0.05);
     }
 
-    private static Set<Integer> ids(int[] ids) {
-        return IntStream.of(ids).boxed().collect(Collectors.toCollection(TreeSet::new));
+    private static Set<Integer> ids(IntStream ids) {
+        return ids.boxed().collect(Collectors.toCollection(TreeSet::new));
     }
 
     private static Set<Integer> structures(Records records, Box box) {
