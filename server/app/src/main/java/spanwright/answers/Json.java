@@ -157,8 +157,7 @@ public final class Json {
             return none(name);
         }
         name(name);
-        BigDecimal plain = value.stripTrailingZeros();
-        return put(() -> out.writeNumber(plain.toPlainString()));
+        return numberHere(value);
     }
 
     /** Members {@code lon} and {@code lat} in degrees. */
@@ -190,6 +189,12 @@ public final class Json {
     /** An item of a list: a text. */
     public Json textHere(String value) {
         return put(() -> out.writeString(value));
+    }
+
+    /** An item of a list: a number as it is, without an exponent. */
+    public Json numberHere(BigDecimal value) {
+        BigDecimal plain = value.stripTrailingZeros();
+        return put(() -> out.writeNumber(plain.toPlainString()));
     }
 
     /** An item of a list: degrees, to 9 decimals (a tenth of a millimetre). */
@@ -233,8 +238,9 @@ public final class Json {
         return put(() -> out.writeNumber(digits, from, digits.length - from));
     }
 
-    private void name(String name) {
-        put(() -> out.writeFieldName(name));
+    /** A member's name, before what an item of a list would be. */
+    Json name(String name) {
+        return put(() -> out.writeFieldName(name));
     }
 
     private Json put(Step step) {

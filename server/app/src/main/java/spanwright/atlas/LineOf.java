@@ -25,12 +25,17 @@ public final class LineOf {
                         records.structures().get(span.to()).position());
     }
 
+    /** How many degrees a pixel is wide at a zoom. */
+    public static double pixel(double zoom) {
+        return DEGREES_PER_PIXEL / Math.pow(2, zoom);
+    }
+
     /** The positions that can be told apart at a zoom: those nearer than a pixel to the one kept before are left out. */
     public static List<Position> thinned(List<Position> positions, double zoom) {
         if (positions.size() == 2) {
             return positions;
         }
-        double pixel = DEGREES_PER_PIXEL / Math.pow(2, zoom);
+        double pixel = pixel(zoom);
         List<Position> kept = new ArrayList<>();
         Position last = positions.get(0);
         kept.add(last);

@@ -193,9 +193,11 @@ public final class PlantAtlas implements AutoCloseable {
             List<PackedTree.Builder> points = Arrays.stream(Weight.values())
                     .map(weight -> new PackedTree.Builder(0))
                     .toList();
-            records.structures().list().forEach(structure -> points.get(
-                            Weight.of(records, structure).ordinal())
-                    .add(structure.id(), Box.at(structure.position())));
+            records.structures()
+                    .list()
+                    .forEach(structure -> points.get(
+                                    Weight.of(records, structure).ordinal())
+                            .add(structure.id(), Box.at(structure.position())));
             structures = points.stream().map(PackedTree.Builder::build).toList();
         }
 

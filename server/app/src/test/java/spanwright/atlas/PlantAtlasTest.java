@@ -67,9 +67,7 @@ class PlantAtlasTest {
         PlantAtlas.Found found = atlas.within(records, ALL, 10, 1_000, 1_000);
 
         assertThat(found.all()).isFalse();
-        assertThat(found.structures()
-                        .mapToObj(records.structures()::get)
-                        .map(Structure::type))
+        assertThat(found.structures().mapToObj(records.structures()::get).map(Structure::type))
                 .isNotEmpty()
                 .allSatisfy(type -> assertThat(type.word()).isIn("building", "hut", "vault", "cabinet"));
         assertThat(found.spans().count()).isEqualTo(199);

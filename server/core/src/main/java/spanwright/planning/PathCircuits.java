@@ -99,8 +99,7 @@ public final class PathCircuits {
     }
 
     private List<Landing> landings(long port) {
-        return onPanel
-                .computeIfAbsent(EndKey.owner(port), this::landingsOn)
+        return onPanel.computeIfAbsent(EndKey.owner(port), this::landingsOn)
                 .getOrDefault(EndKey.number(port), List.of());
     }
 
@@ -119,9 +118,14 @@ public final class PathCircuits {
     private static void land(
             Map<Integer, List<Landing>> byPort, int panel, Circuit circuit, PortRange near, PortRange far) {
         if (near.panel() == panel) {
-            IntStream.range(0, near.ports().count()).forEach(index -> byPort.computeIfAbsent(
-                            near.ports().at(index), port -> new ArrayList<>())
-                    .add(new Landing(circuit, EndKey.of(LegKind.FRONT, far.panel(), far.ports().at(index)))));
+            IntStream.range(0, near.ports().count())
+                    .forEach(index -> byPort.computeIfAbsent(near.ports().at(index), port -> new ArrayList<>())
+                            .add(new Landing(
+                                    circuit,
+                                    EndKey.of(
+                                            LegKind.FRONT,
+                                            far.panel(),
+                                            far.ports().at(index)))));
         }
     }
 

@@ -4,18 +4,13 @@ import java.time.LocalDate;
 import java.util.HashMap;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
-import spanwright.network.Block;
 import spanwright.network.BlockKind;
 import spanwright.network.Network;
 import spanwright.network.PathIndex;
 import spanwright.network.Snapshot;
-import spanwright.plant.CableType;
-import spanwright.plant.FiberRange;
-import spanwright.plant.Pass;
 import spanwright.plant.Trust;
 import spanwright.records.Records;
 import spanwright.splicing.EndCondition;
-import spanwright.splicing.EndKey;
 import spanwright.splicing.EndState;
 import spanwright.splicing.Joint;
 import spanwright.splicing.JointKind;
@@ -56,7 +51,8 @@ final class PathTrusts {
             long key = network.keyOf(end);
             EndState state = states.find(key);
             if (state != null) {
-                tally.add(state.condition() == EndCondition.UNKNOWN ? Trust.UNKNOWN : state.trust(), state.verifiedOn());
+                tally.add(
+                        state.condition() == EndCondition.UNKNOWN ? Trust.UNKNOWN : state.trust(), state.verifiedOn());
             } else if (network.peer(end) == Network.NONE || states.isTubeOpened(key)) {
                 tally.add(Trust.UNKNOWN, null);
             }
