@@ -1,4 +1,18 @@
 package spanwright.http;
 
-/** What the routes answer from. */
-public record Api() {}
+import spanwright.answers.Changes;
+import spanwright.answers.RowTexts;
+import spanwright.answers.Views;
+
+/**
+ * What the routes answer from.
+ *
+ * @param views the records, now and as of and as if
+ * @param finder by which posting a record was last changed
+ * @param rows writes records as rows
+ * @param desk takes postings
+ * @param version version of the program
+ * @param demo whether these are the records of the demo
+ */
+public record Api(
+        Views views, Changes.Finder finder, RowTexts rows, PostingDesk desk, String version, boolean demo) {}

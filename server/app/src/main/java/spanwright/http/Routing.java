@@ -6,33 +6,47 @@ import io.javalin.router.JavalinDefaultRoutingApi;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
-import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
 import spanwright.answers.Json;
 
 /** Every route of {@code schema/openapi.json}, in its order. */
 final class Routing {
 
-    private static final String JSON = "application/json";
-
     private final JavalinDefaultRoutingApi routes;
-    private final Guard guard;
     private final UnaryOperator<Handler> timed;
 
-    Routing(JavalinDefaultRoutingApi routes, Guard guard, UnaryOperator<Handler> timed) {
+    Routing(JavalinDefaultRoutingApi routes, UnaryOperator<Handler> timed) {
         this.routes = routes;
-        this.guard = guard;
         this.timed = timed;
     }
 
-    void add(Api api) {
-        routes.get("/openapi.json", Routing::openApi);
-        routes.get("/health", ctx -> json(ctx, json -> json.text("status", "ok")));
+    void add(Api api, Guard guard, Answering answering, ServerOptions options) {
+        PlantRoutes plant = new PlantRoutes(api, answering, options.tile());
+        get("/status", plant::status);
+        get("/find", plant::find);
+        get("/map/plant", plant::mapPlant);
+        get("/map/base", plant::mapBase);
+        get("/structures/{code}", plant::structure);
+        get("/spans/{code}", plant::span);
+        get("/enclosures/{code}", plant::enclosure);
+        get("/cables/{code}", plant::cable);
+        get("/circuits", plant::circuits);
+        get("/circuits/{code}", plant::circuit);
+        get("/trace", new TraceRoute(answering)::trace);
+        JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
+        get("/postings", journal::list);
+        // A posting is never stopped half way: who sent it would not know whether it was kept.
+        routes.post("/postings", journal::post);
+        get("/postings/{id}", journal::one);
+        get("/openapi.json", Routing::openApi);
+        get("/health", ctx -> {
+            new Question(ctx);
+            Answering.json(ctx, Json.bytes(json -> json.text("status", "ok")));
+        });
     }
 
-    /** Answers with a JSON document. */
-    static void json(Context ctx, Consumer<Json> body) {
-        ctx.contentType(JSON).result(Json.bytes(body));
+    private void get(String path, Handler handler) {
+        routes.get(path, timed.apply(handler));
     }
 
     private static void openApi(Context ctx) {
@@ -41,7 +55,7 @@ final class Routing {
             if (in == null) {
                 throw new IllegalStateException("the program was packed without its interface");
             }
-            ctx.header("Cache-Control", "no-cache").contentType(JSON).result(in.readAllBytes());
+            Answering.json(ctx, in.readAllBytes());
         } catch (IOException unreadable) {
             throw new UncheckedIOException(unreadable);
         }

@@ -36,11 +36,12 @@ public final class WebServer implements AutoCloseable {
     private final Javalin javalin;
 
     private WebServer(ServerOptions options, Api api) {
+        Answering answering = new Answering(api.views(), api.finder());
         this.options = options;
         this.guard = new Guard(options.host());
         this.watch = new Watch(options.timeLimit());
         this.headers = new SafeHeaders(pages.inlineScripts(), options.tile());
-        this.javalin = Javalin.create(config -> configure(config, api));
+        this.javalin = Javalin.create(config -> configure(config, api, answering));
     }
 
     /**
@@ -76,7 +77,7 @@ public final class WebServer implements AutoCloseable {
         watch.close();
     }
 
-    private void configure(JavalinConfig config, Api api) {
+    private void configure(JavalinConfig config, Api api, Answering answering) {
         config.startup.showJavalinBanner = false;
         config.startup.showOldJavalinVersionWarning = false;
         config.startup.startupWatcherEnabled = false;
@@ -93,7 +94,7 @@ public final class WebServer implements AutoCloseable {
             headers.write(ctx);
             guard.checkAny(ctx);
         });
-        new Routing(config.routes, guard, this::timed).add(api);
+        new Routing(config.routes, this::timed).add(api, guard, answering, options);
         config.routes.get("/", this::page);
         config.routes.get("/<path>", this::page);
         config.router.javaLangErrorHandler((response, error) -> {

@@ -1,0 +1,37 @@
+package spanwright.cli;
+
+import java.nio.file.Path;
+import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Option;
+import spanwright.answers.View;
+import spanwright.answers.Views;
+import spanwright.network.Ledger;
+
+/** What every command that answers takes. */
+final class ViewOptions {
+
+    @Option(names = "--records", required = true, paramLabel = "FILE", description = "The records file.")
+    private Path records;
+
+    @Option(
+            names = "--as-of",
+            paramLabel = "POSTING|TIME",
+            description = "Answer from the records as they stood: a posting's number, that posting included, or a time"
+                    + " such as 2026-03-31T14:05-05:00; without an offset it is in the records' own zone,"
+                    + " and a date lasts through that day.")
+    private @Nullable String asOf;
+
+    @Option(
+            names = "--as-if",
+            paramLabel = "JOB",
+            description = "Answer as if the planned joints of this job were built.")
+    private @Nullable String asIf;
+
+    /** Answers from the view that is asked for. */
+    <T> T answer(Program program, Function<View, T> answer) {
+        try (Ledger ledger = program.open(records)) {
+            return answer.apply(new Views(ledger).of(asOf, asIf));
+        }
+    }
+}

@@ -1,0 +1,92 @@
+package spanwright.http;
+
+import io.javalin.http.Context;
+import java.io.IOException;
+import java.io.InputStream;
+import java.util.List;
+import java.util.Locale;
+import org.jspecify.annotations.Nullable;
+import spanwright.answers.Json;
+import spanwright.answers.PostingDocuments;
+import spanwright.answers.View;
+import spanwright.http.PostingDesk.Result;
+import spanwright.journal.Posting;
+
+/** Postings: what was posted, and the one way to post. */
+final class JournalRoutes {
+
+    private static final int MOST_POSTINGS = 200;
+    private static final int MOST_CHANGES = 1_000;
+    private static final int FIRST_CHANGES = 200;
+    private static final int LARGEST_NUMBER = 999_999_999;
+
+    private final Answering answering;
+    private final PostingDocuments documents;
+    private final PostingDesk desk;
+    private final Guard guard;
+    private final int largestBody;
+
+    JournalRoutes(Api api, Answering answering, Guard guard, int largestBody) {
+        this.answering = answering;
+        this.documents = new PostingDocuments(api.views(), api.rows());
+        this.desk = api.desk();
+        this.guard = guard;
+        this.largestBody = largestBody;
+    }
+
+    void list(Context ctx) {
+        Question question = new Question(ctx, "limit", "before", Answering.AS_OF);
+        int limit = question.whole("limit", 1, MOST_POSTINGS, 50);
+        View view = answering.views().of(question.text(Answering.AS_OF), null);
+        int before = question.whole("before", 1, LARGEST_NUMBER, LARGEST_NUMBER);
+        answering.answer(
+                ctx, view, (json, of) -> documents.list(json, Math.min(before, of.posting() + 1), limit));
+    }
+
+    void one(Context ctx) {
+        Question question = new Question(ctx, "from_change", "limit");
+        int number = question.wholeStep("id", 1, LARGEST_NUMBER);
+        int from = question.whole("from_change", 0, LARGEST_NUMBER, 0);
+        int limit = question.whole("limit", 1, MOST_CHANGES, FIRST_CHANGES);
+        Posting posting = answering.views()
+                .ledger()
+                .findPosting(number)
+                .orElseThrow(() -> new ProblemException(Problem.notFound("There is no posting " + number + ".")));
+        Answering.json(ctx, Json.bytes(json -> documents.one(json, posting, from, limit)));
+    }
+
+    void post(Context ctx) {
+        guard.checkPosting(ctx);
+        new Question(ctx);
+        if (!isJson(ctx.contentType())) {
+            throw new ProblemException(Problem.unsupported("A posting is sent as application/json."));
+        }
+        PostingBody body = PostingBody.read(body(ctx));
+        Result result = desk.post(body.by(), body.reason(), body.changes());
+        if (result instanceof Result.Refused refused) {
+            throw new ProblemException(Problem.refused(refused.faults().stream()
+                    .map(fault -> new Problem.Fault(fault.change(), fault.column(), fault.text()))
+                    .toList()));
+        }
+        Posting posting = ((Result.Posted) result).posting();
+        ctx.status(201).header("Location", "/postings/" + posting.number());
+        Answering.json(ctx, Json.bytes(json -> documents.one(json, posting, 0, FIRST_CHANGES)));
+    }
+
+    private static boolean isJson(@Nullable String type) {
+        return type != null && List.of(type.toLowerCase(Locale.ROOT).split(";")).get(0).strip().equals("application/json");
+    }
+
+    private byte[] body(Context ctx) {
+        try (InputStream in = ctx.req().getInputStream()) {
+            byte[] body = in.readNBytes(largestBody + 1);
+            if (body.length > largestBody) {
+                throw new ProblemException(
+                        Problem.tooLarge("A posting is " + largestBody + " bytes long at most; post it in parts."));
+            }
+            return body;
+        } catch (IOException broken) {
+            throw new ProblemException(Problem.badRequest("The body ended before its end.", null));
+        }
+    }
+}
