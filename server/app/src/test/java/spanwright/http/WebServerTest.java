@@ -14,12 +14,13 @@ import org.junit.jupiter.api.Test;
 
 class WebServerTest {
 
-    private final WebServer server = WebServer.start(ServerOptions.at("127.0.0.1", 0), new Api());
-    private final Asking asking = new Asking(server.address());
+    private final TestServer test = new TestServer();
+    private final WebServer server = test.server();
+    private final Asking asking = test.asking();
 
     @AfterEach
     void stop() {
-        server.close();
+        test.close();
     }
 
     @Test
@@ -119,7 +120,7 @@ class WebServerTest {
     void a_port_that_is_taken_is_said_to_be_taken() {
         ServerOptions taken = ServerOptions.at("127.0.0.1", server.address().getPort());
 
-        assertThatThrownBy(() -> WebServer.start(taken, new Api()))
+        assertThatThrownBy(() -> new TestServer(taken).server())
                 .isInstanceOf(CannotListenException.class)
                 .hasMessageContaining("another program has it");
     }

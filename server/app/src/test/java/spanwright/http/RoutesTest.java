@@ -1,0 +1,184 @@
+package spanwright.http;
+
+import static java.nio.charset.StandardCharsets.UTF_8;
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.net.URLEncoder;
+import java.util.List;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+import spanwright.network.Ledger;
+import spanwright.plant.Cable;
+import spanwright.plant.Enclosure;
+import spanwright.plant.Span;
+import spanwright.plant.Structure;
+import spanwright.records.Records;
+
+/** Every route over real HTTP, on random plants, held to the OpenAPI document. */
+class RoutesTest {
+
+    private static final OpenApi OPEN_API = new OpenApi();
+
+    private final TestServer server = new TestServer();
+
+    @AfterEach
+    void stop() {
+        server.close();
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {1, 2, 3, 4, 5, 6, 7, 8})
+    void everything_in_a_plant_is_answered_as_described(long seed) {
+        Ledger ledger = server.plant(seed);
+        Records records = ledger.current().records();
+        for (Structure structure : records.structures().list().toList()) {
+            get("/structures/{code}", "/structures/" + structure.code());
+        }
+        for (Span span : records.spans().list().toList()) {
+            get("/spans/{code}", "/spans/" + span.code());
+        }
+        for (Enclosure enclosure : records.enclosures().list().toList()) {
+            get("/enclosures/{code}", "/enclosures/" + enclosure.code());
+        }
+        for (Cable cable : records.cables().list().toList()) {
+            get("/cables/{code}", "/cables/" + cable.code());
+        }
+        records.circuits().list().forEach(circuit -> get("/circuits/{code}", "/circuits/" + circuit.code()));
+        for (String job : records.plannedJobs()) {
+            records.enclosures().list().limit(5).forEach(enclosure ->
+                    get("/enclosures/{code}", "/enclosures/" + enclosure.code() + "?as_if=" + encoded(job)));
+        }
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {11, 12, 13})
+    void the_map_the_lists_and_finding_are_answered_as_described(long seed) {
+        Records records = server.plant(seed).current().records();
+
+        JsonNode status = get("/status", "/status");
+        assertThat(status.at("/counts/structures").asInt())
+                .isEqualTo(records.structures().count());
+        JsonNode map = get("/map/plant", "/map/plant?west=-180&south=-90&east=180&north=90&zoom=18");
+        assertThat(map.path("features").size())
+                .isGreaterThanOrEqualTo(records.structures().count());
+        get("/map/plant", "/map/plant?west=-180&south=-90&east=180&north=90&zoom=2.5");
+        get("/map/base", "/map/base?west=-180&south=-90&east=180&north=90&zoom=10");
+        JsonNode circuits = get("/circuits", "/circuits?limit=1");
+        assertThat(circuits.path("total").asInt()).isEqualTo(records.circuits().count());
+        get("/postings", "/postings");
+        get("/health", "/health");
+        get("/openapi.json", "/openapi.json");
+        Stream.of("a", "1", "-", records.structures().list().findFirst().orElseThrow().code())
+                .forEach(typed -> get("/find", "/find?q=" + encoded(typed)));
+    }
+
+    @Test
+    void pages_of_circuits_hold_each_circuit_once() {
+        Records records = server.plant(4).current().records();
+        Set<String> seen = new TreeSet<>();
+        String after = "";
+        do {
+            JsonNode page = get("/circuits", "/circuits?limit=2&after=" + encoded(after));
+            page.path("circuits").forEach(circuit -> assertThat(seen.add(circuit.path("circuit").asText()))
+                    .isTrue());
+            after = page.path("next").isNull() ? null : page.path("next").asText();
+        } while (after != null);
+
+        assertThat(seen).hasSize(records.circuits().count());
+    }
+
+    @Test
+    void what_is_not_there_is_said_with_what_was_probably_meant() {
+        Records records = server.plant(5).current().records();
+        String code = records.structures().list().findFirst().orElseThrow().code();
+
+        JsonNode problem = problem("/structures/{code}", "/structures/" + code + "x", 404);
+
+        assertThat(problem.path("code").asText()).isEqualTo("not_found");
+        assertThat(problem.path("detail").asText()).isEqualTo("There is no structure " + code + "x. Is " + code + " meant?");
+        for (String kind : List.of("spans", "enclosures", "cables", "circuits")) {
+            problem("/" + kind + "/{code}", "/" + kind + "/no-such-thing-at-all", 404);
+        }
+        problem("/postings/{id}", "/postings/99", 404);
+    }
+
+    @Test
+    void what_is_asked_wrongly_is_said_to_be_wrong() {
+        server.plant(6);
+        assertThat(problem("/find", "/find", 400).path("parameter").asText()).isEqualTo("q");
+        assertThat(problem("/find", "/find?q=a&limit=0", 400).path("parameter").asText()).isEqualTo("limit");
+        assertThat(problem("/find", "/find?q=a&q=b", 400).path("parameter").asText()).isEqualTo("q");
+        assertThat(problem("/find", "/find?q=" + "a".repeat(201), 400).path("parameter").asText()).isEqualTo("q");
+        assertThat(problem("/map/plant", "/map/plant?west=1&south=0&east=0&north=1&zoom=3", 400)
+                        .path("parameter")
+                        .asText())
+                .isEqualTo("east");
+        assertThat(problem("/map/plant", "/map/plant?west=0&south=1&east=0&north=0&zoom=3", 400)
+                        .path("parameter")
+                        .asText())
+                .isEqualTo("north");
+        assertThat(problem("/map/plant", "/map/plant?west=x&south=0&east=0&north=1&zoom=3", 400)
+                        .path("parameter")
+                        .asText())
+                .isEqualTo("west");
+        assertThat(problem("/map/plant", "/map/plant?west=0&south=0&east=0&north=1&zoom=99", 400)
+                        .path("parameter")
+                        .asText())
+                .isEqualTo("zoom");
+        assertThat(problem("/status", "/status?as_of=tomorrow", 400).path("parameter").asText())
+                .isEqualTo("as_of");
+        assertThat(problem("/status", "/status?as_of=99", 404).path("code").asText()).isEqualTo("bad_reference");
+        assertThat(problem("/status", "/status?as_if=no-such-job", 404).path("parameter").asText())
+                .isEqualTo("as_if");
+        problem("/postings/{id}", "/postings/x", 400);
+        problem("/circuits", "/circuits?prefix=" + "a".repeat(201), 400);
+    }
+
+    @Test
+    void who_holds_an_answer_is_told_so_until_something_is_posted() {
+        Ledger ledger = server.plant(7);
+        String tag = server.asking().get("/status").headers().firstValue("ETag").orElseThrow();
+
+        assertThat(server.asking().get("/status", "If-None-Match", tag).statusCode()).isEqualTo(304);
+        assertThat(server.asking().get("/status", "If-None-Match", "\"other\", " + tag).statusCode())
+                .isEqualTo(304);
+        server.rename(ledger, "Another Owner");
+        assertThat(server.asking().get("/status", "If-None-Match", tag).statusCode()).isEqualTo(200);
+    }
+
+    @Test
+    void a_past_posting_answers_as_it_did() {
+        Ledger ledger = server.plant(8);
+        server.rename(ledger, "First Owner");
+        int first = ledger.current().records().posting();
+        server.rename(ledger, "Second Owner");
+
+        assertThat(get("/status", "/status").path("owner").asText()).isEqualTo("Second Owner");
+        assertThat(get("/status", "/status?as_of=" + first).path("owner").asText()).isEqualTo("First Owner");
+        assertThat(get("/status", "/status?as_of=2001-01-01").path("owner").isNull()).isTrue();
+        assertThat(get("/status", "/status?as_of=2099-01-01T00:00").path("owner").asText())
+                .isEqualTo("Second Owner");
+    }
+
+    private JsonNode get(String path, String address) {
+        var answer = server.asking().get(address);
+        assertThat(answer.statusCode()).as("%s %s", address, new String(answer.body(), UTF_8)).isEqualTo(200);
+        return OPEN_API.check("GET", path, answer);
+    }
+
+    private JsonNode problem(String path, String address, int status) {
+        var answer = server.asking().get(address);
+        assertThat(answer.statusCode()).as("%s %s", address, new String(answer.body(), UTF_8)).isEqualTo(status);
+        return OPEN_API.check("GET", path, answer);
+    }
+
+    private static String encoded(String text) {
+        return URLEncoder.encode(text, UTF_8);
+    }
+}

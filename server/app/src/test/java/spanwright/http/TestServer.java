@@ -1,0 +1,125 @@
+package spanwright.http;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.time.Clock;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import spanwright.answers.LastChanges;
+import spanwright.answers.RowTexts;
+import spanwright.answers.Views;
+import spanwright.journal.Change;
+import spanwright.journal.RecordKind;
+import spanwright.journal.Recorded;
+import spanwright.network.Ledger;
+import spanwright.network.MemoryLedger;
+import spanwright.network.Outcome;
+import spanwright.network.SnapshotEditor;
+import spanwright.plant.Setting;
+import spanwright.plants.RandomPlant;
+import spanwright.records.Records;
+import spanwright.records.Refusal;
+
+/** A real server on any free port, over a ledger in memory. */
+final class TestServer implements AutoCloseable {
+
+    private final Ledger ledger = new MemoryLedger(Clock.systemUTC());
+    private final ServerOptions options;
+    private WebServer server;
+
+    TestServer() {
+        this(ServerOptions.at("127.0.0.1", 0));
+    }
+
+    TestServer(ServerOptions options) {
+        this.options = options;
+    }
+
+    /** Posts a random plant, as if read from a trusted store. */
+    Ledger plant(long seed) {
+        RandomPlant plant = RandomPlant.of(seed);
+        post(editor -> {
+            plant.changes().forEach(editor::replay);
+            return List.of();
+        });
+        return ledger;
+    }
+
+    void rename(Ledger ledger, String owner) {
+        post(editor -> {
+            Optional<Setting> before = editor.records().settings().find("owner");
+            int id = before.map(Setting::id).orElseGet(() -> editor.records().newIdentity(RecordKind.SETTING));
+            Setting after = new Setting(id, "owner", owner);
+            return editor.apply(before.isPresent() ? Change.replace(before.get(), after) : Change.add(after));
+        });
+    }
+
+    void post(Ledger.Entry entry) {
+        assertThat(ledger.post("A. Marsh", "Sheet 0412", entry)).isInstanceOf(Outcome.Posted.class);
+    }
+
+    Ledger ledger() {
+        return ledger;
+    }
+
+    WebServer server() {
+        if (server == null) {
+            server = WebServer.start(options, api(ledger));
+        }
+        return server;
+    }
+
+    Asking asking() {
+        return new Asking(server().address());
+    }
+
+    private static Api api(Ledger ledger) {
+        return new Api(new Views(ledger), new LastChanges(ledger), new PlainRows(), new SettingsDesk(ledger), "0.1.0", false);
+    }
+
+    @Override
+    public void close() {
+        if (server != null) {
+            server.close();
+        }
+        ledger.close();
+    }
+
+    /** Rows of settings are written out, others by their table's name alone. */
+    private static final class PlainRows implements RowTexts {
+
+        @Override
+        public RowText of(Records records, Recorded record) {
+            return record instanceof Setting setting
+                    ? new RowText("settings", setting.name(), Map.of("name", setting.name(), "value", setting.value()))
+                    : new RowText("structures", null, Map.of());
+        }
+    }
+
+    /** Takes changes of settings. */
+    private record SettingsDesk(Ledger ledger) implements PostingDesk {
+
+        @Override
+        public Result post(String by, String reason, List<RowChange> changes) {
+            Outcome outcome = ledger.post(by, reason, editor -> enter(editor, changes));
+            return outcome instanceof Outcome.Posted posted
+                    ? new Result.Posted(posted.posting())
+                    : new Result.Refused(((Outcome.Refused) outcome)
+                            .refusals().stream()
+                                    .map(refusal -> new RowFault(0, refusal.column(), refusal.sentence()))
+                                    .toList());
+        }
+
+        private static List<Refusal> enter(SnapshotEditor editor, List<RowChange> changes) {
+            return changes.stream()
+                    .flatMap(change -> editor
+                            .apply(Change.add(new Setting(
+                                    editor.records().newIdentity(RecordKind.SETTING),
+                                    String.valueOf(change.row().get("name")),
+                                    String.valueOf(change.row().get("value")))))
+                            .stream())
+                    .toList();
+        }
+    }
+}
