@@ -42,7 +42,8 @@ public final class EnclosureDocument {
     public void write(Json json) {
         Structure structure = view.records().structures().get(enclosure.structure());
         json.text("code", enclosure.code()).text("kind", enclosure.type().word());
-        json.text("structure", structure.code()).text("structure_kind", structure.type().word());
+        json.text("structure", structure.code())
+                .text("structure_kind", structure.type().word());
         json.place(structure.position()).text("state", enclosure.state().word()).text("note", enclosure.note());
         json.metres("tray_glass_m", enclosure.trayGlass());
         json.list("legs", this::legs);
@@ -60,7 +61,8 @@ public final class EnclosureDocument {
                 .passes()
                 .owned(Relation.ENCLOSURE_PASSES, enclosure.id())
                 .sorted(Comparator.comparing((Pass pass) -> view.cable(pass.cable()))
-                        .thenComparing(pass -> view.records().runRows().get(pass.runRow()).seq()))
+                        .thenComparing(pass ->
+                                view.records().runRows().get(pass.runRow()).seq()))
                 .toList();
         for (Pass pass : passes) {
             RunRow row = view.records().runRows().get(pass.runRow());
@@ -96,13 +98,17 @@ public final class EnclosureDocument {
         Joint termination = joints.findAt(rear);
         Joint jumper = joints.findAt(front);
         json.whole("port", number).text("rear", joinedTo(rear));
-        json.text("rear_trust", termination == null ? null : termination.facts().trust().word());
+        json.text(
+                "rear_trust",
+                termination == null ? null : termination.facts().trust().word());
         json.whole("rear_joint", termination == null ? null : joints.index(termination));
         List<Circuit> circuits = view.uses().circuits().endingOn(panel.id(), number);
         boolean jumpered = jumper != null && jumper.type() == JointKind.JUMPER;
         String free = circuits.isEmpty() ? "free" : "circuits";
         json.text("front", jumpered ? "jumper" : free).text("jumper_to", joinedTo(front));
-        json.texts("circuits", circuits.stream().limit(MOST_CIRCUITS).map(Circuit::code).toList());
+        json.texts(
+                "circuits",
+                circuits.stream().limit(MOST_CIRCUITS).map(Circuit::code).toList());
         json.whole("circuits_total", circuits.size());
     }
 
@@ -122,7 +128,9 @@ public final class EnclosureDocument {
 
     private void splitter(Json json, Splitter splitter) {
         Losses losses = new Losses(view);
-        json.text("splitter", splitter.code()).whole("inputs", splitter.inputs()).whole("outputs", splitter.outputs());
+        json.text("splitter", splitter.code())
+                .whole("inputs", splitter.inputs())
+                .whole("outputs", splitter.outputs());
         json.list("terminals", terminals -> {
             for (int input = 1; input <= splitter.inputs(); input++) {
                 int number = input;
@@ -151,6 +159,8 @@ public final class EnclosureDocument {
                 .orElse(Network.NONE);
         json.whole(
                 "circuits_total",
-                piece == Network.NONE ? 0 : view.uses().circuits().through(piece).size());
+                piece == Network.NONE
+                        ? 0
+                        : view.uses().circuits().through(piece).size());
     }
 }

@@ -2,8 +2,8 @@ package spanwright.answers;
 
 import java.util.Comparator;
 import java.util.List;
-import java.util.TreeSet;
 import java.util.Set;
+import java.util.TreeSet;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.Circuit;
 import spanwright.journal.RecordKind;
@@ -45,7 +45,9 @@ final class JointDocument {
         json.date("temporary_until", facts.temporaryUntil()).text("job", facts.job());
         json.metres("length_m", facts.jumperLength());
         Set<Circuit> circuits = circuits(joint);
-        json.texts("circuits", circuits.stream().limit(MOST_CIRCUITS).map(Circuit::code).toList());
+        json.texts(
+                "circuits",
+                circuits.stream().limit(MOST_CIRCUITS).map(Circuit::code).toList());
         json.whole("circuits_total", circuits.size());
         changes.write(json, "changed", RecordKind.JOINT, joint.id());
     }
@@ -60,7 +62,8 @@ final class JointDocument {
 
     private static @Nullable String method(Joint joint) {
         return switch (joint.type()) {
-            case SPLICE -> joint.facts().method() == null ? null : joint.facts().method().word();
+            case SPLICE ->
+                joint.facts().method() == null ? null : joint.facts().method().word();
             case TERMINATION -> joint.facts().method() == null ? "direct" : "pigtail";
             case JUMPER -> null;
         };
@@ -81,23 +84,30 @@ final class JointDocument {
 
     private void ends(Json json, EndRange range) {
         int owner = range.leg().owner();
-        json.text("text", view.names().ends(range)).text("kind", kind(range.leg().kind()));
+        json.text("text", view.names().ends(range))
+                .text("kind", kind(range.leg().kind()));
         switch (range.leg().kind()) {
             case BACK, AHEAD -> {
                 json.text("of", view.cable(view.records().runRows().get(owner).cable()));
-                json.text("enclosure", view.records()
-                        .findPassAt(owner)
-                        .map(pass -> view.enclosure(pass.enclosure()))
-                        .orElseThrow());
+                json.text(
+                        "enclosure",
+                        view.records()
+                                .findPassAt(owner)
+                                .map(pass -> view.enclosure(pass.enclosure()))
+                                .orElseThrow());
                 json.text("side", range.leg().kind() == LegKind.BACK ? "back" : "ahead");
             }
             case IN, OUT -> {
                 Splitter splitter = view.records().splitters().get(owner);
-                json.text("of", splitter.code()).text("enclosure", view.enclosure(splitter.enclosure())).none("side");
+                json.text("of", splitter.code())
+                        .text("enclosure", view.enclosure(splitter.enclosure()))
+                        .none("side");
             }
             case REAR, FRONT -> {
                 Panel panel = view.records().panels().get(owner);
-                json.text("of", panel.code()).text("enclosure", view.enclosure(panel.enclosure())).none("side");
+                json.text("of", panel.code())
+                        .text("enclosure", view.enclosure(panel.enclosure()))
+                        .none("side");
             }
         }
         json.text("numbers", range.numbers().toString());

@@ -8,6 +8,7 @@ import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import spanwright.network.Block;
 import spanwright.network.Network;
+import spanwright.planning.FiberUse;
 import spanwright.plant.CableType;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Pass;
@@ -15,7 +16,6 @@ import spanwright.plant.Position;
 import spanwright.plant.RunRow;
 import spanwright.plant.SheathPositions;
 import spanwright.plant.SheathTie;
-import spanwright.planning.FiberUse;
 import spanwright.quantity.Length;
 import spanwright.records.CableLay;
 import spanwright.splicing.EndKey;
@@ -40,17 +40,19 @@ final class LegDocument {
         CableType type = lay.type();
         Colors colors = new Colors(view, type);
         boolean back = side == LegKind.BACK;
-        json.text("cable", lay.cable().code()).text("side", back ? "back" : "ahead").whole("seq", row.seq());
+        json.text("cable", lay.cable().code())
+                .text("side", back ? "back" : "ahead")
+                .whole("seq", row.seq());
         json.text("cable_type", type.code()).whole("fibers", type.fibers());
         json.whole("fibers_per_tube", type.fibersPerTube()).flag("ribbon", type.ribbon());
         json.texts("tube_colors", colors.tubes()).texts("fiber_colors", colors.places());
         place(json, lay, row.seq(), back);
-        Optional<Block> section = back
-                ? view.network().sectionBack(row.id())
-                : view.network().sectionAhead(row.id());
+        Optional<Block> section =
+                back ? view.network().sectionBack(row.id()) : view.network().sectionAhead(row.id());
         List<Alike<EndSaid>> ends = Alike.of(
                 type.fibers(),
-                fiber -> section.map(block -> end(block, back, side, row, fiber)).orElse(EndSaid.NOT_IN_SERVICE));
+                fiber ->
+                        section.map(block -> end(block, back, side, row, fiber)).orElse(EndSaid.NOT_IN_SERVICE));
         json.list("ends", ends, (item, alike) -> alike.what().write(item.text("fibers", alike.numbers())));
     }
 
@@ -58,7 +60,9 @@ final class LegDocument {
         SheathPositions positions = lay.positions();
         int next = back ? seq - 1 : seq + 1;
         int entered = next;
-        while (lay.findEnclosure(entered).isEmpty() && entered > 0 && entered < lay.rows().size() - 1) {
+        while (lay.findEnclosure(entered).isEmpty()
+                && entered > 0
+                && entered < lay.rows().size() - 1) {
             entered += back ? -1 : 1;
         }
         Optional<Enclosure> to = lay.findEnclosure(entered);
@@ -96,10 +100,12 @@ final class LegDocument {
             json.none("mark");
             return;
         }
-        json.object("mark", item -> item.number("value", tie.get().number())
-                .text("unit", tie.get().unit().symbol())
-                .text("ink", lay.cable().marksInk())
-                .date("read_on", tie.get().readOn()));
+        json.object(
+                "mark",
+                item -> item.number("value", tie.get().number())
+                        .text("unit", tie.get().unit().symbol())
+                        .text("ink", lay.cable().marksInk())
+                        .date("read_on", tie.get().readOn()));
     }
 
     private EndSaid end(Block section, boolean back, LegKind side, RunRow row, int fiber) {

@@ -53,8 +53,14 @@ final class NamedPlaces {
         String what = circuit.status().word() + " circuit" + service;
         return byCustomer
                 ? new Found("customer", customer, what + " " + circuit.code(), where, "circuit", circuit.code(), at(z))
-                : new Found("circuit", circuit.code(), customer.isEmpty() ? what : what + ", " + customer, where,
-                        "circuit", circuit.code(), at(z));
+                : new Found(
+                        "circuit",
+                        circuit.code(),
+                        customer.isEmpty() ? what : what + ", " + customer,
+                        where,
+                        "circuit",
+                        circuit.code(),
+                        at(z));
     }
 
     private Enclosure enclosureOf(int panel) {
@@ -71,52 +77,92 @@ final class NamedPlaces {
         Structure to = records.structures().get(run.get(run.size() - 1).structure());
         String part = cable.partOf() == null ? "" : " of " + cable.partOf();
         String what = records.cableTypes().get(cable.cableType()).fibers() + "-fiber cable" + part;
-        Position middle = records.structures().get(run.get(run.size() / 2).structure()).position();
+        Position middle =
+                records.structures().get(run.get(run.size() / 2).structure()).position();
         return new Found("cable", cable.code(), what, from.code() + " to " + to.code(), "cable", cable.code(), middle);
     }
 
     private Found enclosure(Enclosure enclosure) {
         Structure structure = records.structures().get(enclosure.structure());
-        return new Found("enclosure", enclosure.code(), enclosure.type().word(), describe(structure), "enclosure",
-                enclosure.code(), structure.position());
+        return new Found(
+                "enclosure",
+                enclosure.code(),
+                enclosure.type().word(),
+                describe(structure),
+                "enclosure",
+                enclosure.code(),
+                structure.position());
     }
 
     private Found structure(Structure structure, boolean byAddress) {
         String address = structure.address();
         if (byAddress && address != null) {
-            return new Found("address", address, structure.type().word() + " " + structure.code(), structure.code(),
-                    "structure", structure.code(), structure.position());
+            return new Found(
+                    "address",
+                    address,
+                    structure.type().word() + " " + structure.code(),
+                    structure.code(),
+                    "structure",
+                    structure.code(),
+                    structure.position());
         }
-        return new Found("structure", structure.code(), structure.type().word(), address == null ? "" : address,
-                "structure", structure.code(), structure.position());
+        return new Found(
+                "structure",
+                structure.code(),
+                structure.type().word(),
+                address == null ? "" : address,
+                "structure",
+                structure.code(),
+                structure.position());
     }
 
     private Found panel(Panel panel) {
         Enclosure enclosure = records.enclosures().get(panel.enclosure());
-        return new Found("panel", enclosure.code() + "/" + panel.code(), "panel of " + panel.ports() + " ports",
-                enclosure.code() + " at " + view.structure(enclosure.structure()), "enclosure", enclosure.code(),
+        return new Found(
+                "panel",
+                enclosure.code() + "/" + panel.code(),
+                "panel of " + panel.ports() + " ports",
+                enclosure.code() + " at " + view.structure(enclosure.structure()),
+                "enclosure",
+                enclosure.code(),
                 at(enclosure));
     }
 
     private Found splitter(Splitter splitter) {
         Enclosure enclosure = records.enclosures().get(splitter.enclosure());
-        return new Found("splitter", enclosure.code() + "/" + splitter.code(),
+        return new Found(
+                "splitter",
+                enclosure.code() + "/" + splitter.code(),
                 "splitter of " + splitter.outputs() + " outputs",
-                enclosure.code() + " at " + view.structure(enclosure.structure()), "enclosure", enclosure.code(),
+                enclosure.code() + " at " + view.structure(enclosure.structure()),
+                "enclosure",
+                enclosure.code(),
                 at(enclosure));
     }
 
     private Found span(Span span) {
         List<Position> line = LineOf.span(records, span);
         String where = view.structure(span.from()) + " to " + view.structure(span.to());
-        return new Found("span", span.code(), span.placement().word() + " span", where, "span", span.code(),
+        return new Found(
+                "span",
+                span.code(),
+                span.placement().word() + " span",
+                where,
+                "span",
+                span.code(),
                 line.get(line.size() / 2));
     }
 
     private static Found place(BaseFeature feature) {
         Coordinate middle = feature.geometry().getInteriorPoint().getCoordinate();
-        return new Found("place", Objects.requireNonNullElse(feature.name(), ""), feature.layer(), "base map", "map",
-                null, position(middle));
+        return new Found(
+                "place",
+                Objects.requireNonNullElse(feature.name(), ""),
+                feature.layer(),
+                "base map",
+                "map",
+                null,
+                position(middle));
     }
 
     private static @Nullable Position position(@Nullable Coordinate at) {

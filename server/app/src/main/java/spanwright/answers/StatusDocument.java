@@ -42,15 +42,18 @@ public final class StatusDocument {
     public void write(Json json, View view, Changes changes) {
         json.text("program", "spanwright").text("version", version).text("owner", view.setting("owner"));
         String unit = view.setting("unit");
-        json.text("unit", unit == null ? "m" : unit).text("time_zone", view.zone().getId());
+        json.text("unit", unit == null ? "m" : unit)
+                .text("time_zone", view.zone().getId());
         changes.reference(json, "posting", views.ledger().findPosting(view.posting()));
         json.object("counts", item -> counts(item, view));
         extent(json, MapDocuments.extent(view.records()));
         json.flag("demo", demo).text("invented", demo ? INVENTED : null);
         json.texts("jobs", view.records().plannedJobs());
-        json.list("wavelengths_nm", item -> wavelengths(view.records()).stream()
-                .map(Wavelength::exactNanometres)
-                .forEach(item::numberHere));
+        json.list(
+                "wavelengths_nm",
+                item -> wavelengths(view.records()).stream()
+                        .map(Wavelength::exactNanometres)
+                        .forEach(item::numberHere));
         if (tile == null) {
             json.none("tile");
         } else {
@@ -60,14 +63,20 @@ public final class StatusDocument {
 
     private static void counts(Json json, View view) {
         Records records = view.records();
-        json.whole("structures", records.structures().count()).whole("spans", records.spans().count());
-        json.whole("cables", records.cables().count()).whole("enclosures", records.enclosures().count());
-        json.whole("splitters", records.splitters().count()).whole("panels", records.panels().count());
-        json.whole("joints", joints(records).sum()).whole("circuits", records.circuits().count());
-        json.whole("fiber_sections", view.network().blocks().stream()
-                .filter(block -> block.kind() == BlockKind.SECTION)
-                .mapToLong(Block::count)
-                .sum());
+        json.whole("structures", records.structures().count())
+                .whole("spans", records.spans().count());
+        json.whole("cables", records.cables().count())
+                .whole("enclosures", records.enclosures().count());
+        json.whole("splitters", records.splitters().count())
+                .whole("panels", records.panels().count());
+        json.whole("joints", joints(records).sum())
+                .whole("circuits", records.circuits().count());
+        json.whole(
+                "fiber_sections",
+                view.network().blocks().stream()
+                        .filter(block -> block.kind() == BlockKind.SECTION)
+                        .mapToLong(Block::count)
+                        .sum());
         json.whole("postings", view.posting());
     }
 
@@ -81,10 +90,12 @@ public final class StatusDocument {
             return;
         }
         Box box = extent.get();
-        json.list("extent", item -> item.degreesHere(box.west())
-                .degreesHere(box.south())
-                .degreesHere(box.east())
-                .degreesHere(box.north()));
+        json.list(
+                "extent",
+                item -> item.degreesHere(box.west())
+                        .degreesHere(box.south())
+                        .degreesHere(box.east())
+                        .degreesHere(box.north()));
     }
 
     private static List<Wavelength> wavelengths(Records records) {

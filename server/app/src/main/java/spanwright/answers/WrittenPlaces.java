@@ -49,16 +49,26 @@ final class WrittenPlaces {
             return Optional.empty();
         }
         int number = Integer.parseInt(written.group(2));
-        return cableAnyCase(written.group(1)).filter(cable -> number >= 1 && number <= fibers(cable)).map(cable -> {
-            CableLay lay = view.lay(cable.id());
-            Colors colors = new Colors(view, lay.type());
-            String what = "fiber, tube " + lay.type().tubeOf(number) + " "
-                    + colors.tube(lay.type().tubeOf(number)) + ", " + colors.fiber(number);
-            String code = view.names().fiber(cable.id(), number);
-            int last = lay.rows().size() - 1;
-            String where = lay.structure(0).code() + " to " + lay.structure(last).code();
-            return new Found("fiber", code, what, where, "fiber", code, lay.structure(last / 2).position());
-        });
+        return cableAnyCase(written.group(1))
+                .filter(cable -> number >= 1 && number <= fibers(cable))
+                .map(cable -> {
+                    CableLay lay = view.lay(cable.id());
+                    Colors colors = new Colors(view, lay.type());
+                    String what = "fiber, tube " + lay.type().tubeOf(number) + " "
+                            + colors.tube(lay.type().tubeOf(number)) + ", " + colors.fiber(number);
+                    String code = view.names().fiber(cable.id(), number);
+                    int last = lay.rows().size() - 1;
+                    String where = lay.structure(0).code() + " to "
+                            + lay.structure(last).code();
+                    return new Found(
+                            "fiber",
+                            code,
+                            what,
+                            where,
+                            "fiber",
+                            code,
+                            lay.structure(last / 2).position());
+                });
     }
 
     private int fibers(Cable cable) {
@@ -66,10 +76,12 @@ final class WrittenPlaces {
     }
 
     private Optional<Cable> cableAnyCase(String code) {
-        return records.cables().find(code).or(() -> records.cables()
-                .list()
-                .filter(cable -> cable.code().equalsIgnoreCase(code))
-                .findFirst());
+        return records.cables()
+                .find(code)
+                .or(() -> records.cables()
+                        .list()
+                        .filter(cable -> cable.code().equalsIgnoreCase(code))
+                        .findFirst());
     }
 
     private Optional<Found> port(String query) {
@@ -130,7 +142,8 @@ final class WrittenPlaces {
     private String where(CableLay lay, SheathPlace place) {
         if (!place.onSpan()) {
             boolean coil = lay.positions().coil(place.row()).micrometres() > 0;
-            return (coil ? "in the coil at " : "at ") + lay.structure(place.row()).code();
+            return (coil ? "in the coil at " : "at ")
+                    + lay.structure(place.row()).code();
         }
         String before = lay.structure(place.row() - 1).code();
         return length(place.before()) + " past " + before + " toward "
@@ -165,9 +178,10 @@ final class WrittenPlaces {
         if (Math.abs(lat) > 90 || Math.abs(lon) > 180) {
             return Optional.empty();
         }
-        String label = BigDecimal.valueOf(lat).toPlainString() + ", " + BigDecimal.valueOf(lon).toPlainString();
-        return Optional.of(new Found("coordinate", label, "latitude, longitude", "WGS 84", "map", null,
-                new Position(lon, lat)));
+        String label = BigDecimal.valueOf(lat).toPlainString() + ", "
+                + BigDecimal.valueOf(lon).toPlainString();
+        return Optional.of(
+                new Found("coordinate", label, "latitude, longitude", "WGS 84", "map", null, new Position(lon, lat)));
     }
 
     private static boolean isEastWest(@Nullable String letter) {

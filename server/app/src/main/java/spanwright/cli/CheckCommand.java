@@ -77,6 +77,8 @@ final class CheckCommand implements Callable<Integer> {
     }
 
     private static long count(List<Finding> findings, Severity severity) {
-        return findings.stream().filter(finding -> finding.severity() == severity).count();
+        return findings.stream()
+                .filter(finding -> finding.severity() == severity)
+                .count();
     }
 }

@@ -51,7 +51,8 @@ public final class CommandLineProgram implements Runnable {
         line.getSubcommands().values().forEach(command -> command.setUsageHelpWidth(100));
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setOut(out).setErr(err);
-        line.getCommandSpec().versionProvider((IVersionProvider) () -> new String[] {"spanwright " + program.version()});
+        line.getCommandSpec()
+                .versionProvider((IVersionProvider) () -> new String[] {"spanwright " + program.version()});
         line.setExecutionExceptionHandler(CommandLineProgram::explain);
         try {
             return line.execute(args);

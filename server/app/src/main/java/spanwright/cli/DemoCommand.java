@@ -68,7 +68,8 @@ final class DemoCommand implements Callable<Integer> {
 
     private int run(Path file) {
         PrintWriter err = spec.commandLine().getErr();
-        LoadResult result = program.load(program.demoFolder(), file, "demo", "The demo scenario, all invented", step -> {});
+        LoadResult result =
+                program.load(program.demoFolder(), file, "demo", "The demo scenario, all invented", step -> {});
         if (result instanceof LoadResult.Refused refused) {
             refused.lines().forEach(err::println);
             return CommandLineProgram.WRONG_INPUT;

@@ -29,7 +29,11 @@ final class ExportCommand implements Callable<Integer> {
     @Mixin
     private ViewOptions view;
 
-    @Option(names = "--format", required = true, paramLabel = "FORMAT", description = "One of: ${COMPLETION-CANDIDATES}.")
+    @Option(
+            names = "--format",
+            required = true,
+            paramLabel = "FORMAT",
+            description = "One of: ${COMPLETION-CANDIDATES}.")
     private ExportFormat format;
 
     @Parameters(paramLabel = "OUT", description = "The folder or file to write; not there yet.")

@@ -33,10 +33,7 @@ final class LoadCommand implements Callable<Integer> {
     @Option(names = "--records", required = true, paramLabel = "FILE", description = "The records file.")
     private Path records;
 
-    @Option(
-            names = "--by",
-            paramLabel = "NAME",
-            description = "Who posts it. Default: the account that runs this.")
+    @Option(names = "--by", paramLabel = "NAME", description = "Who posts it. Default: the account that runs this.")
     private @Nullable String by;
 
     @Option(names = "--reason", paramLabel = "TEXT", description = "Why. Default: that the folder was loaded.")
@@ -68,7 +65,10 @@ final class LoadCommand implements Callable<Integer> {
     }
 
     private String reason() {
-        return given(reason, "--reason", "Loaded " + folder.toAbsolutePath().normalize().getFileName());
+        return given(
+                reason,
+                "--reason",
+                "Loaded " + folder.toAbsolutePath().normalize().getFileName());
     }
 
     private static String given(@Nullable String value, String option, String otherwise) {

@@ -14,5 +14,4 @@ import spanwright.answers.Views;
  * @param version version of the program
  * @param demo whether these are the records of the demo
  */
-public record Api(
-        Views views, Changes.Finder finder, RowTexts rows, PostingDesk desk, String version, boolean demo) {}
+public record Api(Views views, Changes.Finder finder, RowTexts rows, PostingDesk desk, String version, boolean demo) {}

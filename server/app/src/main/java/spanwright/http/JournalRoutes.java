@@ -39,8 +39,7 @@ final class JournalRoutes {
         int limit = question.whole("limit", 1, MOST_POSTINGS, 50);
         View view = answering.views().of(question.text(Answering.AS_OF), null);
         int before = question.whole("before", 1, LARGEST_NUMBER, LARGEST_NUMBER);
-        answering.answer(
-                ctx, view, (json, of) -> documents.list(json, Math.min(before, of.posting() + 1), limit));
+        answering.answer(ctx, view, (json, of) -> documents.list(json, Math.min(before, of.posting() + 1), limit));
     }
 
     void one(Context ctx) {
@@ -48,7 +47,8 @@ final class JournalRoutes {
         int number = question.wholeStep("id", 1, LARGEST_NUMBER);
         int from = question.whole("from_change", 0, LARGEST_NUMBER, 0);
         int limit = question.whole("limit", 1, MOST_CHANGES, FIRST_CHANGES);
-        Posting posting = answering.views()
+        Posting posting = answering
+                .views()
                 .ledger()
                 .findPosting(number)
                 .orElseThrow(() -> new ProblemException(Problem.notFound("There is no posting " + number + ".")));
@@ -74,7 +74,11 @@ final class JournalRoutes {
     }
 
     private static boolean isJson(@Nullable String type) {
-        return type != null && List.of(type.toLowerCase(Locale.ROOT).split(";")).get(0).strip().equals("application/json");
+        return type != null
+                && List.of(type.toLowerCase(Locale.ROOT).split(";"))
+                        .get(0)
+                        .strip()
+                        .equals("application/json");
     }
 
     private byte[] body(Context ctx) {

@@ -70,8 +70,7 @@ final class PlantRoutes {
         Question question = new Question(ctx, "west", "south", "east", "north", "zoom");
         Box box = box(question);
         double zoom = question.neededNumber("zoom", 0, NEAREST_ZOOM);
-        answering.answer(
-                ctx, answering.views().now(), (json, view) -> new MapDocuments(view).base(json, box, zoom));
+        answering.answer(ctx, answering.views().now(), (json, view) -> new MapDocuments(view).base(json, box, zoom));
     }
 
     /** A map may be dragged past the edges of the world, so its box may lie beyond them. */

@@ -151,7 +151,8 @@ record PostingBody(String by, String reason, List<RowChange> changes) {
         }
         node.fieldNames().forEachRemaining(name -> {
             if (!known.contains(name)) {
-                throw bad(at + " has no member " + name + "; there are " + String.join(", ", new TreeSet<>(known)) + ".");
+                throw bad(
+                        at + " has no member " + name + "; there are " + String.join(", ", new TreeSet<>(known)) + ".");
             }
         });
     }

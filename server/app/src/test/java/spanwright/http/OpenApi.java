@@ -43,16 +43,19 @@ final class OpenApi {
     /** Every operation as {@code GET /structures/{code}}. */
     List<String> operations() {
         List<String> operations = new ArrayList<>();
-        document.path("paths").fields().forEachRemaining(path -> path.getValue()
-                .fieldNames()
-                .forEachRemaining(method -> operations.add(method.toUpperCase() + " " + path.getKey())));
+        document.path("paths")
+                .fields()
+                .forEachRemaining(path -> path.getValue()
+                        .fieldNames()
+                        .forEachRemaining(method -> operations.add(method.toUpperCase() + " " + path.getKey())));
         return operations;
     }
 
     /** Checks status, content type and body of an answer; gives the body. */
     JsonNode check(String method, String path, HttpResponse<byte[]> answer) {
         String name = method + " " + answer.uri() + " " + answer.statusCode();
-        String pointer = "/paths/" + path.replace("~", "~0").replace("/", "~1") + "/" + method.toLowerCase() + "/responses/";
+        String pointer =
+                "/paths/" + path.replace("~", "~0").replace("/", "~1") + "/" + method.toLowerCase() + "/responses/";
         String response = document.at(pointer + answer.statusCode()).isMissingNode()
                 ? pointer + "default"
                 : pointer + answer.statusCode();
@@ -80,7 +83,8 @@ final class OpenApi {
     }
 
     private void assertValid(String name, String pointer, JsonNode body) {
-        assertThat(factory.getSchema(SchemaLocation.of(AT + "#" + pointer), config).validate(body))
+        assertThat(factory.getSchema(SchemaLocation.of(AT + "#" + pointer), config)
+                        .validate(body))
                 .as("%s: %s", name, body)
                 .isEmpty();
     }

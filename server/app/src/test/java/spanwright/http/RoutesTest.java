@@ -51,8 +51,11 @@ class RoutesTest {
         }
         records.circuits().list().forEach(circuit -> get("/circuits/{code}", "/circuits/" + circuit.code()));
         for (String job : records.plannedJobs()) {
-            records.enclosures().list().limit(5).forEach(enclosure ->
-                    get("/enclosures/{code}", "/enclosures/" + enclosure.code() + "?as_if=" + encoded(job)));
+            records.enclosures()
+                    .list()
+                    .limit(5)
+                    .forEach(enclosure ->
+                            get("/enclosures/{code}", "/enclosures/" + enclosure.code() + "?as_if=" + encoded(job)));
         }
     }
 
@@ -74,7 +77,11 @@ class RoutesTest {
         get("/postings", "/postings");
         get("/health", "/health");
         get("/openapi.json", "/openapi.json");
-        Stream.of("a", "1", "-", records.structures().list().findFirst().orElseThrow().code())
+        Stream.of(
+                        "a",
+                        "1",
+                        "-",
+                        records.structures().list().findFirst().orElseThrow().code())
                 .forEach(typed -> get("/find", "/find?q=" + encoded(typed)));
     }
 
@@ -85,8 +92,10 @@ class RoutesTest {
         String after = "";
         do {
             JsonNode page = get("/circuits", "/circuits?limit=2&after=" + encoded(after));
-            page.path("circuits").forEach(circuit -> assertThat(seen.add(circuit.path("circuit").asText()))
-                    .isTrue());
+            page.path("circuits")
+                    .forEach(circuit -> assertThat(
+                                    seen.add(circuit.path("circuit").asText()))
+                            .isTrue());
             after = page.path("next").isNull() ? null : page.path("next").asText();
         } while (after != null);
 
@@ -101,7 +110,8 @@ class RoutesTest {
         JsonNode problem = problem("/structures/{code}", "/structures/" + code + "x", 404);
 
         assertThat(problem.path("code").asText()).isEqualTo("not_found");
-        assertThat(problem.path("detail").asText()).isEqualTo("There is no structure " + code + "x. Is " + code + " meant?");
+        assertThat(problem.path("detail").asText())
+                .isEqualTo("There is no structure " + code + "x. Is " + code + " meant?");
         for (String kind : List.of("spans", "enclosures", "cables", "circuits")) {
             problem("/" + kind + "/{code}", "/" + kind + "/no-such-thing-at-all", 404);
         }
@@ -112,9 +122,14 @@ class RoutesTest {
     void what_is_asked_wrongly_is_said_to_be_wrong() {
         server.plant(6);
         assertThat(problem("/find", "/find", 400).path("parameter").asText()).isEqualTo("q");
-        assertThat(problem("/find", "/find?q=a&limit=0", 400).path("parameter").asText()).isEqualTo("limit");
-        assertThat(problem("/find", "/find?q=a&q=b", 400).path("parameter").asText()).isEqualTo("q");
-        assertThat(problem("/find", "/find?q=" + "a".repeat(201), 400).path("parameter").asText()).isEqualTo("q");
+        assertThat(problem("/find", "/find?q=a&limit=0", 400).path("parameter").asText())
+                .isEqualTo("limit");
+        assertThat(problem("/find", "/find?q=a&q=b", 400).path("parameter").asText())
+                .isEqualTo("q");
+        assertThat(problem("/find", "/find?q=" + "a".repeat(201), 400)
+                        .path("parameter")
+                        .asText())
+                .isEqualTo("q");
         assertThat(problem("/map/plant", "/map/plant?west=1&south=0&east=0&north=1&zoom=3", 400)
                         .path("parameter")
                         .asText())
@@ -131,10 +146,15 @@ class RoutesTest {
                         .path("parameter")
                         .asText())
                 .isEqualTo("zoom");
-        assertThat(problem("/status", "/status?as_of=tomorrow", 400).path("parameter").asText())
+        assertThat(problem("/status", "/status?as_of=tomorrow", 400)
+                        .path("parameter")
+                        .asText())
                 .isEqualTo("as_of");
-        assertThat(problem("/status", "/status?as_of=99", 404).path("code").asText()).isEqualTo("bad_reference");
-        assertThat(problem("/status", "/status?as_if=no-such-job", 404).path("parameter").asText())
+        assertThat(problem("/status", "/status?as_of=99", 404).path("code").asText())
+                .isEqualTo("bad_reference");
+        assertThat(problem("/status", "/status?as_if=no-such-job", 404)
+                        .path("parameter")
+                        .asText())
                 .isEqualTo("as_if");
         problem("/postings/{id}", "/postings/x", 400);
         problem("/circuits", "/circuits?prefix=" + "a".repeat(201), 400);
@@ -145,11 +165,15 @@ class RoutesTest {
         Ledger ledger = server.plant(7);
         String tag = server.asking().get("/status").headers().firstValue("ETag").orElseThrow();
 
-        assertThat(server.asking().get("/status", "If-None-Match", tag).statusCode()).isEqualTo(304);
-        assertThat(server.asking().get("/status", "If-None-Match", "\"other\", " + tag).statusCode())
+        assertThat(server.asking().get("/status", "If-None-Match", tag).statusCode())
+                .isEqualTo(304);
+        assertThat(server.asking()
+                        .get("/status", "If-None-Match", "\"other\", " + tag)
+                        .statusCode())
                 .isEqualTo(304);
         server.rename(ledger, "Another Owner");
-        assertThat(server.asking().get("/status", "If-None-Match", tag).statusCode()).isEqualTo(200);
+        assertThat(server.asking().get("/status", "If-None-Match", tag).statusCode())
+                .isEqualTo(200);
     }
 
     @Test
@@ -160,21 +184,29 @@ class RoutesTest {
         server.rename(ledger, "Second Owner");
 
         assertThat(get("/status", "/status").path("owner").asText()).isEqualTo("Second Owner");
-        assertThat(get("/status", "/status?as_of=" + first).path("owner").asText()).isEqualTo("First Owner");
-        assertThat(get("/status", "/status?as_of=2001-01-01").path("owner").isNull()).isTrue();
-        assertThat(get("/status", "/status?as_of=2099-01-01T00:00").path("owner").asText())
+        assertThat(get("/status", "/status?as_of=" + first).path("owner").asText())
+                .isEqualTo("First Owner");
+        assertThat(get("/status", "/status?as_of=2001-01-01").path("owner").isNull())
+                .isTrue();
+        assertThat(get("/status", "/status?as_of=2099-01-01T00:00")
+                        .path("owner")
+                        .asText())
                 .isEqualTo("Second Owner");
     }
 
     private JsonNode get(String path, String address) {
         var answer = server.asking().get(address);
-        assertThat(answer.statusCode()).as("%s %s", address, new String(answer.body(), UTF_8)).isEqualTo(200);
+        assertThat(answer.statusCode())
+                .as("%s %s", address, new String(answer.body(), UTF_8))
+                .isEqualTo(200);
         return OPEN_API.check("GET", path, answer);
     }
 
     private JsonNode problem(String path, String address, int status) {
         var answer = server.asking().get(address);
-        assertThat(answer.statusCode()).as("%s %s", address, new String(answer.body(), UTF_8)).isEqualTo(status);
+        assertThat(answer.statusCode())
+                .as("%s %s", address, new String(answer.body(), UTF_8))
+                .isEqualTo(status);
         return OPEN_API.check("GET", path, answer);
     }
 

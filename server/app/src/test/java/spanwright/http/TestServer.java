@@ -75,7 +75,8 @@ final class TestServer implements AutoCloseable {
     }
 
     private static Api api(Ledger ledger) {
-        return new Api(new Views(ledger), new LastChanges(ledger), new PlainRows(), new SettingsDesk(ledger), "0.1.0", false);
+        return new Api(
+                new Views(ledger), new LastChanges(ledger), new PlainRows(), new SettingsDesk(ledger), "0.1.0", false);
     }
 
     @Override
