@@ -1,30 +1,18 @@
 package spanwright.boot;
 
-import picocli.CommandLine;
-import picocli.CommandLine.Command;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Spec;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
+import spanwright.cli.CommandLineProgram;
 
-/** The program's entry: {@code java -jar spanwright.jar}. */
-@Command(
-        name = "spanwright",
-        description = "The records of a fiber network's outside plant.",
-        mixinStandardHelpOptions = true)
-public final class Main implements Runnable {
-
-    @Spec
-    private CommandSpec spec;
+/** The program's entry: {@code java -jar spanwright.jar COMMAND ...}. */
+public final class Main {
 
     private Main() {}
 
-    /** Prints the usage: without a command there is nothing to do. */
-    @Override
-    public void run() {
-        spec.commandLine().usage(spec.commandLine().getOut());
-    }
-
-    /** Runs the command line and exits with its code: 0 done, 2 the command line was not understood. */
+    /** Runs the command line and exits with its status, see {@link CommandLineProgram}. */
     public static void main(String[] args) {
-        System.exit(new CommandLine(new Main()).execute(args));
+        PrintWriter out = new PrintWriter(System.out, false, StandardCharsets.UTF_8);
+        PrintWriter err = new PrintWriter(System.err, true, StandardCharsets.UTF_8);
+        System.exit(CommandLineProgram.run(new Parts(), out, err, args));
     }
 }

@@ -8,6 +8,8 @@ import io.javalin.http.Context;
 import io.javalin.http.Handler;
 import io.javalin.http.HttpResponseException;
 import io.javalin.util.JavalinBindException;
+import jakarta.servlet.http.HttpServletResponse;
+import java.io.IOException;
 import java.net.URI;
 import java.time.Duration;
 import org.eclipse.jetty.server.HttpConfiguration;
@@ -97,10 +99,7 @@ public final class WebServer implements AutoCloseable {
         new Routing(config.routes, this::timed).add(api, guard, answering, options);
         config.routes.get("/", this::page);
         config.routes.get("/<path>", this::page);
-        config.router.javaLangErrorHandler((response, error) -> {
-            LOG.error("failed", error);
-            response.setStatus(500);
-        });
+        config.router.javaLangErrorHandler(WebServer::answerError);
         answerProblems(config);
     }
 
@@ -129,6 +128,18 @@ public final class WebServer implements AutoCloseable {
             LOG.error("failed path={}", ctx.path(), bug);
             answer(ctx, Problem.internal());
         });
+    }
+
+    /** Out of memory, a class that cannot be loaded: there may be little left to answer with. */
+    private static void answerError(HttpServletResponse response, Error error) {
+        LOG.error("failed", error);
+        try {
+            response.setStatus(500);
+            response.setContentType(Problem.CONTENT_TYPE);
+            response.getOutputStream().write(Problem.internal().bytes("/"));
+        } catch (IOException gone) {
+            LOG.debug("the caller left", gone);
+        }
     }
 
     private static Problem problemOf(HttpResponseException failure) {

@@ -1,0 +1,168 @@
+package spanwright.boot;
+
+import java.io.IOException;
+import java.net.URI;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.function.Consumer;
+import spanwright.answers.LastChanges;
+import spanwright.answers.View;
+import spanwright.answers.Views;
+import spanwright.cli.Program;
+import spanwright.cli.WrongInput;
+import spanwright.exchange.Fault;
+import spanwright.exchange.FolderLoad;
+import spanwright.http.Api;
+import spanwright.http.CannotListenException;
+import spanwright.http.ServerOptions;
+import spanwright.http.WebServer;
+import spanwright.network.Ledger;
+import spanwright.network.Outcome;
+import spanwright.records.Refusal;
+import spanwright.sqlite.Access;
+import spanwright.sqlite.Opening;
+import spanwright.sqlite.SqliteLedger;
+
+/** The parts of the program, put together: storage, records folders, the HTTP interface, behind the command line. */
+final class Parts implements Program {
+
+    @Override
+    public String version() {
+        String packed = Parts.class.getPackage().getImplementationVersion();
+        return packed == null ? "not packed" : packed;
+    }
+
+    @Override
+    public Ledger open(Path records) {
+        return open(records, Access.READ);
+    }
+
+    private static Ledger open(Path records, Access access) {
+        Path folder = records.toAbsolutePath().getParent();
+        if (folder != null && !Files.isDirectory(folder)) {
+            throw new WrongInput("There is no folder " + folder + " for the records file; make it first.");
+        }
+        Opening opening = SqliteLedger.open(records, access);
+        if (opening instanceof Opening.Unopened unopened) {
+            throw new WrongInput(unopened.sentence());
+        }
+        return ((Opening.Opened) opening).ledger();
+    }
+
+    @Override
+    public LoadResult load(Path folder, Path records, String by, String reason, Consumer<String> progress) {
+        if (!Files.exists(folder)) {
+            throw new WrongInput("There is no folder or file " + folder + " to load.");
+        }
+        List<Fault> faults = new ArrayList<>();
+        List<String> read = new ArrayList<>();
+        try (Ledger ledger = open(records, Access.WRITE)) {
+            Outcome outcome = ledger.post(by, reason, editor -> {
+                faults.addAll(FolderLoad.load(folder, editor, (table, rows, done) -> {
+                    String count = String.format(Locale.ROOT, "%,d %s", rows, table.replace('_', ' '));
+                    progress.accept(done ? count : count + " so far ...");
+                    if (done) {
+                        read.add(count);
+                    }
+                }));
+                return faults.stream().map(Parts::refusal).toList();
+            });
+            if (outcome instanceof Outcome.Posted posted) {
+                return new LoadResult.Loaded(posted.posting(), read);
+            }
+            List<String> lines = faults.isEmpty()
+                    ? ((Outcome.Refused) outcome)
+                            .refusals().stream().map(Refusal::sentence).toList()
+                    : faults.stream().map(Fault::toString).toList();
+            return new LoadResult.Refused(lines);
+        }
+    }
+
+    private static Refusal refusal(Fault fault) {
+        return new Refusal("folder", fault.text(), null, null, null);
+    }
+
+    @Override
+    public void export(View view, ExportFormat format, Path out) {
+        if (Files.exists(out)) {
+            throw new WrongInput(out + " is there already; name one that is not.");
+        }
+        throw new WrongInput("not yet");
+    }
+
+    @Override
+    public Serving serve(ServeOrder order) {
+        Ledger ledger = open(order.records(), Access.WRITE);
+        try {
+            if (ledger.current().records().posting() == 0) {
+                throw new WrongInput("There is no records file " + order.records() + "; load a folder into it first.");
+            }
+            WebServer server = WebServer.start(options(order), api(ledger, order.demo()));
+            return new Running(server, ledger, WebServer.isLoopback(order.host()));
+        } catch (CannotListenException taken) {
+            ledger.close();
+            throw new WrongInput(String.valueOf(taken.getMessage()));
+        } catch (RuntimeException failed) {
+            ledger.close();
+            throw failed;
+        }
+    }
+
+    private static ServerOptions options(ServeOrder order) {
+        if (order.port() < 0 || order.port() > 65_535) {
+            throw new WrongInput("A port is a number from 0 to 65535, not " + order.port() + ".");
+        }
+        ServerOptions options = ServerOptions.at(order.host(), order.port());
+        return order.tileUrl() == null
+                ? options
+                : options.withTile(new ServerOptions.Tile(
+                        order.tileUrl(), order.tileAttribution() == null ? "" : order.tileAttribution()));
+    }
+
+    private Api api(Ledger ledger, boolean demo) {
+        return new Api(
+                new Views(ledger), new LastChanges(ledger), new FolderRows(), new RowDesk(ledger), version(), demo);
+    }
+
+    @Override
+    public Path demoFolder() {
+        return PackedDemo.unpack();
+    }
+
+    @Override
+    public void browse(URI page) {
+        Browser.open(page);
+    }
+
+    /** A server and the ledger it answers from. */
+    private record Running(WebServer server, Ledger ledger, boolean loopback) implements Serving {
+
+        @Override
+        public URI address() {
+            return server.address();
+        }
+
+        @Override
+        public void await() {
+            Thread waiting = Thread.currentThread();
+            Thread stopping = new Thread(this::close, "stop");
+            Runtime.getRuntime().addShutdownHook(stopping);
+            try {
+                while (!waiting.isInterrupted()) {
+                    Thread.sleep(60_000);
+                }
+            } catch (InterruptedException stopped) {
+                waiting.interrupt();
+            }
+        }
+
+        @Override
+        public void close() {
+            server.close();
+            ledger.close();
+        }
+    }
+}
