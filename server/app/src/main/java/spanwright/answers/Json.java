@@ -3,6 +3,7 @@ package spanwright.answers;
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
+import com.fasterxml.jackson.core.util.Separators;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
@@ -48,7 +49,8 @@ public final class Json {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream(4096);
         try (JsonGenerator out = FACTORY.createGenerator(bytes)) {
             if (pretty) {
-                out.setPrettyPrinter(new DefaultPrettyPrinter());
+                out.setPrettyPrinter(new DefaultPrettyPrinter(
+                        Separators.createDefaultInstance().withObjectFieldValueSpacing(Separators.Spacing.AFTER)));
             }
             new Json(out).objectHere(body);
             if (pretty) {

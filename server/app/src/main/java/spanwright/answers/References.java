@@ -65,6 +65,16 @@ public final class References {
                         () -> missing("circuit", code, records.circuits().list().map(Circuit::code)));
     }
 
+    /** The circuit with a code that a question names among others. */
+    Circuit askedCircuit(String code) {
+        return named(
+                records.circuits().find(code),
+                "circuit",
+                code,
+                "circuit",
+                records.circuits().list().map(Circuit::code));
+    }
+
     /** The key of the front of a port written {@code E1/P/1}. */
     public long front(String port) {
         Matcher written = PORT.matcher(port);

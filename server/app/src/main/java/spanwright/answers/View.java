@@ -7,11 +7,13 @@ import java.time.ZoneOffset;
 import java.time.format.DateTimeFormatter;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import spanwright.network.Network;
 import spanwright.network.Snapshot;
 import spanwright.planning.EndStates;
 import spanwright.planning.FiberUses;
+import spanwright.quantity.LengthUnit;
 import spanwright.records.CableLay;
 import spanwright.records.Catalogue;
 import spanwright.records.EndNames;
@@ -99,6 +101,11 @@ public final class View {
     @Nullable
     String setting(String name) {
         return records().settings().find(name).map(setting -> setting.value()).orElse(null);
+    }
+
+    /** The unit in which people read lengths first. */
+    public LengthUnit unit() {
+        return Optional.ofNullable(setting("unit")).flatMap(LengthUnit::find).orElse(LengthUnit.METRE);
     }
 
     /** The records' own zone. */

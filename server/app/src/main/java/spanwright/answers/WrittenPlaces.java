@@ -152,9 +152,7 @@ final class WrittenPlaces {
 
     /** In the unit that people read first, to a whole number. */
     private String length(Length length) {
-        LengthUnit unit = Optional.ofNullable(view.setting("unit"))
-                .flatMap(LengthUnit::find)
-                .orElse(LengthUnit.METRE);
+        LengthUnit unit = view.unit();
         return Math.round(length.in(unit)) + " " + unit.symbol();
     }
 

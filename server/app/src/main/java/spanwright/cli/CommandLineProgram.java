@@ -44,6 +44,7 @@ public final class CommandLineProgram implements Runnable {
     public static int run(Program program, PrintWriter out, PrintWriter err, String... args) {
         CommandLine line = new CommandLine(new CommandLineProgram());
         line.addSubcommand(new LoadCommand(program));
+        line.addSubcommand(new TraceCommand(program));
         line.addSubcommand(new CheckCommand(program));
         line.addSubcommand(new ExportCommand(program));
         line.addSubcommand(new ServeCommand(program));

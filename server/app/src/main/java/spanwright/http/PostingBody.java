@@ -111,12 +111,12 @@ record PostingBody(String by, String reason, List<RowChange> changes) {
         if (!node.isObject()) {
             throw bad(at + " is an object of values by column.");
         }
-        node.fields().forEachRemaining(field -> {
+        for (Map.Entry<String, JsonNode> field : node.properties()) {
             if (!COLUMN.matcher(field.getKey()).matches()) {
                 throw bad(at + " names a column in small letters, digits and _.");
             }
             columns.put(field.getKey(), value(field.getValue(), at + "." + field.getKey()));
-        });
+        }
         return columns;
     }
 

@@ -32,6 +32,7 @@ final class Routing {
         get("/cables/{code}", plant::cable);
         get("/circuits", plant::circuits);
         get("/circuits/{code}", plant::circuit);
+        get("/trace", new TraceRoute(answering)::trace);
         JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
         get("/postings", journal::list);
         // A posting is never stopped half way: who sent it would not know whether it was kept.

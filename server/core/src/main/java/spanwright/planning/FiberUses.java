@@ -66,24 +66,36 @@ public final class FiberUses {
         return trust.verified() ? FiberUse.SPARE_VERIFIED : FiberUse.SPARE;
     }
 
-    /** The gravest flag on a fiber of a section: dead before suspect before leased before reserved. */
     private Optional<FiberFlag> findFlag(Block section, int fiber) {
-        List<FiberFlag> ofCable = flags.computeIfAbsent(
-                section.owner(),
-                cable -> records.fiberFlags()
-                        .owned(Relation.CABLE_FLAGS, cable)
-                        .sorted(Comparator.comparing(FiberFlag::flag).thenComparing(FiberFlag::id))
-                        .toList());
-        return ofCable.stream()
-                .filter(flag -> flag.fibers().contains(fiber) && covers(flag, section))
+        return flags(section.owner(), fiber, seq(section.fromRow()), seq(section.toRow())).stream()
                 .findFirst();
     }
 
-    /** Whether a flag holds on a section: on every one that lies between its two enclosures, whichever way round. */
-    private boolean covers(FiberFlag flag, Block section) {
+    /**
+     * The flags on a stretch of a fiber, the gravest first: dead before suspect before leased before reserved.
+     *
+     * @param cable identity of the cable
+     * @param fiber from 1
+     * @param fromSeq the run row where the stretch begins
+     * @param toSeq the run row where it ends, not before the first
+     */
+    public List<FiberFlag> flags(int cable, int fiber, int fromSeq, int toSeq) {
+        List<FiberFlag> ofCable = flags.computeIfAbsent(
+                cable,
+                owner -> records.fiberFlags()
+                        .owned(Relation.CABLE_FLAGS, owner)
+                        .sorted(Comparator.comparing(FiberFlag::flag).thenComparing(FiberFlag::id))
+                        .toList());
+        return ofCable.stream()
+                .filter(flag -> flag.fibers().contains(fiber) && covers(flag, fromSeq, toSeq))
+                .toList();
+    }
+
+    /** Whether a flag holds on a stretch: on every one that lies between its two enclosures, whichever way round. */
+    private boolean covers(FiberFlag flag, int fromSeq, int toSeq) {
         int first = flag.from() == null ? 0 : seqAt(flag.cable(), flag.from());
         int last = flag.to() == null ? Integer.MAX_VALUE : seqAt(flag.cable(), flag.to());
-        return seq(section.fromRow()) >= Math.min(first, last) && seq(section.toRow()) <= Math.max(first, last);
+        return fromSeq >= Math.min(first, last) && toSeq <= Math.max(first, last);
     }
 
     private int seq(int runRow) {
