@@ -6,6 +6,7 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.Test;
 import spanwright.journal.Change;
 import spanwright.journal.Recorded;
@@ -92,7 +93,7 @@ class CheckerTest {
         });
     }
 
-    private static Snapshot flagged(Flag flag, LocalDate until) {
+    private static Snapshot flagged(Flag flag, @Nullable LocalDate until) {
         return with(
                 Drawing.of(SOUND),
                 records -> new FiberFlag(
