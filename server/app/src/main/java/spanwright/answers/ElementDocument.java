@@ -56,7 +56,9 @@ final class ElementDocument {
 
     /** A single way is shown and not summed. */
     private static String oneWay(Measurement measurement) {
-        String way = measurement.direction() == null ? "" : " " + measurement.direction().word();
+        String way = measurement.direction() == null
+                ? ""
+                : " " + measurement.direction().word();
         String on = measurement.on() == null ? "" : ", " + measurement.on();
         String by = measurement.by() == null ? "" : ", by " + measurement.by();
         return "; one way" + way + " measured " + measurement.loss() + on + by + ", not summed";
@@ -64,9 +66,14 @@ final class ElementDocument {
 
     private static void connector(Json json, Connector connector) {
         json.text("kind", "connector").text("port", connector.name());
-        json.text("enclosure", connector.enclosure().code()).text("structure", connector.structure().code());
+        json.text("enclosure", connector.enclosure().code())
+                .text("structure", connector.structure().code());
         json.text("connector", connector.panel().connector());
-        json.text("trust", connector.termination() == null ? null : connector.termination().facts().trust().word());
+        json.text(
+                "trust",
+                connector.termination() == null
+                        ? null
+                        : connector.termination().facts().trust().word());
     }
 
     private static void splice(Json json, Splice splice) {
@@ -85,7 +92,8 @@ final class ElementDocument {
         json.whole("tube", fiber.tube()).text("tube_color", fiber.tubeColor()).text("fiber_color", fiber.fiberColor());
         json.text("from", fiber.from().map(Enclosure::code).orElse(null));
         json.text("to", fiber.to().map(Enclosure::code).orElse(null));
-        json.text("from_structure", fiber.structure().code()).text("to_structure", fiber.toStructure().code());
+        json.text("from_structure", fiber.structure().code())
+                .text("to_structure", fiber.toStructure().code());
         json.text("toward", fiber.ahead() ? "ahead" : "back");
         json.metres("sheath_m", fiber.sheath()).metres("glass_m", fiber.glass()).metres("route_m", fiber.route());
         Length start = fiber.ahead() ? fiber.fromPosition() : fiber.toPosition();
@@ -133,7 +141,8 @@ final class ElementDocument {
 
     private static void through(Json json, Through through) {
         json.text("kind", "through").text("enclosure", through.enclosure().code());
-        json.text("structure", through.structure().code()).text("cable", through.cable().code());
+        json.text("structure", through.structure().code())
+                .text("cable", through.cable().code());
         json.whole("fiber", through.fiber());
     }
 
@@ -144,7 +153,8 @@ final class ElementDocument {
 
     private static void splitter(Json json, SplitterCrossing crossing) {
         json.text("kind", "splitter").text("enclosure", crossing.enclosure().code());
-        json.text("structure", crossing.structure().code()).text("splitter", crossing.splitter().code());
+        json.text("structure", crossing.structure().code())
+                .text("splitter", crossing.splitter().code());
         json.whole("inputs", crossing.splitter().inputs()).whole("input", crossing.input());
         json.whole("outputs", crossing.splitter().outputs()).whole("output", crossing.output());
         json.text("toward", crossing.towardOutput() ? "output" : "input");

@@ -59,8 +59,10 @@ public final class TraceAnswer {
     public Optional<Wavelength> wavelength() {
         Optional<Wavelength> asked = Optional.ofNullable(question.wavelength());
         return asked.or(() -> {
-            List<Wavelength> all =
-                    paths.stream().map(path -> path.loss.wavelength()).distinct().toList();
+            List<Wavelength> all = paths.stream()
+                    .map(path -> path.loss.wavelength())
+                    .distinct()
+                    .toList();
             return all.size() == 1 ? Optional.of(all.get(0)) : Optional.empty();
         });
     }
@@ -97,16 +99,19 @@ public final class TraceAnswer {
         Optional<Circuit> circuit = path.governing();
         Wavelength own = circuit.map(each -> each.wavelengths().get(0)).orElse(USUAL);
         Wavelength wavelength = question.wavelength() == null ? own : question.wavelength();
-        Reckoning reckoning = reckoners.computeIfAbsent(wavelength, this::reckoner).reckon(path);
+        Reckoning reckoning =
+                reckoners.computeIfAbsent(wavelength, this::reckoner).reckon(path);
         if (reckoning instanceof LossUnknown unknown) {
             throw new Unanswerable(Kind.WAVELENGTH_OUT_OF_RANGE, unknown.sentence() + ".", "wavelength");
         }
         PathLoss loss = (PathLoss) reckoning;
         Optional<Budget> budget = Optional.ofNullable(question.budget())
-                .or(() -> circuit.flatMap(each -> Optional.ofNullable(each.budget())).flatMap(Budget::find));
+                .or(() -> circuit.flatMap(each -> Optional.ofNullable(each.budget()))
+                        .flatMap(Budget::find));
         paths.add(new Reckoned(
                 loss,
-                budget.map(each -> BudgetCheck.of(loss, each, question.margin())).orElse(null)));
+                budget.map(each -> BudgetCheck.of(loss, each, question.margin()))
+                        .orElse(null)));
     }
 
     private LossReckoner reckoner(Wavelength wavelength) {
@@ -122,8 +127,7 @@ public final class TraceAnswer {
      * @param loss what it loses
      * @param budget its loss held against its budget, or null where it has none
      */
-    public record Reckoned(
-            PathLoss loss, @Nullable BudgetCheck budget) {
+    public record Reckoned(PathLoss loss, @Nullable BudgetCheck budget) {
 
         /** The path. */
         public Path path() {

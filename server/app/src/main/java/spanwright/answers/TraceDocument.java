@@ -38,7 +38,9 @@ public final class TraceDocument {
 
     /** Writes its members. */
     public void write(Json json) {
-        json.number("wavelength_nm", answer.wavelength().map(Wavelength::exactNanometres).orElse(null));
+        json.number(
+                "wavelength_nm",
+                answer.wavelength().map(Wavelength::exactNanometres).orElse(null));
         json.whole("posting", answer.view().posting());
         json.list("paths", answer.paths(), this::path);
     }
@@ -48,8 +50,10 @@ public final class TraceDocument {
         PathLoss loss = reckoned.loss();
         List<String> circuits = path.circuits().stream().map(Circuit::code).toList();
         json.flag("complete", path.complete()).text("circuit", circuits.isEmpty() ? null : circuits.get(0));
-        json.texts("circuits", circuits).number("wavelength_nm", loss.wavelength().exactNanometres());
-        json.flag("loop", path.loop()).texts("ends", path.ends().stream().map(PathEnd::name).toList());
+        json.texts("circuits", circuits)
+                .number("wavelength_nm", loss.wavelength().exactNanometres());
+        json.flag("loop", path.loop())
+                .texts("ends", path.ends().stream().map(PathEnd::name).toList());
         List<Length> before = path.glassBefore();
         json.list("elements", items -> {
             for (int index = 0; index < before.size(); index++) {
@@ -72,8 +76,11 @@ public final class TraceDocument {
         json.whole("splitters", path.count(ElementKind.SPLITTER));
         json.decibels("loss_db", loss.expected()).decibels("loss_limit_db", loss.limit());
         json.decibels("loss_statistical_db", loss.statistical());
-        json.number("dispersion_ps_per_nm", loss.dispersion().psPerNm().map(TraceDocument::rounded).orElse(null));
-        json.number("pmd_ps", loss.dispersion().pmdPs().map(TraceDocument::rounded).orElse(null));
+        json.number(
+                "dispersion_ps_per_nm",
+                loss.dispersion().psPerNm().map(TraceDocument::rounded).orElse(null));
+        json.number(
+                "pmd_ps", loss.dispersion().pmdPs().map(TraceDocument::rounded).orElse(null));
         json.whole("unmeasured", loss.unmeasured()).whole("unverified", loss.unverified());
     }
 
@@ -89,7 +96,9 @@ public final class TraceDocument {
         Budget budget = check.budget();
         json.object("budget", item -> {
             item.text("class", budget.code()).decibels("max_db", budget.max()).decibels("min_db", budget.min());
-            item.decibels("margin_db", check.margin()).flag("passes", check.passes()).decibels("left_db", check.left());
+            item.decibels("margin_db", check.margin())
+                    .flag("passes", check.passes())
+                    .decibels("left_db", check.left());
             item.flag("passes_at_limit", check.passesAtLimit()).flag("overload", check.overload());
             item.text("source", budget.source());
         });
@@ -104,9 +113,11 @@ public final class TraceDocument {
     }
 
     private static void station(Json json, Station station) {
-        json.text("structure", station.structure().code()).text("kind", station.structure().type().word());
+        json.text("structure", station.structure().code())
+                .text("kind", station.structure().type().word());
         json.text("enclosure", station.enclosure().map(Enclosure::code).orElse(null));
-        json.metres("glass_m", station.at().glass()).metres("sheath_m", station.at().sheath());
+        json.metres("glass_m", station.at().glass())
+                .metres("sheath_m", station.at().sheath());
         json.metres("route_m", station.at().route()).place(station.structure().position());
         json.metres("coil_m", station.coil());
     }

@@ -33,8 +33,8 @@ public record TraceQuestion(
     /** Keeps its own copy; refuses more than one thing to trace, and none. */
     public TraceQuestion {
         circuits = List.copyOf(circuits);
-        int asked = (circuits.isEmpty() ? 0 : 1) + (allCircuits ? 1 : 0) + (port == null ? 0 : 1)
-                + (fiber == null ? 0 : 1);
+        int asked =
+                (circuits.isEmpty() ? 0 : 1) + (allCircuits ? 1 : 0) + (port == null ? 0 : 1) + (fiber == null ? 0 : 1);
         if (asked != 1) {
             throw new Unanswerable(
                     Kind.BAD_REQUEST,
@@ -60,7 +60,11 @@ public record TraceQuestion(
                 .orElseThrow(() -> new Unanswerable(
                         Kind.BAD_REQUEST,
                         "'" + text + "' is no budget; a budget is a number of dB or one of the classes "
-                                + String.join(", ", Budget.listClasses().stream().map(Budget::code).toList()) + ".",
+                                + String.join(
+                                        ", ",
+                                        Budget.listClasses().stream()
+                                                .map(Budget::code)
+                                                .toList()) + ".",
                         "budget"));
     }
 

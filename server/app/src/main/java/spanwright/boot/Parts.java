@@ -1,6 +1,5 @@
 package spanwright.boot;
 
-import java.io.IOException;
 import java.net.URI;
 import java.nio.file.Files;
 import java.nio.file.Path;

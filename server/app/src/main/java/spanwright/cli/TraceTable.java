@@ -47,7 +47,9 @@ final class TraceTable {
             out.println();
         }
         out.println("As of posting " + answer.view().posting()
-                + Optional.ofNullable(answer.view().job()).map(job -> ", as if " + job + " were built").orElse("") + ".");
+                + Optional.ofNullable(answer.view().job())
+                        .map(job -> ", as if " + job + " were built")
+                        .orElse("") + ".");
     }
 
     private void print(TraceAnswer.Reckoned reckoned) {
@@ -58,8 +60,12 @@ final class TraceTable {
         String ends = path.loop()
                 ? "a circle"
                 : path.ends().stream().map(PathEnd::name).collect(Collectors.joining(" to "));
-        Output.wrapped(out, (name.isEmpty() ? "" : name + ": ") + ends + (path.complete() ? ", complete" : ", not complete")
-                + ", at " + loss.wavelength(), "", 100);
+        Output.wrapped(
+                out,
+                (name.isEmpty() ? "" : name + ": ") + ends + (path.complete() ? ", complete" : ", not complete")
+                        + ", at " + loss.wavelength(),
+                "",
+                100);
         out.printf(Locale.ROOT, ROW, "glass " + unit.symbol(), "", "loss dB", "limit dB");
         List<Length> before = path.glassBefore();
         for (int index = 0; index < before.size(); index++) {
@@ -73,17 +79,12 @@ final class TraceTable {
     }
 
     private void row(Length at, String what, Loss expected, Loss limit) {
-        out.printf(
-                Locale.ROOT,
-                ROW,
-                length(at),
-                Output.cut(what, WHAT),
-                decibels(expected),
-                decibels(limit));
+        out.printf(Locale.ROOT, ROW, length(at), Output.cut(what, WHAT), decibels(expected), decibels(limit));
     }
 
     private void budget(BudgetCheck check) {
-        String name = check.budget().code() == null ? "" : "class " + check.budget().code() + ", ";
+        String name =
+                check.budget().code() == null ? "" : "class " + check.budget().code() + ", ";
         String margin = check.margin().microdecibels() == 0 ? "" : " less " + decibels(check.margin()) + " dB margin";
         String verdict = check.passes() ? "passes" : "fails";
         String limit = check.passesAtLimit() ? "passes" : "fails";
@@ -97,7 +98,8 @@ final class TraceTable {
             case CONNECTOR -> "connector " + ((Connector) loss.element()).name();
             case SPLICE -> splice((Splice) loss.element());
             case FIBER -> fiber((Fiber) loss.element());
-            case THROUGH -> "  through " + ((Through) loss.element()).enclosure().code();
+            case THROUGH ->
+                "  through " + ((Through) loss.element()).enclosure().code();
             case JUMPER -> "jumper    " + ((Jumper) loss.element()).a() + " = " + ((Jumper) loss.element()).b();
             case SPLITTER -> splitter((SplitterCrossing) loss.element());
         };
@@ -105,8 +107,8 @@ final class TraceTable {
 
     private static String splice(Splice splice) {
         String tray = splice.joint().facts().tray();
-        return "splice    " + splice.a() + " = " + splice.b() + "  " + splice.enclosure().code()
-                + (tray == null || splice.pigtail() ? "" : " tray " + tray);
+        return "splice    " + splice.a() + " = " + splice.b() + "  "
+                + splice.enclosure().code() + (tray == null || splice.pigtail() ? "" : " tray " + tray);
     }
 
     private String fiber(Fiber fiber) {
@@ -117,8 +119,9 @@ final class TraceTable {
 
     private static String splitter(SplitterCrossing crossing) {
         String side = crossing.towardOutput() ? "to output " : "from output ";
-        return "splitter  " + crossing.splitter().code() + "  1:" + crossing.splitter().outputs() + "  " + side
-                + crossing.output() + "  " + crossing.enclosure().code();
+        return "splitter  " + crossing.splitter().code() + "  1:"
+                + crossing.splitter().outputs() + "  " + side + crossing.output() + "  "
+                + crossing.enclosure().code();
     }
 
     private String length(Length length) {
