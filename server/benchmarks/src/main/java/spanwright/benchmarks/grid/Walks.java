@@ -9,7 +9,7 @@ import java.util.Random;
  * Lays circuits over the grid: groups of 1, 2, 4 or 12 fibers on random walks biased straight ahead, spliced at every
  * node, each group brought to ports at both ends; and for a share of the glass feeders that end at a 1:32 splitter
  * whose outputs walk on to ports of their own. What is left runs straight on its own number, in chains of 40 sections
- * at the most, or stays dark.
+ * at the most, is spliced to what another cable has left, or stays dark.
  */
 final class Walks {
 
@@ -54,6 +54,7 @@ final class Walks {
             group();
         }
         express();
+        new SpareSplices(grid, joins).splice();
     }
 
     private int[] port(int node, int count) {
