@@ -38,7 +38,7 @@ export class MapView extends LitElement {
     this.pointer = null;
     /** @type {import("../path/track.js").Measure} how far along the path is said */
     this.measure = "glass";
-    /** @type {import("./camera.js").Standpoint | null} where to begin */
+    /** @type {import("./camera.js").Standpoint | null} where the map was left, until something else is opened */
     this.standpoint = null;
     /** @type {string} from which records; another one fetches anew */
     this.stamp = "";
@@ -81,7 +81,7 @@ export class MapView extends LitElement {
       this.stock.forget();
       if (this.drawing.frame()) this.moved();
     }
-    if (changed.has("path")) this.takePath(map, changed.get("path") === undefined);
+    if (changed.has("path")) this.takePath(map);
     if (changed.has("shown")) this.takeShown(map);
     if (changed.has("pointer") || changed.has("path") || this.pointer !== null) this.takePointer();
   }
@@ -116,12 +116,12 @@ export class MapView extends LitElement {
     this.drawing.redraw();
   }
 
-  /** @param {LeafletMap} map @param {boolean} first */
-  takePath(map, first) {
+  /** @param {LeafletMap} map */
+  takePath(map) {
     const { path } = this;
     const known = path !== null && path.track.length > 0;
     this.drawing.atHand.path = known ? worldLine(pointsOf(path)) : null;
-    if (known && !(first && this.standpoint)) this.afterLayout(() => fit(map, pointsOf(path)));
+    if (known) this.afterLayout(() => fit(map, pointsOf(path)));
     this.drawing.redraw();
   }
 
@@ -138,13 +138,15 @@ export class MapView extends LitElement {
   }
 
   /**
-   * Moves the map once its place on the page is settled: a strip that comes up takes room from it.
+   * Moves the map once its place on the page is settled: a strip that comes up takes room from it. Where the page opens
+   * as it was left, the map stays where it was left.
    * @param {() => void} move
    */
   afterLayout(move) {
+    const stays = this.standpoint !== null;
     requestAnimationFrame(() => {
       this.map?.invalidateSize({ animate: false, pan: false });
-      if (this.drawing.frame()) move();
+      if (!stays && this.drawing.frame()) move();
     });
   }
 

@@ -27,6 +27,8 @@ export class ShellView extends LitElement {
     super();
     const before = kept();
     if (location.hash === "" && before.hash) history.replaceState(null, "", before.hash);
+    /** @type {import("../map/camera.js").Standpoint | null} where the map was left with what is open; null once something else is */
+    this.standpoint = location.hash === before.hash ? before.stand : null;
     /** @type {Address} */
     this.address = currentAddress();
     /** @type {number | null} glass from the path's start */
@@ -37,7 +39,6 @@ export class ShellView extends LitElement {
     this.measure = before.measure;
     this.folded = before.folded;
     this.keysOpen = false;
-    this.standpoint = before.stand;
     /** @type {Asking<Status>} */
     this.status = new Asking(this);
     /** @type {Asking<Traced>} */
@@ -98,6 +99,7 @@ export class ShellView extends LitElement {
   arrive(address) {
     const before = this.address;
     this.address = address;
+    this.standpoint = null;
     keep({ hash: location.hash });
     answerFrom(address.asOf, address.asIf);
     const elsewhen = before.asOf !== address.asOf || before.asIf !== address.asIf;
