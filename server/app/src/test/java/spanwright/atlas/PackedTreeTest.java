@@ -3,6 +3,7 @@ package spanwright.atlas;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -59,16 +60,16 @@ class PackedTreeTest {
 
     @Test
     void neighbours_on_the_curve_share_a_side() {
-        Map<Long, int[]> cells = new HashMap<>();
+        int[][] cells = new int[64 * 64][];
         for (int x = 0; x < 64; x++) {
             for (int y = 0; y < 64; y++) {
-                cells.put(Hilbert.position(x, y), new int[] {x, y});
+                cells[(int) Hilbert.position(x, y)] = new int[] {x, y};
             }
         }
-        assertThat(cells).hasSize(64 * 64);
-        for (long along = 1; along < 64 * 64; along++) {
-            int[] before = cells.get(along - 1);
-            int[] here = cells.get(along);
+        assertThat(Arrays.asList(cells)).doesNotContainNull();
+        for (int along = 1; along < cells.length; along++) {
+            int[] before = cells[along - 1];
+            int[] here = cells[along];
             assertThat(Math.abs(before[0] - here[0]) + Math.abs(before[1] - here[1]))
                     .as("step %s", along)
                     .isEqualTo(1);

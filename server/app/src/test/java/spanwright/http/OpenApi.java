@@ -15,6 +15,7 @@ import java.net.http.HttpResponse;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 
 /** Holds requests and answers to {@code schema/openapi.json}, out of the jar's own copy. */
@@ -43,11 +44,11 @@ final class OpenApi {
     /** Every operation as {@code GET /structures/{code}}. */
     List<String> operations() {
         List<String> operations = new ArrayList<>();
-        document.path("paths")
-                .fields()
-                .forEachRemaining(path -> path.getValue()
-                        .fieldNames()
-                        .forEachRemaining(method -> operations.add(method.toUpperCase() + " " + path.getKey())));
+        for (Map.Entry<String, JsonNode> path : document.path("paths").properties()) {
+            path.getValue()
+                    .fieldNames()
+                    .forEachRemaining(method -> operations.add(method.toUpperCase(Locale.ROOT) + " " + path.getKey()));
+        }
         return operations;
     }
 
@@ -55,7 +56,7 @@ final class OpenApi {
     JsonNode check(String method, String path, HttpResponse<byte[]> answer) {
         String name = method + " " + answer.uri() + " " + answer.statusCode();
         String pointer =
-                "/paths/" + path.replace("~", "~0").replace("/", "~1") + "/" + method.toLowerCase() + "/responses/";
+                "/paths/" + path.replace("~", "~0").replace("/", "~1") + "/" + method.toLowerCase(Locale.ROOT) + "/responses/";
         String response = document.at(pointer + answer.statusCode()).isMissingNode()
                 ? pointer + "default"
                 : pointer + answer.statusCode();

@@ -6,6 +6,7 @@ import java.time.Clock;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 import spanwright.answers.LastChanges;
 import spanwright.answers.RowTexts;
 import spanwright.answers.Views;
@@ -26,7 +27,7 @@ final class TestServer implements AutoCloseable {
 
     private final Ledger ledger = new MemoryLedger(Clock.systemUTC());
     private final ServerOptions options;
-    private WebServer server;
+    private @Nullable WebServer server;
 
     TestServer() {
         this(ServerOptions.at("127.0.0.1", 0));
@@ -64,10 +65,9 @@ final class TestServer implements AutoCloseable {
     }
 
     WebServer server() {
-        if (server == null) {
-            server = WebServer.start(options, api(ledger));
-        }
-        return server;
+        WebServer running = server == null ? WebServer.start(options, api(ledger)) : server;
+        server = running;
+        return running;
     }
 
     Asking asking() {
