@@ -55,8 +55,8 @@ final class OpenApi {
     /** Checks status, content type and body of an answer; gives the body. */
     JsonNode check(String method, String path, HttpResponse<byte[]> answer) {
         String name = method + " " + answer.uri() + " " + answer.statusCode();
-        String pointer =
-                "/paths/" + path.replace("~", "~0").replace("/", "~1") + "/" + method.toLowerCase(Locale.ROOT) + "/responses/";
+        String pointer = "/paths/" + path.replace("~", "~0").replace("/", "~1") + "/" + method.toLowerCase(Locale.ROOT)
+                + "/responses/";
         String response = document.at(pointer + answer.statusCode()).isMissingNode()
                 ? pointer + "default"
                 : pointer + answer.statusCode();
