@@ -17,6 +17,7 @@ final class Curve {
         this.points = points;
     }
 
+    /** One tabled value. */
     private record Point(Wavelength wavelength, double value) {}
 
     /**

@@ -37,6 +37,7 @@ public final class GlassValues {
         this.catalogue = new Catalogue(records);
     }
 
+    /** The table of a fiber type. */
     private record TypeCurves(FiberType type, Curve loss, Curve limit, Curve index) {
 
         static TypeCurves of(FiberType type) {
@@ -52,6 +53,7 @@ public final class GlassValues {
         }
     }
 
+    /** The sheet of one reel. */
     private record ReelCurves(List<CableValue> rows, Curve loss, Curve index) {
 
         static ReelCurves of(List<CableValue> rows) {
@@ -110,6 +112,7 @@ public final class GlassValues {
         return type.limit().at(wavelength).map(reading -> ofType(type, reading, Column.LIMIT));
     }
 
+    /** Which value of a row. */
     private enum Column {
         LOSS,
         LIMIT,

@@ -1,5 +1,6 @@
 package spanwright.records;
 
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -168,8 +169,9 @@ public final class CableLay {
         return own == null ? type.overlengthPct() : own;
     }
 
-    /** The glass in a length of sheath, tray glass apart. */
+    /** The glass in a length of sheath, tray glass apart; rounded half-even to the micrometre. */
     public Length glass(Length sheath) {
-        return sheath.times(1 + overlengthPct() / 100);
+        BigDecimal factor = BigDecimal.valueOf(overlengthPct()).movePointLeft(2).add(BigDecimal.ONE);
+        return Length.ofMetres(sheath.exactMetres().multiply(factor));
     }
 }

@@ -2,9 +2,10 @@ package spanwright.trace;
 
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.LinkedHashSet;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import java.util.stream.IntStream;
 import spanwright.network.Block;
 import spanwright.network.Network;
 
@@ -18,6 +19,8 @@ final class FiberTrace {
     private final int cable;
     private final int fiber;
     private final List<Route> routes = new ArrayList<>();
+    /** What was found so far: a path through two pieces of the fiber counts once. */
+    private final Set<List<Integer>> known = new HashSet<>();
 
     FiberTrace(Network network, Walker walker, int cable, int fiber) {
         this.network = network;
@@ -110,7 +113,7 @@ final class FiberTrace {
         for (Walk back : backward) {
             if (back.stop() == Walk.Stop.CROSSED) {
                 int[] piece = Arrays.copyOf(onward.get(0).entered(), sections);
-                routes.add(Route.circle(back.turnedWithoutFirst(), piece, true));
+                add(Route.circle(back.turnedWithoutFirst(), piece, true));
             } else if (!back.loop()) {
                 join(back, onward);
             }
@@ -118,27 +121,33 @@ final class FiberTrace {
         // A circle that closes at the piece is found both ways; it counts once.
         for (Walk on : onward) {
             if (on.loop()) {
-                routes.add(Route.circle(NOTHING, on.entered(), on.stop() == Walk.Stop.CIRCLE));
+                add(Route.circle(NOTHING, on.entered(), on.stop() == Walk.Stop.CIRCLE));
             }
         }
     }
 
     private void join(Walk back, List<Walk> onward) {
-        Set<Integer> walked = new LinkedHashSet<>();
+        Set<Integer> walked = new HashSet<>();
         for (int entering : back.turnedWithoutFirst()) {
             walked.add(entering >> 1);
         }
-        Set<List<Integer>> circles = new LinkedHashSet<>();
         for (Walk on : onward) {
             int met = on.loop() ? -1 : firstOf(walked, on.entered());
             if (met >= 0) {
-                int[] until = Arrays.copyOf(on.entered(), met);
-                if (circles.add(Arrays.stream(until).boxed().toList())) {
-                    routes.add(Route.circle(back.turnedWithoutFirst(), until, true));
-                }
+                add(Route.circle(back.turnedWithoutFirst(), Arrays.copyOf(on.entered(), met), true));
             } else if (!on.loop()) {
-                routes.add(Route.open(back, on));
+                add(Route.open(back, on));
             }
+        }
+    }
+
+    private void add(Route route) {
+        List<Integer> entered = new ArrayList<>();
+        entered.add(route.first());
+        entered.add(route.circle() ? route.back().length : 0);
+        IntStream.concat(Arrays.stream(route.back()), Arrays.stream(route.onward())).forEach(entered::add);
+        if (known.add(entered)) {
+            routes.add(route);
         }
     }
 

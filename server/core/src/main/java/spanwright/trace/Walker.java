@@ -21,6 +21,8 @@ final class Walker {
     static final int MOST_WALKS = 1 << 16;
     /** The most splitters in a row on one walk; light is long gone. */
     static final int MOST_SPLITTERS = 500;
+    /** How many crossings to try for one end before terminals are tried once only. */
+    private static final int MOST_CROSSINGS = 20_000;
 
     private final Network network;
     private final int mostWalks;
@@ -47,10 +49,18 @@ final class Walker {
         return search.found;
     }
 
-    /** The first walk that begins by entering a piece by an end and comes to stand at another end, if any. */
+    /**
+     * The first walk that begins by entering a piece by an end and comes to stand at another end, if any. Where splitters
+     * make a lattice with too many ways to try, no terminal is tried twice.
+     */
     Optional<Walk> find(int entering, int target) {
         Search search = new Search(entering, target);
         search.walk(entering);
+        if (search.found.isEmpty() && search.crossings > MOST_CROSSINGS) {
+            search = new Search(entering, target);
+            search.once = true;
+            search.walk(entering);
+        }
         return search.found.stream().findFirst();
     }
 
@@ -84,6 +94,9 @@ final class Walker {
         private final int start;
         private final int target;
         private boolean plain;
+        private boolean once;
+        private int crossings;
+        private int depth;
         private final List<Walk> found = new ArrayList<>();
         private final Set<Integer> crossed = new HashSet<>();
         private int[] trail = new int[64];
@@ -127,10 +140,12 @@ final class Walker {
 
         private void cross(int terminal) {
             int[] across = across(terminal);
-            if ((plain && across.length > 1) || crossed.size() >= 2 * mostSplitters) {
+            if ((plain && across.length > 1) || depth >= mostSplitters) {
                 emit(Walk.Stop.CHOICE);
                 return;
             }
+            depth++;
+            crossings++;
             crossed.add(terminal);
             boolean circled = false;
             for (int other : across) {
@@ -145,16 +160,16 @@ final class Walker {
                     circled = true;
                     emit(Walk.Stop.CROSSED);
                 }
-                if (target != Network.NONE && !found.isEmpty()) {
+                if (target != Network.NONE && (!found.isEmpty() || (!once && crossings > MOST_CROSSINGS))) {
                     break;
                 }
             }
             leave(terminal);
+            depth--;
         }
 
-        /** Who looks for one end need not try a terminal twice. */
         private void leave(int terminal) {
-            if (target == Network.NONE) {
+            if (!once) {
                 crossed.remove(terminal);
             }
         }

@@ -11,12 +11,12 @@ import java.util.Map;
 import spanwright.quantity.Length;
 
 /** Sheath positions reckoned the slow way: stretch by stretch, place by place, in decimal metres. */
-final class SheathTwin {
+public final class SheathTwin {
 
     private SheathTwin() {}
 
     /** In and out of each row, in metres to the micrometre. */
-    static List<BigDecimal> positions(List<Length> slack, List<Length> spans, List<SheathTie> ties) {
+    public static List<BigDecimal> positions(List<Length> slack, List<Length> spans, List<SheathTie> ties) {
         List<BigDecimal> stretches = new ArrayList<>();
         for (int row = 0; row < slack.size(); row++) {
             if (row > 0) {
