@@ -1,15 +1,21 @@
 package spanwright.records;
 
 import java.math.BigDecimal;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import spanwright.plant.Cable;
 import spanwright.plant.CableType;
 import spanwright.plant.Enclosure;
+import spanwright.plant.LengthBasis;
 import spanwright.plant.PlantState;
 import spanwright.plant.RouteLength;
 import spanwright.plant.RunRow;
@@ -161,6 +167,33 @@ public final class CableLay {
     /** Its sheath positions. */
     public SheathPositions positions() {
         return positions;
+    }
+
+    /** What the sheath between the enclosures' places at two rows, either way round, rests on. */
+    public LengthBasis basis(int oneRow, int otherRow) {
+        return positions.basis(positions.enclosure(Math.min(oneRow, otherRow)), positions.enclosure(Math.max(oneRow, otherRow)));
+    }
+
+    /** Where that length comes from, for a person: {@code White marks 24220 ft and 20281 ft, read 2025-09-30}. */
+    public String source(int oneRow, int otherRow) {
+        Optional<SheathTie> from = positions.findTieBefore(positions.enclosure(Math.min(oneRow, otherRow)));
+        Optional<SheathTie> to = positions.findTieAfter(positions.enclosure(Math.max(oneRow, otherRow)));
+        if (from.isEmpty() || to.isEmpty() || basis(oneRow, otherRow) != LengthBasis.MARKS) {
+            return "Route lengths and coils; no sheath marks on both sides";
+        }
+        String read = Stream.of(from.get(), to.get())
+                .map(SheathTie::readOn)
+                .filter(Objects::nonNull)
+                .distinct()
+                .map(LocalDate::toString)
+                .collect(Collectors.joining(" and "));
+        String ink = cable.marksInk();
+        return ink.substring(0, 1).toUpperCase(Locale.ROOT) + ink.substring(1) + " marks "
+                + printed(from.get()) + " and " + printed(to.get()) + (read.isEmpty() ? "" : ", read " + read);
+    }
+
+    private static String printed(SheathTie tie) {
+        return tie.number().toPlainString() + " " + tie.unit().symbol();
     }
 
     /** Excess length in per cent: this reel's own, else its type's. */

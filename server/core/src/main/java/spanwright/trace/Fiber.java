@@ -3,6 +3,7 @@ package spanwright.trace;
 import java.util.Optional;
 import spanwright.plant.Cable;
 import spanwright.plant.Enclosure;
+import spanwright.plant.LengthBasis;
 import spanwright.plant.Structure;
 import spanwright.quantity.Length;
 import spanwright.records.CableLay;
@@ -95,5 +96,15 @@ public record Fiber(
     /** Its route, coils apart. */
     public Length route() {
         return lay.routeTo(toRow).minus(lay.routeTo(fromRow)).abs();
+    }
+
+    /** What its length of sheath rests on. */
+    public LengthBasis lengthBasis() {
+        return lay.basis(fromRow, toRow);
+    }
+
+    /** Where its length of sheath comes from, for a person. */
+    public String lengthSource() {
+        return lay.source(fromRow, toRow);
     }
 }
