@@ -35,6 +35,11 @@ public final class Measurements {
                         .add(measurement));
     }
 
+    /** Whether there is none at all. */
+    public boolean isEmpty() {
+        return byWhat.isEmpty();
+    }
+
     /** All measurements of a thing, by any of its names, at a wavelength, in order of time. */
     public List<Measurement> list(Wavelength wavelength, String... names) {
         return Stream.of(names)

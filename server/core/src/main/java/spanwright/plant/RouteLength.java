@@ -34,6 +34,9 @@ public record RouteLength(Length length, LengthBasis basis, RouteLine line) {
         }
         RouteLine line = RouteLine.along(drawn.positions());
         Position first = drawn.positions().get(0);
+        if (first.equals(from)) {
+            return line;
+        }
         Position last = drawn.positions().get(drawn.positions().size() - 1);
         double asDrawn = RouteLine.metres(from, first) + RouteLine.metres(to, last);
         double turned = RouteLine.metres(from, last) + RouteLine.metres(to, first);

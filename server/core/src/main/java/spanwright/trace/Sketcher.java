@@ -27,6 +27,9 @@ import spanwright.splicing.Splitter;
 /** Makes elements and ends of the pieces that a walk enters. One thread's. */
 final class Sketcher {
 
+    /** How many lays are kept at hand. */
+    private static final int MOST_LAYS = 4096;
+
     private final Network network;
     private final Records records;
     private final Catalogue catalogue;
@@ -177,6 +180,9 @@ final class Sketcher {
     }
 
     private CableLay lay(int cable) {
+        if (lays.size() >= MOST_LAYS) {
+            lays.clear();
+        }
         return lays.computeIfAbsent(cable, id -> CableLay.of(records, id));
     }
 
