@@ -28,15 +28,17 @@ import spanwright.splicing.Splitter;
 final class Sketcher {
 
     /** How many lays are kept at hand. */
-    private static final int MOST_LAYS = 4096;
+    static final int MOST_LAYS = 4096;
 
     private final Network network;
     private final Records records;
     private final Catalogue catalogue;
     private final EndNames names;
+    private final int mostLays;
     private final Map<Integer, CableLay> lays = new HashMap<>();
 
-    Sketcher(Snapshot snapshot) {
+    Sketcher(Snapshot snapshot, int mostLays) {
+        this.mostLays = mostLays;
         this.network = snapshot.network();
         this.records = snapshot.records();
         this.catalogue = new Catalogue(records);
@@ -180,7 +182,7 @@ final class Sketcher {
     }
 
     private CableLay lay(int cable) {
-        if (lays.size() >= MOST_LAYS) {
+        if (lays.size() >= mostLays) {
             lays.clear();
         }
         return lays.computeIfAbsent(cable, id -> CableLay.of(records, id));

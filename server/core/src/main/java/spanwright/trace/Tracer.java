@@ -27,14 +27,14 @@ public final class Tracer {
 
     /** A tracer of that snapshot. */
     public Tracer(Snapshot snapshot) {
-        this(snapshot, new Walker(snapshot.network()));
+        this(snapshot, new Walker(snapshot.network()), Sketcher.MOST_LAYS);
     }
 
-    Tracer(Snapshot snapshot, Walker walker) {
+    Tracer(Snapshot snapshot, Walker walker, int mostLays) {
         this.network = snapshot.network();
         this.records = snapshot.records();
         this.walker = walker;
-        this.sketcher = new Sketcher(snapshot);
+        this.sketcher = new Sketcher(snapshot, mostLays);
     }
 
     /**

@@ -36,11 +36,11 @@ final class LossTwin {
     private static final MathContext EXACT = new MathContext(34);
 
     private static final String[] NANOMETRES =
-            "1260 1270 1310 1383 1490 1529 1530 1550 1565 1566 1577 1625 1650".split(" ");
+            "1260 1270 1310 1383 1490 1529 1530 1550 1565 1566 1577 1625 1650".split(" ", -1);
     private static final String[] EXPECTED =
-            "0.41 0.40 0.35 0.34 0.24 0.22 0.22 0.22 0.22 0.22 0.22 0.25 0.27".split(" ");
+            "0.41 0.40 0.35 0.34 0.24 0.22 0.22 0.22 0.22 0.22 0.22 0.25 0.27".split(" ", -1);
     private static final String[] LIMIT =
-            "0.50 0.50 0.40 0.40 0.40 0.40 0.30 0.30 0.30 0.40 0.40 0.40 0.45".split(" ");
+            "0.50 0.50 0.40 0.40 0.40 0.40 0.30 0.30 0.30 0.40 0.40 0.40 0.45".split(" ", -1);
 
     private static final Map<String, String> PLANNING = Map.of(
             "splice.fusion", "0.10 0.30 0.05",
@@ -211,7 +211,7 @@ final class LossTwin {
                 .filter(value -> value.item().equals(item))
                 .findFirst()
                 .orElse(null);
-        String[] table = Objects.requireNonNull(PLANNING.get(item), item).split(" ");
+        String[] table = Objects.requireNonNull(PLANNING.get(item), item).split(" ", -1);
         Loss most = own == null ? null : own.limit();
         Loss deviation = own == null ? null : own.sd();
         BigDecimal mean = own == null ? new BigDecimal(table[0]) : own.expected().exactDecibels();

@@ -1,9 +1,13 @@
 package spanwright.trace;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import java.util.List;
 import org.junit.jupiter.api.Test;
+import spanwright.circuits.Circuit;
 import spanwright.network.Snapshot;
+import spanwright.plant.LengthBasis;
 import spanwright.plants.Drawing;
 
 class TracerTest {
@@ -323,5 +327,64 @@ class TracerTest {
         assertThat(TraceText.ofFiber(Drawing.asIf("J-1", drawing), "F-1", 1))
                 .isEqualTo("F-1 start 1 >> F-1:1 ->E2 100/100 | F-1 back 1 ~ D-1 ahead 1 | D-1:1 E2>- 100/100"
                         + " >> D-1 end 1");
+    }
+
+    @Test
+    void few_lays_kept_at_hand_change_nothing() {
+        Snapshot plant = Drawing.of(
+                """
+                cable F-1 1 : H1 100 H2
+                cable D-1 1 : H2 50 H3
+                enclosure E2 H2 : F-1 D-1
+                splice E2 : F-1 back 1 = D-1 ahead 1
+                """);
+        int cable = plant.records().cables().find("F-1").orElseThrow().id();
+
+        assertThat(TraceText.lines(new Tracer(plant, new Walker(plant.network()), 1).ofFiber(cable, 1)))
+                .isEqualTo(TraceText.ofFiber(plant, "F-1", 1));
+    }
+
+    @Test
+    void a_fiber_cut_and_joined_to_itself_is_one_path_though_two_pieces() {
+        Snapshot plant = Drawing.of(
+                """
+                cable F-1 2 : H1 100 H2 100 H3
+                enclosure E2 H2 : F-1
+                splice E2 : F-1 back 1 = F-1 ahead 1
+                """);
+
+        assertThat(TraceText.ofFiber(plant, "F-1", 1))
+                .isEqualTo("F-1 start 1 >> F-1:1 ->E2 100/100 | F-1 back 1 ~ F-1 ahead 1 | F-1:1 E2>- 100/100"
+                        + " >> F-1 end 1");
+    }
+
+    @Test
+    void a_path_is_governed_by_the_circuit_asked_for_else_by_the_first_on_it() {
+        Snapshot plant = Drawing.of(
+                """
+                cable F-1 1 : H1 100 H2
+                enclosure E1 H1 : F-1
+                enclosure E2 H2 : F-1
+                panel E1 P 1
+                panel E2 P 1
+                term E1/P/1 = F-1 ahead 1
+                term E2/P/1 = F-1 back 1 direct
+                circuit C-2 E1/P/1 E2/P/1
+                circuit C-1 E1/P/1 E2/P/1
+                """);
+        Tracer tracer = new Tracer(plant);
+        Circuit asked = plant.records().circuits().find("C-2").orElseThrow();
+        Path path = tracer.fromPort(1, 1).get(0);
+
+        assertThat(tracer.ofCircuit(asked).get(0).governing()).contains(asked);
+        assertThat(path.governing().map(Circuit::code)).contains("C-1");
+        assertThat(path.list(Splice.class).get(0).pigtail()).isTrue();
+        assertThat(path.list(Fiber.class).get(0).lengthBasis()).isEqualTo(LengthBasis.NOMINAL);
+        assertThat(path.list(Fiber.class).get(0).lengthSource()).startsWith("Route lengths");
+        assertThat(path.list(Fiber.class).get(0).tubeColor()).isEqualTo("blue");
+        assertThat(path.list(Connector.class).get(0).directTermination()).isNull();
+        assertThat(path.list(Connector.class).get(1).directTermination()).isNotNull();
+        assertThatThrownBy(() -> new Path(List.of(), List.of(), false, false, List.of(), null))
+                .hasMessageContaining("two ends");
     }
 }

@@ -54,7 +54,7 @@ class WalkerTest {
         int cable = plant.records().cables().find("F-1").orElseThrow().id();
 
         assertThat(new Tracer(plant).ofFiber(cable, 1)).hasSize(16);
-        List<Path> few = new Tracer(plant, new Walker(plant.network(), 15, 100)).ofFiber(cable, 1);
+        List<Path> few = new Tracer(plant, new Walker(plant.network(), 15, 100), 1).ofFiber(cable, 1);
         assertThat(few.stream().map(path -> path.ends().get(0).name() + " to " + path.ends().get(1).name()))
                 .containsExactly(
                         "S1 out 1 @ E1 to S2 in @ E2",
@@ -86,9 +86,25 @@ class WalkerTest {
 
     private static String ends(Snapshot plant, int mostWalks, int mostSplitters) {
         PortRange ports = Drawing.ports(plant.records(), "E1/P/1");
-        Tracer tracer = new Tracer(plant, new Walker(plant.network(), mostWalks, mostSplitters));
+        Tracer tracer = new Tracer(plant, new Walker(plant.network(), mostWalks, mostSplitters), 1);
         return tracer.fromPort(ports.panel(), ports.ports().first()).stream()
                 .map(path -> path.ends().get(1).name())
                 .collect(Collectors.joining("; "));
+    }
+
+    @Test
+    void a_long_walk_is_walked_to_its_end() {
+        String rows = IntStream.rangeClosed(2, 200).mapToObj(at -> " 10 H" + at).collect(Collectors.joining());
+        String enclosures = IntStream.rangeClosed(1, 200)
+                .mapToObj(at -> "enclosure E" + at + " H" + at + " : F-1\n")
+                .collect(Collectors.joining());
+        Snapshot plant = Drawing.of("cable F-1 1 : H1" + rows + "\n" + enclosures);
+        int cable = plant.records().cables().find("F-1").orElseThrow().id();
+
+        Path path = new Tracer(plant).ofFiber(cable, 1).get(0);
+
+        assertThat(path.count(ElementKind.FIBER)).isEqualTo(199);
+        assertThat(path.count(ElementKind.THROUGH)).isEqualTo(198);
+        assertThat(path.sheath().metres()).isEqualTo(1990);
     }
 }
