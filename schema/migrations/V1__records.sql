@@ -65,7 +65,7 @@ CREATE TABLE cable_type (
     fibers_per_tube INTEGER NOT NULL CHECK (fibers_per_tube > 0),
     fiber_type TEXT NOT NULL, -- by code: the built-in ones are not records
     overlength_pct REAL NOT NULL,
-    ribbon INTEGER NOT NULL CHECK (ribbon IN (0, 1)),
+    ribbon INTEGER NOT NULL CHECK (ribbon = 0 OR ribbon = 1),
     fibers_per_ribbon INTEGER,
     colors TEXT NOT NULL -- by code, as fiber_type
 ) STRICT;
@@ -147,7 +147,7 @@ CREATE TABLE splitter (
     id INTEGER PRIMARY KEY,
     enclosure INTEGER NOT NULL REFERENCES enclosure DEFERRABLE INITIALLY DEFERRED,
     code TEXT NOT NULL,
-    inputs INTEGER NOT NULL CHECK (inputs IN (1, 2)),
+    inputs INTEGER NOT NULL CHECK (inputs = 1 OR inputs = 2),
     outputs INTEGER NOT NULL CHECK (outputs BETWEEN 2 AND 128),
     loss_udb INTEGER,
     output_losses TEXT NOT NULL, -- output=loss_udb, parted by spaces; of unequal taps only
@@ -164,16 +164,19 @@ CREATE TABLE panel (
 ) STRICT;
 
 -- A range of joints made alike: ends a_first..a_last of one leg joined in order to b_first..b_last of another. A
--- leg is a run row (back, ahead), a splitter (in, out) or a panel (rear, front), as its side says.
+-- leg is a run row (back, ahead), a splitter (in, out) or a panel (rear, front), as its side says. The words are
+-- compared one by one: for a list of them (IN) SQLite would build an index for each row added.
 CREATE TABLE joint (
     id INTEGER PRIMARY KEY,
     kind TEXT NOT NULL,
     enclosure INTEGER NOT NULL REFERENCES enclosure DEFERRABLE INITIALLY DEFERRED,
-    a_side TEXT NOT NULL CHECK (a_side IN ('back', 'ahead', 'in', 'out', 'rear', 'front')),
+    a_side TEXT NOT NULL CHECK (a_side = 'back' OR a_side = 'ahead' OR a_side = 'in'
+        OR a_side = 'out' OR a_side = 'rear' OR a_side = 'front'),
     a_leg INTEGER NOT NULL,
     a_first INTEGER NOT NULL,
     a_last INTEGER NOT NULL,
-    b_side TEXT NOT NULL CHECK (b_side IN ('back', 'ahead', 'in', 'out', 'rear', 'front')),
+    b_side TEXT NOT NULL CHECK (b_side = 'back' OR b_side = 'ahead' OR b_side = 'in'
+        OR b_side = 'out' OR b_side = 'rear' OR b_side = 'front'),
     b_leg INTEGER NOT NULL,
     b_first INTEGER NOT NULL,
     b_last INTEGER NOT NULL,
@@ -187,7 +190,7 @@ CREATE TABLE joint (
     temporary_until TEXT,
     job TEXT,
     jumper_length_um INTEGER,
-    CHECK (abs(a_last - a_first) = abs(b_last - b_first))
+    CHECK (a_last - a_first = b_last - b_first OR a_last - a_first = b_first - b_last)
 ) STRICT;
 CREATE INDEX joint_in_enclosure ON joint (enclosure);
 
@@ -215,7 +218,8 @@ CREATE TABLE planned_end (
 CREATE TABLE end_state (
     id INTEGER PRIMARY KEY,
     enclosure INTEGER NOT NULL REFERENCES enclosure DEFERRABLE INITIALLY DEFERRED,
-    side TEXT NOT NULL CHECK (side IN ('back', 'ahead', 'in', 'out', 'rear', 'front')),
+    side TEXT NOT NULL CHECK (side = 'back' OR side = 'ahead' OR side = 'in'
+        OR side = 'out' OR side = 'rear' OR side = 'front'),
     leg INTEGER NOT NULL,
     first_end INTEGER NOT NULL,
     last_end INTEGER NOT NULL,
@@ -280,7 +284,7 @@ CREATE TABLE circuit (
     z_first INTEGER NOT NULL,
     z_last INTEGER NOT NULL,
     status TEXT NOT NULL,
-    CHECK (abs(a_last - a_first) = abs(z_last - z_first))
+    CHECK (a_last - a_first = z_last - z_first OR a_last - a_first = z_first - z_last)
 ) STRICT;
 CREATE INDEX circuit_at_a ON circuit (a_panel);
 CREATE INDEX circuit_at_z ON circuit (z_panel);
@@ -289,7 +293,7 @@ CREATE INDEX circuit_at_z ON circuit (z_panel);
 -- circuits use nothing), never both.
 CREATE TABLE front_use (
     end_key INTEGER PRIMARY KEY,
-    jumpers INTEGER NOT NULL CHECK (jumpers IN (0, 1)),
+    jumpers INTEGER NOT NULL CHECK (jumpers = 0 OR jumpers = 1),
     circuit_ends INTEGER NOT NULL CHECK (circuit_ends >= 0),
     CHECK (jumpers = 0 OR circuit_ends = 0)
 ) STRICT;

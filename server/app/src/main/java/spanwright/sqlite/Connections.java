@@ -61,6 +61,8 @@ final class Connections {
         config.setCacheSize(-cacheKib);
         config.setTempStore(SQLiteConfig.TempStore.MEMORY);
         config.setBusyTimeout(WAIT_MS);
+        // Else the driver asks for the last identity after each row, which takes as long as to add one.
+        config.setGetGeneratedKeys(false);
         return config;
     }
 

@@ -117,7 +117,7 @@ final class CableLayouts {
                     to.realIfAny(cable.overlengthPct());
                     to.textIfAny(cable.reel());
                     to.dateIfAny(cable.installedOn());
-                    to.text(cable.state().word());
+                    to.word(cable.state().word());
                     to.textIfAny(cable.note());
                 },
                 from -> new Cable(
@@ -177,7 +177,7 @@ final class CableLayouts {
                     to.integer(row.structure());
                     to.integerIfAny(row.span());
                     to.integer(row.slack().micrometres());
-                    to.text(row.slackTrust().word());
+                    to.word(row.slackTrust().word());
                     to.dateIfAny(row.slackOn());
                     to.textIfAny(row.duct());
                 },
@@ -208,11 +208,11 @@ final class CableLayouts {
                 (mark, to) -> {
                     to.integer(mark.runRow());
                     to.text(mark.ink());
-                    to.text(word(mark.unit()));
+                    to.word(word(mark.unit()));
                     to.textIfAny(printed(mark.markIn()));
                     to.textIfAny(printed(mark.markOut()));
                     to.dateIfAny(mark.readOn());
-                    to.text(mark.trust().word());
+                    to.word(mark.trust().word());
                 },
                 from -> new SheathMark(
                         from.number(),

@@ -53,12 +53,12 @@ final class PlantLayouts {
                 Structure.class,
                 (structure, to) -> {
                     to.text(structure.code());
-                    to.text(structure.type().word());
+                    to.word(structure.type().word());
                     to.real(structure.position().lon());
                     to.real(structure.position().lat());
                     to.lengthIfAny(structure.accuracy());
                     to.textIfAny(structure.address());
-                    to.text(structure.state().word());
+                    to.word(structure.state().word());
                     to.text(Lists.words(structure.sharedRisk(), ' '));
                     to.textIfAny(structure.note());
                 },
@@ -92,10 +92,10 @@ final class PlantLayouts {
                     to.text(span.code());
                     to.integer(span.from());
                     to.integer(span.to());
-                    to.text(span.placement().word());
+                    to.word(span.placement().word());
                     to.lengthIfAny(span.measuredLength());
                     to.textIfAny(line == null ? null : Lists.line(line));
-                    to.text(span.state().word());
+                    to.word(span.state().word());
                     to.text(Lists.words(span.sharedRisk(), ' '));
                     to.textIfAny(span.note());
                 },
@@ -128,9 +128,9 @@ final class PlantLayouts {
                 (enclosure, to) -> {
                     to.text(enclosure.code());
                     to.integer(enclosure.structure());
-                    to.text(enclosure.type().word());
+                    to.word(enclosure.type().word());
                     to.integer(enclosure.trayGlass().micrometres());
-                    to.text(enclosure.state().word());
+                    to.word(enclosure.state().word());
                     to.textIfAny(enclosure.note());
                 },
                 from -> new Enclosure(

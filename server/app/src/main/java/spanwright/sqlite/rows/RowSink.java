@@ -23,6 +23,20 @@ public interface RowSink {
     /** Nothing. */
     void none();
 
+    /** Text out of a small vocabulary, such as a kind or a state. */
+    default void word(String value) {
+        text(value);
+    }
+
+    /** A word or nothing. */
+    default void wordIfAny(@Nullable String value) {
+        if (value == null) {
+            none();
+        } else {
+            word(value);
+        }
+    }
+
     /** Yes or no, as 1 or 0. */
     default void flag(boolean value) {
         integer(value ? 1 : 0);

@@ -46,7 +46,7 @@ final class ServiceLayouts {
                     Direction direction = measurement.direction();
                     to.text(measurement.what());
                     to.integer(measurement.wavelength().picometres());
-                    to.textIfAny(direction == null ? null : direction.word());
+                    to.wordIfAny(direction == null ? null : direction.word());
                     to.integer(measurement.loss().microdecibels());
                     to.dateIfAny(measurement.on());
                     to.textIfAny(measurement.by());
@@ -81,7 +81,7 @@ final class ServiceLayouts {
                 (flag, to) -> {
                     to.integer(flag.cable());
                     writeRange(flag.fibers(), to);
-                    to.text(flag.flag().word());
+                    to.word(flag.flag().word());
                     to.integerIfAny(flag.from());
                     to.integerIfAny(flag.to());
                     to.textIfAny(flag.owner());
@@ -176,7 +176,7 @@ final class ServiceLayouts {
         writeRange(circuit.a().ports(), to);
         to.integer(circuit.z().panel());
         writeRange(circuit.z().ports(), to);
-        to.text(circuit.status().word());
+        to.word(circuit.status().word());
     }
 
     private static Layout planningValue() {

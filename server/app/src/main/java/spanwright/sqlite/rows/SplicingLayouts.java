@@ -95,7 +95,7 @@ final class SplicingLayouts {
                 RecordKind.JOINT,
                 Joint.class,
                 (joint, to) -> {
-                    to.text(JOINT_WORDS[joint.type().ordinal()]);
+                    to.word(JOINT_WORDS[joint.type().ordinal()]);
                     to.integer(joint.enclosure());
                     writeEnds(joint.a(), to);
                     writeEnds(joint.b(), to);
@@ -131,7 +131,7 @@ final class SplicingLayouts {
     }
 
     private static void writeEnds(EndRange ends, RowSink to) {
-        to.text(SIDE_WORDS[ends.leg().kind().ordinal()]);
+        to.word(SIDE_WORDS[ends.leg().kind().ordinal()]);
         to.integer(ends.leg().owner());
         to.integer(ends.numbers().first());
         to.integer(ends.numbers().last());
@@ -145,9 +145,9 @@ final class SplicingLayouts {
     private static void writeFacts(JointFacts facts, RowSink to) {
         SpliceMethod method = facts.method();
         to.textIfAny(facts.tray());
-        to.textIfAny(method == null ? null : method.word());
+        to.wordIfAny(method == null ? null : method.word());
         to.lossIfAny(facts.loss());
-        to.text(facts.trust().word());
+        to.word(facts.trust().word());
         to.dateIfAny(facts.verifiedOn());
         to.dateIfAny(facts.splicedOn());
         to.textIfAny(facts.splicedBy());
@@ -181,8 +181,8 @@ final class SplicingLayouts {
                 (state, to) -> {
                     to.integer(state.enclosure());
                     writeEnds(state.ends(), to);
-                    to.text(state.condition().word());
-                    to.text(state.trust().word());
+                    to.word(state.condition().word());
+                    to.word(state.trust().word());
                     to.dateIfAny(state.verifiedOn());
                 },
                 from -> new EndState(
