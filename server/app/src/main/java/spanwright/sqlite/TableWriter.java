@@ -86,8 +86,7 @@ final class TableWriter {
         }
         List<@Nullable String> literals = row.literals();
         Insert fresh = new Insert(
-                literals,
-                connection.prepareStatement(RowPattern.insert(layout.table(), layout.columns(), literals)));
+                literals, connection.prepareStatement(RowPattern.insert(layout.table(), layout.columns(), literals)));
         inserts.add(fresh);
         return fresh;
     }

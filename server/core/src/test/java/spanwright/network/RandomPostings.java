@@ -350,6 +350,13 @@ public final class RandomPostings {
     }
 
     private void rename(SnapshotEditor editor) {
+        Cable laid = any(editor.records().cables());
+        if (laid != null && random.nextInt(3) == 0) {
+            PlantState state = laid.state() == PlantState.IN_SERVICE ? PlantState.PLANNED : PlantState.IN_SERVICE;
+            editor.apply(Change.replace(
+                    laid, new Cable(laid.id(), laid.code(), 1, null, "white", null, null, null, state, null)));
+            return;
+        }
         Structure was = any(editor.records().structures());
         if (was != null) {
             String code = "P-" + was.id() + (was.code().endsWith("x") ? "" : "x");
