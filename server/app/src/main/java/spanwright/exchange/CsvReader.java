@@ -52,6 +52,7 @@ final class CsvReader {
     private int fields;
     private @Nullable String problem;
     private boolean held;
+    private boolean malformed;
     private boolean damaged;
 
     CsvReader(InputStream bytes, Listener listener) {
@@ -68,25 +69,40 @@ final class CsvReader {
         return plain;
     }
 
+    /** Moves to the first row; false where there is none or it is passed over, and then nothing can be read on. */
+    boolean first() throws IOException {
+        return begin() && read();
+    }
+
     /** Moves to the next whole row; false at the end of the file. */
     boolean next() throws IOException {
-        while (true) {
-            rowStart = at;
-            rowLine = line;
-            if (!more()) {
-                return false;
-            }
-            fields = 0;
-            problem = null;
-            held = true;
-            readRow();
-            noteMalformed();
-            if (problem == null) {
+        while (begin()) {
+            if (read()) {
                 return true;
             }
+        }
+        return false;
+    }
+
+    private boolean begin() throws IOException {
+        rowStart = at;
+        rowLine = line;
+        return more();
+    }
+
+    /** Reads a row; false where it is passed over. */
+    private boolean read() throws IOException {
+        fields = 0;
+        problem = null;
+        malformed = false;
+        held = true;
+        readRow();
+        noteMalformed();
+        if (problem != null) {
             damaged = true;
             listener.fault(rowLine, problem);
         }
+        return problem == null;
     }
 
     /** Whether any row has been passed over. */
@@ -255,8 +271,10 @@ final class CsvReader {
 
     private void noteMalformed() {
         Utf8Reader.Malformed bad = input.malformedBefore(dropped + at);
-        if (bad != null) {
-            problem(bad.sentence());
+        if (bad != null && !malformed) {
+            // Whatever else seems wrong with the row may come of its bytes.
+            malformed = true;
+            problem = bad.sentence();
         }
     }
 

@@ -3,6 +3,7 @@ package spanwright.exchange;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import spanwright.journal.Change;
+import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
 import spanwright.network.SnapshotEditor;
 import spanwright.plant.RunRow;
@@ -27,6 +28,11 @@ final class Entering {
 
     RecordsView view() {
         return editor.records();
+    }
+
+    /** An identity for a record that is entered later. */
+    int newIdentity(RecordKind kind) {
+        return editor.records().newIdentity(kind);
     }
 
     References refs() {
@@ -68,6 +74,11 @@ final class Entering {
         return refusals.isEmpty();
     }
 
+    /** Applies a change that a line of the base map makes. */
+    void apply(Change change, int line) {
+        editor.apply(change).forEach(refusal -> faults.add(BaseMapLoad.FILE, line, sentence(refusal)));
+    }
+
     /** Reports a refusal of a record that stands on a line of its table. */
     void refuse(Refusal refusal, int line) {
         Recorded record = refusal.record();
@@ -75,7 +86,7 @@ final class Entering {
         if (table != null) {
             faults.add(table, line, sentence(refusal));
         } else {
-            faults.add("basemap.geojson", line, sentence(refusal));
+            faults.add(BaseMapLoad.FILE, line, sentence(refusal));
         }
     }
 

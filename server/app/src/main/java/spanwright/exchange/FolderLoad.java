@@ -30,7 +30,6 @@ public final class FolderLoad {
         void read(String table, long rows, boolean done);
     }
 
-    private static final String BASE_MAP = "basemap.geojson";
     private static final int ROWS_BETWEEN = 100_000;
     /** Tables that refer to a later one are read after it. */
     private static final List<Table> ORDER = order();
@@ -82,7 +81,7 @@ public final class FolderLoad {
                 askName(file);
             }
         }
-        if (!any && !names.contains(BASE_MAP)) {
+        if (!any && !names.contains(BaseMapLoad.FILE)) {
             faults.add(name, 1, "holds no file of a records folder; it needs files such as structures.csv");
             return;
         }
@@ -92,7 +91,18 @@ public final class FolderLoad {
                 readFile(source, table, tables.load(table));
             }
         }
+        if (names.contains(BaseMapLoad.FILE)) {
+            readBaseMap(source);
+        }
         entering.finish();
+    }
+
+    private void readBaseMap(Source source) {
+        try (InputStream bytes = source.open(BaseMapLoad.FILE)) {
+            new BaseMapLoad(entering, progress).read(bytes);
+        } catch (IOException e) {
+            faults.add(BaseMapLoad.FILE, 1, "cannot be read: " + e.getMessage());
+        }
     }
 
     private void askName(String file) {
@@ -150,14 +160,14 @@ public final class FolderLoad {
     }
 
     private int @Nullable [] header(CsvReader reader, Table table) throws IOException {
-        if (!reader.next()) {
-            faults.add(
-                    table,
-                    1,
-                    "has no header row; the first row names the columns, such as " + String.join(",", table.columns()));
-            return null;
-        }
-        if (reader.damaged()) {
+        if (!reader.first()) {
+            if (!reader.damaged()) {
+                faults.add(
+                        table,
+                        1,
+                        "has no header row; the first row names the columns, such as "
+                                + String.join(",", table.columns()));
+            }
             return null;
         }
         return Header.read(reader, table, faults);

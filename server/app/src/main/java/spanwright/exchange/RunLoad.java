@@ -53,7 +53,7 @@ final class RunLoad implements TableLoad {
         List<RunRow> run = new ArrayList<>(entering.view().runOf(cable));
         int first = entering.view().limit(RecordKind.RUN_ROW);
         for (int index = 0; index < reads.size(); index++) {
-            RunRow row = withIdentity(reads.get(index).row, first + index);
+            RunRow row = withIdentity(reads.get(index).row, entering.newIdentity(RecordKind.RUN_ROW));
             entering.lines().note(row, reads.get(index).line);
             run.add(row);
         }

@@ -84,6 +84,7 @@ final class TerminationRows extends Rows<Joint> {
         }
         Loss loss = SpliceRows.meanLoss(row, LOSS);
         if (way == Way.DIRECT && !row.blank(LOSS)) {
+            loss = null;
             row.fault(
                     LOSS,
                     row.named(LOSS) + " on a direct termination, which has no splice; leave it blank, or make"

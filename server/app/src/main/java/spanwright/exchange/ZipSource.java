@@ -119,7 +119,16 @@ final class ZipSource implements Source {
         if (entry == null) {
             throw new ZipException("there is no " + name);
         }
-        return new Bounded(zip.getInputStream(entry), entry.getCompressedSize());
+        InputStream bytes = zip.getInputStream(entry);
+        if (bytes == null) {
+            throw new ZipException("there is no " + name);
+        }
+        long packed = Math.max(0, entry.getCompressedSize());
+        return new Counted(new BoundedStream(
+                bytes,
+                Math.max(FREE_BYTES, packed * MOST_RATIO),
+                "the file swells to more than " + MOST_RATIO
+                        + " times its packed size, as no records do; load the folder itself"));
     }
 
     @Override
@@ -127,15 +136,11 @@ final class ZipSource implements Source {
         zip.close();
     }
 
-    /** Stops where more comes out than bounds allow. */
-    private final class Bounded extends FilterInputStream {
+    /** Counts what comes out of all files together. */
+    private final class Counted extends FilterInputStream {
 
-        private final long most;
-        private long out;
-
-        Bounded(InputStream in, long packed) {
+        Counted(InputStream in) {
             super(in);
-            this.most = Math.max(FREE_BYTES, Math.max(0, packed) * MOST_RATIO);
         }
 
         @Override
@@ -153,12 +158,7 @@ final class ZipSource implements Source {
         }
 
         private void count(int more) throws IOException {
-            out += more;
             bytes += more;
-            if (out > most) {
-                throw new ZipException("the file swells to more than " + MOST_RATIO
-                        + " times its packed size, as no records do; pack it less tightly, or load the folder itself");
-            }
             if (bytes > MOST_BYTES) {
                 throw new ZipException(
                         "more than " + (MOST_BYTES >> 30) + " GiB come out of the zip; load the folder itself");
