@@ -110,7 +110,8 @@ final class BaseMapLoad {
             Geometry geometry = GeoJsonGeometry.read(feature.path("geometry"));
             if (known) {
                 int id = entering.view().limit(RecordKind.BASE_FEATURE);
-                String text = name.isValueNode() && !name.isNull() && !name.asText().isEmpty() ? name.asText() : null;
+                String text =
+                        name.isValueNode() && !name.isNull() && !name.asText().isEmpty() ? name.asText() : null;
                 entering.apply(Change.add(new BaseFeature(id, layer.asText(), text, geometry)), line);
             }
         } catch (GeoJsonGeometry.WrongGeometry e) {

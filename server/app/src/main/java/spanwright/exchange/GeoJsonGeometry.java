@@ -42,17 +42,23 @@ final class GeoJsonGeometry {
         JsonNode coordinates = geometry.path("coordinates");
         return switch (geometry.path("type").asText()) {
             case "Point" -> FACTORY.createPoint(position(coordinates));
-            case "MultiPoint" -> FACTORY.createMultiPointFromCoords(positions(coordinates, 1, "a multipoint has one"
-                    + " position or more"));
+            case "MultiPoint" ->
+                FACTORY.createMultiPointFromCoords(
+                        positions(coordinates, 1, "a multipoint has one" + " position or more"));
             case "LineString" -> line(coordinates);
-            case "MultiLineString" -> FACTORY.createMultiLineString(
-                    each(coordinates, GeoJsonGeometry::line).toArray(LineString[]::new));
+            case "MultiLineString" ->
+                FACTORY.createMultiLineString(
+                        each(coordinates, GeoJsonGeometry::line).toArray(LineString[]::new));
             case "Polygon" -> polygon(coordinates);
-            case "MultiPolygon" -> FACTORY.createMultiPolygon(
-                    each(coordinates, GeoJsonGeometry::polygon).toArray(Polygon[]::new));
-            default -> throw new WrongGeometry(geometry.has("type")
-                    ? "geometry '" + Texts.shown(geometry.path("type").asText()) + "' is not one of " + KINDS
-                    : "the feature has no geometry; give it one of " + KINDS);
+            case "MultiPolygon" ->
+                FACTORY.createMultiPolygon(
+                        each(coordinates, GeoJsonGeometry::polygon).toArray(Polygon[]::new));
+            default ->
+                throw new WrongGeometry(
+                        geometry.has("type")
+                                ? "geometry '"
+                                        + Texts.shown(geometry.path("type").asText()) + "' is not one of " + KINDS
+                                : "the feature has no geometry; give it one of " + KINDS);
         };
     }
 
@@ -102,7 +108,10 @@ final class GeoJsonGeometry {
     }
 
     private static Coordinate position(JsonNode node) throws WrongGeometry {
-        if (!node.isArray() || node.size() < 2 || !node.get(0).isNumber() || !node.get(1).isNumber()) {
+        if (!node.isArray()
+                || node.size() < 2
+                || !node.get(0).isNumber()
+                || !node.get(1).isNumber()) {
             throw new WrongGeometry("'" + Texts.shown(node.toString()) + "' is no position; it is [lon, lat]");
         }
         double lon = node.get(0).doubleValue();

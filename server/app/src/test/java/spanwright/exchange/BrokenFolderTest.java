@@ -20,8 +20,7 @@ import spanwright.network.Snapshot;
  */
 class BrokenFolderTest {
 
-    private static final Path CASES =
-            Path.of(System.getProperty("repository.root"), "demo-data", "cases", "broken");
+    private static final Path CASES = Path.of(System.getProperty("repository.root"), "demo-data", "cases", "broken");
 
     static Stream<String> cases() throws IOException {
         try (Stream<Path> folders = Files.list(CASES)) {
@@ -45,7 +44,8 @@ class BrokenFolderTest {
         assertThat(places(found)).as(String.join("\n", found)).isEqualTo(places(expected));
         SoftAssertions softly = new SoftAssertions();
         for (int index = 0; index < expected.size(); index++) {
-            String part = expected.get(index).substring(places(expected).get(index).length() + 2);
+            String part =
+                    expected.get(index).substring(places(expected).get(index).length() + 2);
             softly.assertThat(found.get(index)).contains(part);
         }
         softly.assertAll();
