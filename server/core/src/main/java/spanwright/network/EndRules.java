@@ -1,7 +1,6 @@
 package spanwright.network;
 
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -11,6 +10,8 @@ import spanwright.circuits.CircuitStatus;
 import spanwright.circuits.PortRange;
 import spanwright.journal.Change;
 import spanwright.journal.Recorded;
+import spanwright.plant.FiberRange;
+import spanwright.records.EndNames;
 import spanwright.records.RecordsView;
 import spanwright.records.Refusal;
 import spanwright.records.Relation;
@@ -27,22 +28,19 @@ import spanwright.splicing.LegKind;
  */
 final class EndRules {
 
-    private static final int NONE = -1;
-
     private final RecordsView records;
-    private final NetworkEditor network;
     private final EndNames names;
+    private final EndUsers users;
     private final UsedEnds used;
-    private final Map<String, Map<Long, Integer>> plannedByJob = new HashMap<>();
 
     EndRules(RecordsView records, NetworkEditor network) {
         this.records = records;
-        this.network = network;
         this.names = new EndNames(records);
-        this.used = new UsedEnds(records, this);
+        this.users = new EndUsers(records, network);
+        this.used = new UsedEnds(records, users);
     }
 
-    /** Why a change may not be applied; every broken rule at once, one refusal for each earlier record it clashes with. */
+    /** Why a change may not be applied; every broken rule at once, one refusal for each record it clashes with. */
     List<Refusal> refuse(Change change) {
         Recorded after = change.after();
         if (after instanceof Joint joint) {
@@ -51,166 +49,117 @@ final class EndRules {
         return after instanceof Circuit circuit ? refuseCircuit(circuit) : used.refuse(change);
     }
 
+    /** Notes a change that has been applied. */
+    void applied(Change change) {
+        used.applied(change);
+        users.applied(change);
+    }
+
     /** What is wrong with the ends of what the applied changes touched, seen as a whole. */
     List<Refusal> finish() {
         return used.finish();
     }
 
-    /** The joint that uses an end, in the glass or planned within any job; 0 where none does. */
-    int userOf(Leg leg, long key) {
-        int joint = jointAt(leg, key);
-        for (String job : joint == 0 ? records.plannedJobs() : List.<String>of()) {
-            joint = Math.max(joint, plannedAt(job, key));
-        }
-        return joint;
-    }
-
-    /** Joints in the glass that name a leg out of the network. */
-    int[] looseJoints(Leg leg) {
-        return network.looseJoints(leg);
-    }
-
     private List<Refusal> refuseJoint(Joint joint) {
-        Map<Object, Refusal> found = new LinkedHashMap<>();
-        refuseWithin(joint, found);
-        for (int index = 0; index < joint.count(); index++) {
-            refuseEnd(joint, joint.a(), index, found);
-            refuseEnd(joint, joint.b(), index, found);
+        List<Refusal> refusals = new ArrayList<>();
+        refuseWithin(joint, refusals);
+        Map<Integer, Long> clashes = new LinkedHashMap<>();
+        users.clashes(joint, joint.a(), clashes);
+        users.clashes(joint, joint.b(), clashes);
+        clashes.forEach((earlier, key) ->
+                refusals.add(joinedTwice(joint, key, records.joints().get(earlier))));
+        if (joint.type() == JointKind.JUMPER && !joint.planned()) {
+            refuseFronts(joint, joint.a(), refusals);
+            refuseFronts(joint, joint.b(), refusals);
         }
-        return new ArrayList<>(found.values());
+        return refusals;
     }
 
-    private void refuseWithin(Joint joint, Map<Object, Refusal> found) {
+    private void refuseWithin(Joint joint, List<Refusal> refusals) {
+        FiberRange one = joint.a().numbers();
+        FiberRange other = joint.b().numbers();
         if (!joint.a().leg().equals(joint.b().leg())) {
             return;
         }
-        for (int index = 0; index < joint.count(); index++) {
-            int number = joint.a().numbers().at(index);
-            if (joint.b().numbers().at(index) == number) {
-                found.putIfAbsent(
-                        "itself",
-                        refusal(
-                                "end-joined-to-itself",
-                                joint,
-                                null,
-                                names.of(joint.a().key(index)) + " is joined to itself; name two different ends"));
-            } else if (joint.b().numbers().contains(number)) {
-                found.putIfAbsent(
-                        "twice",
-                        refusal(
-                                "end-joined-twice",
-                                joint,
-                                null,
-                                names.of(joint.a().key(index))
-                                        + " stands on both sides of one row; each end is joined once"));
+        for (int index = 0; index < one.count(); index++) {
+            String end = names.anywhere(joint.a().key(index));
+            if (one.at(index) == other.at(index)) {
+                refusals.add(refusal(
+                        "end-joined-to-itself", joint, null, end + " is joined to itself; name two different ends"));
+                return;
             }
-        }
-    }
-
-    private void refuseEnd(Joint joint, EndRange ends, int index, Map<Object, Refusal> found) {
-        long key = ends.key(index);
-        int earlier = joint.planned() ? plannedAt(joint.plannedJob(), key) : jointAt(ends.leg(), key);
-        if (earlier != 0 && earlier != joint.id()) {
-            found.computeIfAbsent(
-                    earlier, id -> joinedTwice(joint, key, records.joints().get(earlier)));
-        }
-        if (joint.type() == JointKind.JUMPER && !joint.planned()) {
-            Circuit circuit = circuitAt(ends.leg().owner(), ends.numbers().at(index));
-            if (circuit != null) {
-                found.computeIfAbsent(
-                        circuit.code(),
-                        code -> refusal(
-                                "front-with-jumper-and-circuit",
-                                joint,
-                                circuit,
-                                "circuit " + code + " ends on " + names.of(key)
-                                        + "; a front takes a jumper or circuits' ends, not both"));
+            if (other.contains(one.at(index))) {
+                refusals.add(refusal(
+                        "end-joined-twice",
+                        joint,
+                        null,
+                        end + " stands on both sides of one row; each end is joined once, so name two ranges that do"
+                                + " not meet"));
+                return;
             }
         }
     }
 
     private Refusal joinedTwice(Joint joint, long key, Joint earlier) {
-        String within = joint.planned() ? " within job " + joint.plannedJob() : "";
-        String what = switch (EndKey.kind(key)) {
-            case REAR -> "the rear of " + names.of(key) + " is terminated already" + within + "; a rear takes one";
-            case FRONT -> names.of(key) + " has a jumper already" + within + "; a front takes one";
-            default -> names.of(key) + " is joined already" + within + "; each end is joined once";
+        String already = " already" + (joint.planned() ? " within job " + joint.plannedJob() : "");
+        String sentence = switch (EndKey.kind(key)) {
+            case REAR ->
+                "the rear of " + names.end(key) + " is terminated" + already + ", to " + names.ends(other(earlier, key))
+                        + "; a rear takes one end";
+            case FRONT ->
+                names.end(key) + " has a jumper" + already + ", to " + names.ends(other(earlier, key))
+                        + "; a front takes one jumper";
+            default ->
+                names.anywhere(key) + " is joined" + already + ", to " + names.ends(other(earlier, key))
+                        + "; each end is joined once";
         };
-        return refusal("end-joined-twice", joint, earlier, what + ", so free it first or name another");
+        return refusal("end-joined-twice", joint, earlier, sentence);
     }
 
-    private static Refusal refusal(String code, Recorded record, @Nullable Recorded earlier, String sentence) {
-        return new Refusal(code, sentence, null, record, earlier);
-    }
-
-    private int jointAt(Leg leg, long key) {
-        int end = network.endOf(key);
-        if (end != NONE) {
-            return network.joint(end);
+    /** To what a joint joins one of its ends. */
+    private static EndRange other(Joint joint, long key) {
+        for (int index = 0; index < joint.count(); index++) {
+            if (joint.a().key(index) == key) {
+                return one(joint.b(), index);
+            }
+            if (joint.b().key(index) == key) {
+                return one(joint.a(), index);
+            }
         }
-        for (int id : network.looseJoints(leg)) {
-            Joint loose = records.joints().get(id);
-            if (names(loose.a(), key) || names(loose.b(), key)) {
-                return id;
+        throw new IllegalArgumentException("joint " + joint.id() + " does not name the end");
+    }
+
+    private static EndRange one(EndRange ends, int index) {
+        return new EndRange(ends.leg(), FiberRange.of(ends.numbers().at(index)));
+    }
+
+    private void refuseFronts(Joint jumper, EndRange fronts, List<Refusal> refusals) {
+        int panel = fronts.leg().owner();
+        for (int id : records.owned(Relation.PANEL_CIRCUITS, panel)) {
+            Circuit circuit = records.circuits().get(id);
+            int port = circuit.status() == CircuitStatus.RETIRED ? 0 : sharedPort(circuit, panel, fronts.numbers());
+            if (port != 0) {
+                refusals.add(refusal(
+                        "front-with-jumper-and-circuit",
+                        jumper,
+                        circuit,
+                        "circuit " + circuit.code() + " ends on " + names.port(panel, port)
+                                + "; a front takes a jumper or circuits' ends, not both"));
+            }
+        }
+    }
+
+    private static int sharedPort(Circuit circuit, int panel, FiberRange ports) {
+        for (int index = 0; index < ports.count(); index++) {
+            int port = ports.at(index);
+            if (endsOn(circuit.a(), panel, port) || endsOn(circuit.z(), panel, port)) {
+                return port;
             }
         }
         return 0;
     }
 
-    private static boolean names(EndRange ends, long key) {
-        return ends.leg().kind() == EndKey.kind(key)
-                && ends.leg().owner() == EndKey.owner(key)
-                && ends.numbers().contains(EndKey.number(key));
-    }
-
-    private int plannedAt(String job, long key) {
-        return plannedOf(job).getOrDefault(key, 0);
-    }
-
-    private Map<Long, Integer> plannedOf(String job) {
-        return plannedByJob.computeIfAbsent(job, name -> {
-            Map<Long, Integer> ends = new HashMap<>();
-            for (int id : records.plannedJoints(name)) {
-                note(ends, records.joints().get(id));
-            }
-            return ends;
-        });
-    }
-
-    private static void note(Map<Long, Integer> ends, Joint joint) {
-        for (int index = 0; index < joint.count(); index++) {
-            ends.put(joint.a().key(index), joint.id());
-            ends.put(joint.b().key(index), joint.id());
-        }
-    }
-
-    /** Notes a change that has been applied. */
-    void applied(Change change) {
-        used.applied(change);
-        if (change.before() instanceof Joint joint && joint.planned()) {
-            Map<Long, Integer> ends = plannedOf(joint.plannedJob());
-            for (int index = 0; index < joint.count(); index++) {
-                ends.remove(joint.a().key(index), joint.id());
-                ends.remove(joint.b().key(index), joint.id());
-            }
-        }
-        if (change.after() instanceof Joint joint && joint.planned()) {
-            note(plannedOf(joint.plannedJob()), joint);
-        }
-    }
-
-    private @Nullable Circuit circuitAt(int panel, int port) {
-        for (int id : records.owned(Relation.PANEL_CIRCUITS, panel)) {
-            Circuit circuit = records.circuits().get(id);
-            if (circuit.status() != CircuitStatus.RETIRED
-                    && (ends(circuit.a(), panel, port) || ends(circuit.z(), panel, port))) {
-                return circuit;
-            }
-        }
-        return null;
-    }
-
-    private static boolean ends(PortRange ports, int panel, int port) {
+    private static boolean endsOn(PortRange ports, int panel, int port) {
         return ports.panel() == panel && ports.ports().contains(port);
     }
 
@@ -218,23 +167,22 @@ final class EndRules {
         if (circuit.status() == CircuitStatus.RETIRED) {
             return List.of();
         }
-        Map<Object, Refusal> found = new LinkedHashMap<>();
+        Map<Integer, Long> jumpers = new LinkedHashMap<>();
         for (PortRange ports : List.of(circuit.a(), circuit.z())) {
-            Leg leg = new Leg(LegKind.FRONT, ports.panel());
-            for (int index = 0; index < ports.ports().count(); index++) {
-                long key = leg.key(ports.ports().at(index));
-                int jumper = jointAt(leg, key);
-                if (jumper != 0) {
-                    found.computeIfAbsent(
-                            jumper,
-                            id -> refusal(
-                                    "front-with-jumper-and-circuit",
-                                    circuit,
-                                    records.joints().get(jumper),
-                                    names.of(key) + " has a jumper; a circuit ends on a front without one"));
-                }
-            }
+            users.inGlass(new EndRange(new Leg(LegKind.FRONT, ports.panel()), ports.ports()), 0, jumpers);
         }
-        return new ArrayList<>(found.values());
+        List<Refusal> refusals = new ArrayList<>();
+        jumpers.forEach((jumper, key) -> refusals.add(refusal(
+                "front-with-jumper-and-circuit",
+                circuit,
+                records.joints().get(jumper),
+                names.end(key) + " has a jumper, to "
+                        + names.ends(other(records.joints().get(jumper), key))
+                        + "; a circuit ends on a front without one")));
+        return refusals;
+    }
+
+    private static Refusal refusal(String code, Recorded record, @Nullable Recorded earlier, String sentence) {
+        return new Refusal(code, sentence, null, record, earlier);
     }
 }

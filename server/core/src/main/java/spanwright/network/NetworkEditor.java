@@ -74,12 +74,13 @@ final class NetworkEditor {
         linker.linkAsIf(joint);
     }
 
-    /** The end with a key, all changes regarded; NONE where it is not in the network. */
-    int endOf(long key) {
+    /** Where the ends of a leg are, all changes regarded. */
+    LegEnds ends(Leg leg) {
         renew();
-        return blocks.endOf(key);
+        return LegEnds.of(blocks, leg);
     }
 
+    /** The joint in the glass that names an end, 0 for none. */
     int joint(int end) {
         return links.joint(end);
     }

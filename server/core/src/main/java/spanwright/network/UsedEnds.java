@@ -1,19 +1,24 @@
 package spanwright.network;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.Circuit;
 import spanwright.journal.Change;
 import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
+import spanwright.plant.FiberRange;
 import spanwright.plant.Pass;
 import spanwright.plant.RunRow;
+import spanwright.records.EndNames;
 import spanwright.records.RecordsView;
 import spanwright.records.Refusal;
 import spanwright.records.Relation;
+import spanwright.splicing.EndRange;
 import spanwright.splicing.Leg;
 import spanwright.splicing.LegKind;
 import spanwright.splicing.Panel;
@@ -27,16 +32,16 @@ final class UsedEnds {
 
     private final RecordsView records;
     private final EndNames names;
-    private final EndRules rules;
+    private final EndUsers users;
     private final Set<Integer> touchedRuns = new LinkedHashSet<>();
 
-    UsedEnds(RecordsView records, EndRules rules) {
+    UsedEnds(RecordsView records, EndUsers users) {
         this.records = records;
         this.names = new EndNames(records);
-        this.rules = rules;
+        this.users = users;
     }
 
-    /** Why a change may not be applied that takes ends away; one refusal for each leg. */
+    /** Why a change may not be applied that takes ends away; one refusal for each joint that uses them. */
     List<Refusal> refuse(Change change) {
         Recorded before = change.before();
         List<Refusal> refusals = new ArrayList<>();
@@ -70,14 +75,13 @@ final class UsedEnds {
     }
 
     private void ask(Leg leg, int first, int last, Recorded record, List<Refusal> refusals) {
-        for (int number = first; number <= last; number++) {
-            long key = leg.key(number);
-            int joint = rules.userOf(leg, key);
-            if (joint != 0) {
-                refusals.add(refusal(record, records.joints().get(joint), names.of(key) + " is joined"));
-                return;
-            }
+        if (first > last) {
+            return;
         }
+        Map<Integer, Long> found = new LinkedHashMap<>();
+        users.anywhere(new EndRange(leg, new FiberRange(first, last)), found);
+        found.forEach((joint, key) ->
+                refusals.add(refusal(record, records.joints().get(joint), names.anywhere(key) + " is joined")));
     }
 
     private void askCircuits(Panel panel, int first, List<Refusal> refusals) {
@@ -126,7 +130,7 @@ final class UsedEnds {
     }
 
     private void askLoose(Leg leg, RunRow row, List<Refusal> refusals) {
-        for (int joint : rules.looseJoints(leg)) {
+        for (int joint : users.looseJoints(leg)) {
             refusals.add(refusal(
                     row,
                     records.joints().get(joint),

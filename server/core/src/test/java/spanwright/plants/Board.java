@@ -28,7 +28,7 @@ final class Board {
 
     private static void check(List<Refusal> refusals) {
         if (!refusals.isEmpty()) {
-            throw new IllegalArgumentException(refusals.toString());
+            throw new RefusedDrawing(refusals);
         }
     }
 

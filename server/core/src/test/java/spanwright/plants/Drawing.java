@@ -1,9 +1,11 @@
 package spanwright.plants;
 
+import java.util.List;
 import spanwright.circuits.PortRange;
 import spanwright.network.Snapshot;
 import spanwright.network.SnapshotEditor;
 import spanwright.records.RecordsView;
+import spanwright.records.Refusal;
 
 /**
  * A small plant drawn by hand, a line a thing, entered by the rules. Words in brackets may be left out:
@@ -46,6 +48,16 @@ public final class Drawing {
         SnapshotEditor editor = of(text).edit();
         editor.build(job);
         return editor.build(1);
+    }
+
+    /** Why the first line that a rule refuses is refused, or else the whole; nothing where all is right. */
+    public static List<Refusal> refusals(String text) {
+        try {
+            of(text);
+            return List.of();
+        } catch (RefusedDrawing refused) {
+            return refused.refusals();
+        }
     }
 
     /** The ports written as {@code E1/P/1-2}. */
