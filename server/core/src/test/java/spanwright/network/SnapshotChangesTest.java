@@ -4,11 +4,14 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.ArrayList;
 import java.util.Collections;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import java.util.SortedSet;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import spanwright.journal.Change;
@@ -49,6 +52,30 @@ class SnapshotChangesTest {
             assertThat(Described.of(past.get(index).network())).isEqualTo(described.get(index));
         }
         assertGoesBack(now, changes, past.get(0));
+    }
+
+    @Test
+    void most_random_postings_break_no_rule_and_change_much() {
+        int sound = 0;
+        Map<RecordKind, Integer> kinds = new EnumMap<>(RecordKind.class);
+        for (int seed = 0; seed < 250; seed++) {
+            SnapshotEditor editor = Snapshot.of(RandomPlant.of(seed).entered()).edit();
+            new RandomChanges(seed).enter(editor);
+            sound += editor.finish().isEmpty() ? 1 : 0;
+            editor.changes().forEach(change -> kinds.merge(change.kind(), 1, Integer::sum));
+        }
+        assertThat(sound).isGreaterThan(225);
+        assertThat(kinds)
+                .containsKeys(
+                        RecordKind.CABLE_TYPE,
+                        RecordKind.CABLE,
+                        RecordKind.RUN_ROW,
+                        RecordKind.ENCLOSURE,
+                        RecordKind.PASS,
+                        RecordKind.SPLITTER,
+                        RecordKind.PANEL,
+                        RecordKind.JOINT,
+                        RecordKind.CIRCUIT);
     }
 
     private static void assertGoesBack(Snapshot now, List<Change> changes, Snapshot first) {

@@ -1,9 +1,13 @@
 package spanwright.plants;
 
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
-import java.util.TreeSet;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 import spanwright.journal.RecordKind;
 import spanwright.plant.Cable;
 import spanwright.plant.CableType;
@@ -11,12 +15,14 @@ import spanwright.plant.Pass;
 import spanwright.plant.Placement;
 import spanwright.plant.PlantState;
 import spanwright.plant.RunRow;
+import spanwright.plant.SheathMark;
 import spanwright.plant.Span;
 import spanwright.plant.Trust;
 import spanwright.quantity.Length;
 import spanwright.records.RecordsView;
 import spanwright.records.Relation;
 import spanwright.splicing.EndRange;
+import spanwright.splicing.EndState;
 import spanwright.splicing.Joint;
 import spanwright.splicing.Leg;
 import spanwright.splicing.LegKind;
@@ -89,6 +95,9 @@ final class CableChanges {
 
     private void lengthen(Cable cable) {
         List<RunRow> run = records.runOf(cable.id());
+        if (run.isEmpty()) {
+            return;
+        }
         RunRow last = run.get(run.size() - 1);
         entering.any(records.spans().owned(Relation.STRUCTURE_SPANS, last.structure()))
                 .ifPresent(span -> entering.add(row(
@@ -98,7 +107,7 @@ final class CableChanges {
                         span.id())));
     }
 
-    private RunRow row(int cable, int seq, int structure, int span) {
+    private RunRow row(int cable, int seq, int structure, @Nullable Integer span) {
         return new RunRow(
                 entering.next(RecordKind.RUN_ROW), cable, seq, structure, span, Length.ZERO, Trust.POSTED, null, null);
     }
@@ -153,42 +162,70 @@ final class CableChanges {
                         row.duct()));
     }
 
-    /** Cuts a cable in two in an enclosure amid its run; what was spliced ahead there stays so. */
+    /** Cuts a cable in two in an enclosure amid its run; what was joined ahead of it stays joined. */
     private void cutAt(Pass pass) {
         List<RunRow> run = records.runOf(pass.cable());
         RunRow at = records.runRows().get(pass.runRow());
         if (at.seq() == 0 || at.seq() == run.size() - 1) {
             return;
         }
-        Cable rest = restOf(records.cables().get(pass.cable()));
-        RunRow start = new RunRow(
-                entering.next(RecordKind.RUN_ROW),
-                rest.id(),
-                0,
-                at.structure(),
-                null,
-                Length.ZERO,
-                Trust.POSTED,
-                null,
-                null);
-        List<Pass> passes = records.passesOf(pass.cable());
         List<RunRow> beyond = run.subList(at.seq() + 1, run.size());
-        boolean laid = entering.add(rest)
-                && entering.add(start)
-                && beyond.stream().allMatch(row -> entering.replace(row, moved(row, rest.id(), row.seq() - at.seq())))
-                && passes.stream().allMatch(this::moveToItsCable)
-                && entering.add(new Pass(
-                        entering.next(RecordKind.PASS), pass.enclosure(), rest.id(), start.id(), List.of(), List.of()));
-        if (laid) {
-            moveJoints(new Leg(LegKind.AHEAD, at.id()), new Leg(LegKind.AHEAD, start.id()));
+        Set<Leg> legs = legsOf(beyond);
+        legs.add(new Leg(LegKind.AHEAD, at.id()));
+        List<Joint> joints = PlantChanges.jointsOn(records, legs).toList();
+        List<Pass> passes = records.passesOf(pass.cable()).stream()
+                .filter(other -> records.runRows().get(other.runRow()).seq() > at.seq())
+                .toList();
+        if (!entering.removeAll(joints.stream())
+                || !entering.removeAll(statesOn(legs))
+                || !entering.removeAll(marksOn(beyond))
+                || !entering.removeAll(passes.stream())
+                || !removeBackward(beyond)) {
+            return;
         }
+        Map<Integer, Integer> rows = new HashMap<>();
+        Cable rest = restOf(records.cables().get(pass.cable()));
+        rows.put(at.id(), enter(rest, 0, at.structure(), null));
+        beyond.forEach(row -> rows.put(row.id(), enter(rest, row.seq() - at.seq(), row.structure(), row.span())));
+        enterPass(pass.enclosure(), rest, rows.get(at.id()));
+        passes.forEach(other -> enterPass(other.enclosure(), rest, rows.get(other.runRow())));
+        joints.forEach(joint -> entering.add(new Joint(
+                entering.next(RecordKind.JOINT),
+                joint.type(),
+                joint.enclosure(),
+                moved(joint.a(), legs, rows),
+                moved(joint.b(), legs, rows),
+                joint.facts())));
+    }
+
+    private static Set<Leg> legsOf(List<RunRow> rows) {
+        Set<Leg> legs = new HashSet<>();
+        for (RunRow row : rows) {
+            legs.add(new Leg(LegKind.BACK, row.id()));
+            legs.add(new Leg(LegKind.AHEAD, row.id()));
+        }
+        return legs;
+    }
+
+    private Stream<EndState> statesOn(Set<Leg> legs) {
+        return records.endStates()
+                .list()
+                .filter(state -> legs.contains(state.ends().leg()));
+    }
+
+    private Stream<SheathMark> marksOn(List<RunRow> rows) {
+        return rows.stream().flatMap(row -> records.sheathMarks().owned(Relation.RUN_ROW_MARKS, row.id()));
+    }
+
+    private boolean removeBackward(List<RunRow> rows) {
+        return IntStream.rangeClosed(1, rows.size()).allMatch(index -> entering.remove(rows.get(rows.size() - index)));
     }
 
     private Cable restOf(Cable cable) {
         int id = entering.next(RecordKind.CABLE);
-        return new Cable(
+        Cable rest = new Cable(
                 id,
-                cable.code() + "-" + id,
+                "R-" + id,
                 cable.cableType(),
                 "WAS-" + cable.code(),
                 cable.marksInk(),
@@ -197,53 +234,45 @@ final class CableChanges {
                 null,
                 cable.state(),
                 null);
+        entering.add(rest);
+        return rest;
     }
 
-    /** Makes a pass that of the cable to which its run row belongs now. */
-    private boolean moveToItsCable(Pass pass) {
-        int cable = records.runRows().get(pass.runRow()).cable();
-        return entering.replace(
-                pass, new Pass(pass.id(), pass.enclosure(), cable, pass.runRow(), pass.opened(), pass.tubesOpened()));
+    private int enter(Cable cable, int seq, int structure, @Nullable Integer span) {
+        RunRow row = row(cable.id(), seq, structure, span);
+        entering.add(row);
+        return row.id();
     }
 
-    private void moveJoints(Leg from, Leg to) {
-        for (Joint joint : PlantChanges.jointsOn(records, Set.of(from)).toList()) {
-            entering.replace(
-                    joint,
-                    new Joint(
-                            joint.id(),
-                            joint.type(),
-                            joint.enclosure(),
-                            moved(joint.a(), from, to),
-                            moved(joint.b(), from, to),
-                            joint.facts()));
+    private void enterPass(int enclosure, Cable cable, @Nullable Integer row) {
+        if (row != null) {
+            entering.add(new Pass(entering.next(RecordKind.PASS), enclosure, cable.id(), row, List.of(), List.of()));
         }
-        entering.removeAll(
-                records.endStates().list().filter(state -> state.ends().leg().equals(from)));
     }
 
-    private static EndRange moved(EndRange ends, Leg from, Leg to) {
-        return ends.leg().equals(from) ? new EndRange(to, ends.numbers()) : ends;
+    private static EndRange moved(EndRange ends, Set<Leg> legs, Map<Integer, Integer> rows) {
+        return legs.contains(ends.leg())
+                ? new EndRange(
+                        new Leg(ends.leg().kind(), rows.getOrDefault(ends.leg().owner(), 0)), ends.numbers())
+                : ends;
     }
 
     private void remove(Cable cable) {
-        Set<Leg> legs = new HashSet<>();
-        Set<Integer> rows = new TreeSet<>();
-        for (RunRow row : records.runOf(cable.id())) {
-            rows.add(row.id());
-            legs.add(new Leg(LegKind.BACK, row.id()));
-            legs.add(new Leg(LegKind.AHEAD, row.id()));
-        }
-        boolean bare = entering.removeAll(PlantChanges.jointsOn(records, legs))
-                && entering.removeAll(records.endStates()
-                        .list()
-                        .filter(state -> legs.contains(state.ends().leg())))
+        List<RunRow> run = records.runOf(cable.id());
+        Set<Leg> legs = legsOf(run);
+        boolean named = records.measurements()
+                .list()
+                .anyMatch(measured -> measured.what().startsWith(cable.code() + ":")
+                        || measured.what().startsWith(cable.code() + " "));
+        boolean bare = !named
+                && entering.removeAll(PlantChanges.jointsOn(records, legs))
+                && entering.removeAll(statesOn(legs))
                 && entering.removeAll(records.fiberFlags().owned(Relation.CABLE_FLAGS, cable.id()))
                 && entering.removeAll(records.fiberCounts().owned(Relation.CABLE_COUNTS, cable.id()))
                 && entering.removeAll(records.cableValues().owned(Relation.CABLE_VALUES, cable.id()))
-                && entering.removeAll(records.sheathMarks().list().filter(mark -> rows.contains(mark.runRow())))
+                && entering.removeAll(marksOn(run))
                 && entering.removeAll(records.passes().owned(Relation.CABLE_PASSES, cable.id()))
-                && entering.removeAll(records.runRows().owned(Relation.CABLE_RUN_ROWS, cable.id()));
+                && removeBackward(run);
         if (bare) {
             entering.remove(cable);
         }
