@@ -171,7 +171,8 @@ public final class CableLay {
 
     /** What the sheath between the enclosures' places at two rows, either way round, rests on. */
     public LengthBasis basis(int oneRow, int otherRow) {
-        return positions.basis(positions.enclosure(Math.min(oneRow, otherRow)), positions.enclosure(Math.max(oneRow, otherRow)));
+        return positions.basis(
+                positions.enclosure(Math.min(oneRow, otherRow)), positions.enclosure(Math.max(oneRow, otherRow)));
     }
 
     /** Where that length comes from, for a person: {@code White marks 24220 ft and 20281 ft, read 2025-09-30}. */
@@ -188,8 +189,8 @@ public final class CableLay {
                 .map(LocalDate::toString)
                 .collect(Collectors.joining(" and "));
         String ink = cable.marksInk();
-        return ink.substring(0, 1).toUpperCase(Locale.ROOT) + ink.substring(1) + " marks "
-                + printed(from.get()) + " and " + printed(to.get()) + (read.isEmpty() ? "" : ", read " + read);
+        return ink.substring(0, 1).toUpperCase(Locale.ROOT) + ink.substring(1) + " marks " + printed(from.get())
+                + " and " + printed(to.get()) + (read.isEmpty() ? "" : ", read " + read);
     }
 
     private static String printed(SheathTie tie) {

@@ -145,7 +145,8 @@ final class FiberTrace {
         List<Integer> entered = new ArrayList<>();
         entered.add(route.first());
         entered.add(route.circle() ? route.back().length : 0);
-        IntStream.concat(Arrays.stream(route.back()), Arrays.stream(route.onward())).forEach(entered::add);
+        IntStream.concat(Arrays.stream(route.back()), Arrays.stream(route.onward()))
+                .forEach(entered::add);
         if (known.add(entered)) {
             routes.add(route);
         }

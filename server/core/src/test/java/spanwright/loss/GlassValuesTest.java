@@ -18,8 +18,7 @@ import spanwright.records.RecordsEditor;
 
 class GlassValuesTest {
 
-    private static final Snapshot PLANT = Drawing.of(
-            """
+    private static final Snapshot PLANT = Drawing.of("""
             cable F-1 1 : H1 100 H2
             reel F-1 1310 - 1.4670
             reel F-1 1550 0.19 1.4676
@@ -41,8 +40,9 @@ class GlassValuesTest {
                                 + " dispersion formula"));
         assertThat(glass.findIndex(CABLE, nm(1700))).isEmpty();
         assertThat(glass.whyNoIndex(CABLE, nm(1700)))
-                .isEqualTo("fiber type G.652.D gives no group index at 1700 nm: its table reaches from 1260 nm to 1650 nm;"
-                        + " give F-1 a value of its own, or the type a row");
+                .isEqualTo(
+                        "fiber type G.652.D gives no group index at 1700 nm: its table reaches from 1260 nm to 1650 nm;"
+                                + " give F-1 a value of its own, or the type a row");
         assertThat(glass.findJumperIndex(nm(1310)).orElseThrow().value()).isEqualTo(1.4676);
         assertThat(glass.findJumperIndex(nm(1200))).isEmpty();
     }

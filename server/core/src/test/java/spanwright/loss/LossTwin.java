@@ -152,9 +152,8 @@ final class LossTwin {
         if (below.at().compareTo(above.at()) == 0) {
             return below.value();
         }
-        BigDecimal slope = above.value()
-                .subtract(below.value())
-                .divide(above.at().subtract(below.at()), EXACT);
+        BigDecimal slope =
+                above.value().subtract(below.value()).divide(above.at().subtract(below.at()), EXACT);
         return below.value().add(slope.multiply(nanometres.subtract(below.at())));
     }
 
@@ -167,7 +166,10 @@ final class LossTwin {
                         + splice.enclosure().code());
             }
         }
-        addJoint(names, splice.joint().facts().loss(), "splice." + splice.method().word());
+        addJoint(
+                names,
+                splice.joint().facts().loss(),
+                "splice." + splice.method().word());
     }
 
     private void addJoint(List<String> names, @Nullable Loss recorded, String item) {
@@ -214,7 +216,8 @@ final class LossTwin {
         String[] table = Objects.requireNonNull(PLANNING.get(item), item).split(" ", -1);
         Loss most = own == null ? null : own.limit();
         Loss deviation = own == null ? null : own.sd();
-        BigDecimal mean = own == null ? new BigDecimal(table[0]) : own.expected().exactDecibels();
+        BigDecimal mean =
+                own == null ? new BigDecimal(table[0]) : own.expected().exactDecibels();
         BigDecimal worst = own == null ? new BigDecimal(table[1]) : most == null ? mean : most.exactDecibels();
         BigDecimal sd = own == null
                 ? new BigDecimal(table[2])

@@ -28,8 +28,7 @@ class MeasurementsTest {
                 measured(5, null, 5, "2026-04-01", null));
 
         assertThat(both.mean()).isEqualTo(Loss.ofDecibels(0.2));
-        assertThat(both.source())
-                .isEqualTo("Measured both ways at 1550 nm: 0.3 dB and 0.1 dB, by Ida B., 2026-03-05");
+        assertThat(both.source()).isEqualTo("Measured both ways at 1550 nm: 0.3 dB and 0.1 dB, by Ida B., 2026-03-05");
     }
 
     @Test

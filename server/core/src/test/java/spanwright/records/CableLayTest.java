@@ -16,8 +16,7 @@ import spanwright.quantity.Length;
 class CableLayTest {
 
     /** The worked example of records-folder.md section 2. */
-    private static final String EXAMPLE =
-            """
+    private static final String EXAMPLE = """
             cable F-1 12 over=1.5 : H1 +20 1000 H2 +30 1000 H3 +10
             mark F-1 0 - 5000
             mark F-1 1 - 6060
@@ -76,8 +75,7 @@ class CableLayTest {
 
         assertThat(lay.basis(0, 1)).isEqualTo(LengthBasis.NOMINAL);
         assertThat(lay.source(0, 1)).isEqualTo("Route lengths and coils; no sheath marks on both sides");
-        CableLay marked = lay(
-                Drawing.of(EXAMPLE.replace("- 5000", "4980").replace("7100", "- 7110")), "F-1");
+        CableLay marked = lay(Drawing.of(EXAMPLE.replace("- 5000", "4980").replace("7100", "- 7110")), "F-1");
         assertThat(marked.basis(0, 1)).isEqualTo(LengthBasis.MARKS);
         assertThat(marked.source(0, 1)).isEqualTo("White marks 4980 m and 6060 m");
         assertThat(marked.source(2, 1)).isEqualTo("White marks 4980 m and 7110 m");
@@ -85,8 +83,7 @@ class CableLayTest {
 
     @Test
     void a_span_is_travelled_in_the_direction_of_the_run() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 structure H1 5 0
                 structure H2 5.001 0
                 span H2 H1 5.0005 0.001
@@ -100,6 +97,8 @@ class CableLayTest {
     }
 
     private static CableLay lay(Snapshot plant, String cable) {
-        return CableLay.of(plant.records(), plant.records().cables().find(cable).orElseThrow().id());
+        return CableLay.of(
+                plant.records(),
+                plant.records().cables().find(cable).orElseThrow().id());
     }
 }

@@ -12,8 +12,7 @@ import spanwright.splicing.LegKind;
 
 class EndNamesTest {
 
-    private static final Snapshot PLANT = Drawing.of(
-            """
+    private static final Snapshot PLANT = Drawing.of("""
             cable F-1 12 : H1 100 H2 100 H3
             enclosure E2 H2 : F-1
             enclosure E3 H3 : F-1

@@ -14,8 +14,7 @@ import spanwright.quantity.Length;
 
 class GlassTrackTest {
 
-    private static final String PLANT =
-            """
+    private static final String PLANT = """
             structure H1 10 0
             structure H2 10.004 0
             structure H3 10.004 0.002
@@ -40,9 +39,7 @@ class GlassTrackTest {
 
         // Nothing is at the rear of Q/1, so the path from P/1 shows the cables.
         assertThat(points(track)).isEqualTo("0/0/0 10,0");
-        assertThat(points(track(Drawing.of(PLANT), "E1/P/1", false)))
-                .isEqualTo(
-                        """
+        assertThat(points(track(Drawing.of(PLANT), "E1/P/1", false))).isEqualTo("""
                         0/0/0 10,0
                         1/0/0 10,0
                         21.2/20/0 10,0
@@ -60,9 +57,7 @@ class GlassTrackTest {
 
     @Test
     void stations_are_the_structures_in_order_at_the_middle_of_their_coils() {
-        assertThat(stations(track(Drawing.of(PLANT), "E1/P/1", false)))
-                .isEqualTo(
-                        """
+        assertThat(stations(track(Drawing.of(PLANT), "E1/P/1", false))).isEqualTo("""
                         H1 E1 at 11.1/10/0 coil 20
                         H2 E2 at 440.35/435/400 coil 30
                         H3 E3 at 666.5/655/600 coil 10
@@ -71,17 +66,14 @@ class GlassTrackTest {
 
     @Test
     void a_structure_passed_without_an_enclosure_is_a_station_too() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 1 : H1 100 H2 100 H3 +8 100 H4
                 enclosure E1 H1 : F-1
                 panel E1 P 1
                 term E1/P/1 = F-1 ahead 1 direct
                 """);
 
-        assertThat(stations(track(plant, "E1/P/1", false)))
-                .isEqualTo(
-                        """
+        assertThat(stations(track(plant, "E1/P/1", false))).isEqualTo("""
                         H1 E1 at 0/0/0 coil 0
                         H2 - at 100/100/100 coil 0
                         H3 - at 204/204/200 coil 8
@@ -90,8 +82,7 @@ class GlassTrackTest {
 
     @Test
     void two_enclosures_of_one_structure_are_two_stations_and_a_jumper_stays() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 span H1 H1 30
                 cable T-1 1 : H1 30 H1
                 enclosure E1 H1 : T-1/0
@@ -108,15 +99,11 @@ class GlassTrackTest {
                 """);
 
         GlassTrack track = track(plant, "E1/P/1", false);
-        assertThat(points(track))
-                .isEqualTo(
-                        """
+        assertThat(points(track)).isEqualTo("""
                         0/0/0 0,0
                         30/30/30 0,0
                         32/30/30 0,0""");
-        assertThat(stations(track))
-                .isEqualTo(
-                        """
+        assertThat(stations(track)).isEqualTo("""
                         H1 E1 at 0/0/0 coil 0
                         H1 E2 at 30/30/30 coil 0""");
     }
@@ -148,7 +135,8 @@ class GlassTrackTest {
     }
 
     private static String text(TrackPoint point) {
-        return lengths(point) + " " + degrees(point.position().lon()) + "," + degrees(point.position().lat());
+        return lengths(point) + " " + degrees(point.position().lon()) + ","
+                + degrees(point.position().lat());
     }
 
     private static String lengths(TrackPoint point) {
@@ -159,7 +147,9 @@ class GlassTrackTest {
 
     /** To a centimetre. */
     private static String plain(Length length) {
-        return Length.ofMetres(Math.rint(length.metres() * 100) / 100).exactMetres().toPlainString();
+        return Length.ofMetres(Math.rint(length.metres() * 100) / 100)
+                .exactMetres()
+                .toPlainString();
     }
 
     private static String degrees(double degrees) {
@@ -173,7 +163,8 @@ class GlassTrackTest {
     }
 
     private static String text(Station station) {
-        return station.structure().code() + " " + station.enclosure().map(Enclosure::code).orElse("-") + " at "
-                + lengths(station.at()) + " coil " + plain(station.coil());
+        return station.structure().code() + " "
+                + station.enclosure().map(Enclosure::code).orElse("-") + " at " + lengths(station.at()) + " coil "
+                + plain(station.coil());
     }
 }

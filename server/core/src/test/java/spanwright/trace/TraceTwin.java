@@ -67,8 +67,7 @@ final class TraceTwin {
         return found;
     }
 
-    private void walk(
-            long start, long in, List<Visit> before, Set<Long> crossed, Rules rules, List<Found> found) {
+    private void walk(long start, long in, List<Visit> before, Set<Long> crossed, Rules rules, List<Found> found) {
         if (splitter(in)) {
             cross(start, in, before, crossed, rules, found);
             return;
@@ -77,8 +76,7 @@ final class TraceTwin {
         goOn(start, new Visit(in, out), before, crossed, rules, found);
     }
 
-    private void cross(
-            long start, long in, List<Visit> before, Set<Long> crossed, Rules rules, List<Found> found) {
+    private void cross(long start, long in, List<Visit> before, Set<Long> crossed, Rules rules, List<Found> found) {
         List<Long> others = otherSide(in);
         if (others.size() > 1 && !rules.choose()) {
             found.add(new Found(with(before, new Visit(in, in)), "CHOICE"));
@@ -101,8 +99,7 @@ final class TraceTwin {
         }
     }
 
-    private void goOn(
-            long start, Visit visit, List<Visit> before, Set<Long> crossed, Rules rules, List<Found> found) {
+    private void goOn(long start, Visit visit, List<Visit> before, Set<Long> crossed, Rules rules, List<Found> found) {
         List<Visit> visits = with(before, visit);
         Long next = glass.peer(visit.out());
         if (rules.target() != null && rules.target() == visit.out()) {

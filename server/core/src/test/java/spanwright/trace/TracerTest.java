@@ -331,8 +331,7 @@ class TracerTest {
 
     @Test
     void few_lays_kept_at_hand_change_nothing() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 1 : H1 100 H2
                 cable D-1 1 : H2 50 H3
                 enclosure E2 H2 : F-1 D-1
@@ -346,8 +345,7 @@ class TracerTest {
 
     @Test
     void a_fiber_cut_and_joined_to_itself_is_one_path_though_two_pieces() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 2 : H1 100 H2 100 H3
                 enclosure E2 H2 : F-1
                 splice E2 : F-1 back 1 = F-1 ahead 1
@@ -360,8 +358,7 @@ class TracerTest {
 
     @Test
     void a_path_is_governed_by_the_circuit_asked_for_else_by_the_first_on_it() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 1 : H1 100 H2
                 enclosure E1 H1 : F-1
                 enclosure E2 H2 : F-1

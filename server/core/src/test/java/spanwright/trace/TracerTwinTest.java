@@ -61,7 +61,9 @@ class TracerTwinTest {
                     .isEqualTo(String.join("\n", twin.ofCircuit(circuit)));
         }
         for (Cable cable : records.cables().list().toList()) {
-            for (int fiber = 1; fiber <= records.cableTypes().get(cable.cableType()).fibers(); fiber++) {
+            for (int fiber = 1;
+                    fiber <= records.cableTypes().get(cable.cableType()).fibers();
+                    fiber++) {
                 assertThat(TraceText.lines(tracer.ofFiber(cable.id(), fiber)))
                         .as("%s:%s", cable.code(), fiber)
                         .isEqualTo(String.join("\n", twin.ofFiber(cable.id(), fiber)));

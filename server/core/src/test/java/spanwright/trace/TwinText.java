@@ -61,7 +61,8 @@ final class TwinText {
     String circle(List<Visit> visits, boolean closed) {
         List<String> elements = elements(visits);
         if (closed) {
-            addJoint(elements, visits.get(visits.size() - 1).out(), visits.get(0).in());
+            addJoint(
+                    elements, visits.get(visits.size() - 1).out(), visits.get(0).in());
         }
         return "circle: " + String.join(" | ", elements);
     }
@@ -117,7 +118,8 @@ final class TwinText {
     private void addJoint(List<String> elements, long from, long to) {
         int id = glass.joint(to);
         if (id == 0) {
-            elements.add("through " + Objects.requireNonNull(enclosure(EndKey.owner(to))).code());
+            elements.add("through "
+                    + Objects.requireNonNull(enclosure(EndKey.owner(to))).code());
             return;
         }
         Joint joint = records.joints().get(id);
@@ -151,10 +153,11 @@ final class TwinText {
         return switch (EndKey.kind(key)) {
             case FRONT -> port(key);
             case REAR -> port(key) + " rear";
-            case IN, OUT -> within(key) + " @ "
-                    + records.enclosures()
-                            .get(records.splitters().get(EndKey.owner(key)).enclosure())
-                            .code();
+            case IN, OUT ->
+                within(key) + " @ "
+                        + records.enclosures()
+                                .get(records.splitters().get(EndKey.owner(key)).enclosure())
+                                .code();
             case BACK, AHEAD -> {
                 Enclosure enclosure = enclosure(EndKey.owner(key));
                 String side = EndKey.kind(key) == LegKind.AHEAD ? " start " : " end ";
@@ -185,7 +188,8 @@ final class TwinText {
         BigDecimal to = position(cable, EndKey.owner(visit.out()));
         BigDecimal sheath = to.subtract(from).abs();
         Double own = cable.overlengthPct();
-        double excess = own == null ? records.cableTypes().get(cable.cableType()).overlengthPct() : own;
+        double excess =
+                own == null ? records.cableTypes().get(cable.cableType()).overlengthPct() : own;
         BigDecimal length = sheath.multiply(
                         BigDecimal.ONE.add(BigDecimal.valueOf(excess).movePointLeft(2)))
                 .setScale(6, RoundingMode.HALF_EVEN)

@@ -13,8 +13,7 @@ import spanwright.plants.Drawing;
 /** Walks stay within their bounds. */
 class WalkerTest {
 
-    private static final String FOUR_LEAVES =
-            """
+    private static final String FOUR_LEAVES = """
             cable F-1 1 : H1 10 H1B
             enclosure E1 H1 : F-1
             panel E1 P 2
@@ -41,8 +40,7 @@ class WalkerTest {
 
     @Test
     void a_fiber_between_two_trees_of_splitters_stops_before_one_of_them_where_its_paths_are_too_many() {
-        Snapshot plant = Drawing.of(
-                """
+        Snapshot plant = Drawing.of("""
                 cable F-1 1 : H1 10 H2
                 enclosure E1 H1 : F-1
                 enclosure E2 H2 : F-1
@@ -55,7 +53,9 @@ class WalkerTest {
 
         assertThat(new Tracer(plant).ofFiber(cable, 1)).hasSize(16);
         List<Path> few = new Tracer(plant, new Walker(plant.network(), 15, 100), 1).ofFiber(cable, 1);
-        assertThat(few.stream().map(path -> path.ends().get(0).name() + " to " + path.ends().get(1).name()))
+        assertThat(few.stream()
+                        .map(path -> path.ends().get(0).name() + " to "
+                                + path.ends().get(1).name()))
                 .containsExactly(
                         "S1 out 1 @ E1 to S2 in @ E2",
                         "S1 out 2 @ E1 to S2 in @ E2",
@@ -71,8 +71,8 @@ class WalkerTest {
                         .mapToObj(at -> "splitter E1 S" + at + " 2x2\n"
                                 + (at == 1
                                         ? "term E1/P/1 = S1 in direct\n"
-                                        : "splice E1 : S" + (at - 1) + " out 1 = S" + at + " in\nsplice E1 : S" + (at - 1)
-                                                + " out 2 = S" + at + " in 2\n"))
+                                        : "splice E1 : S" + (at - 1) + " out 1 = S" + at + " in\nsplice E1 : S"
+                                                + (at - 1) + " out 2 = S" + at + " in 2\n"))
                         .collect(Collectors.joining())
                 + "term E1/P/2 = S30 out 2 direct\ncircuit C-1 E1/P/1 E1/P/2\ncircuit C-2 E1/P/1 E1/P/3\n";
         Snapshot plant = Drawing.of(lattice);
