@@ -6,6 +6,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.concurrent.CountDownLatch;
 import java.util.function.Consumer;
 import spanwright.answers.LastChanges;
 import spanwright.answers.View;
@@ -146,15 +147,13 @@ final class Parts implements Program {
 
         @Override
         public void await() {
-            Thread waiting = Thread.currentThread();
             Thread stopping = new Thread(this::close, "stop");
             Runtime.getRuntime().addShutdownHook(stopping);
             try {
-                while (!waiting.isInterrupted()) {
-                    Thread.sleep(60_000);
-                }
+                new CountDownLatch(1).await();
             } catch (InterruptedException stopped) {
-                waiting.interrupt();
+                // Stopped from within the process; whoever waited goes on to close, which an interrupt would disturb.
+                Runtime.getRuntime().removeShutdownHook(stopping);
             }
         }
 

@@ -27,6 +27,7 @@ import spanwright.trace.Through;
 /** A trace as a table for a person, 100 columns wide at most, lengths in the unit that people read first. */
 final class TraceTable {
 
+    private static final int WIDTH = 100;
     private static final int WHAT = 60;
     private static final String ROW = "%10s  %-" + WHAT + "s %8s %8s%n";
 
@@ -88,9 +89,10 @@ final class TraceTable {
         String margin = check.margin().microdecibels() == 0 ? "" : " less " + decibels(check.margin()) + " dB margin";
         String verdict = check.passes() ? "passes" : "fails";
         String limit = check.passesAtLimit() ? "passes" : "fails";
-        out.println("Budget: " + name + decibels(check.budget().max()) + " dB" + margin + ": " + verdict + ", "
+        String sentence = "Budget: " + name + decibels(check.budget().max()) + " dB" + margin + ": " + verdict + ", "
                 + decibels(check.left()) + " dB left; " + limit + " at the limit"
-                + (check.overload() ? "; overload: less loss than the class allows" : "") + ".");
+                + (check.overload() ? "; overload: less loss than the class allows" : "") + ".";
+        Output.wrapped(out, sentence, "", WIDTH);
     }
 
     private String describe(ElementLoss loss) {

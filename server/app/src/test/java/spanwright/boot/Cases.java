@@ -1,0 +1,13 @@
+package spanwright.boot;
+
+import java.nio.file.Path;
+
+/** The cases that the repository holds. */
+final class Cases {
+
+    static final Path ROOT = Path.of(System.getProperty("repository.root", "../.."));
+    static final Path WORKED = ROOT.resolve("demo-data/cases/good/worked");
+    static final Path WORKED_LATER = ROOT.resolve("demo-data/cases/good/worked-later");
+
+    private Cases() {}
+}
