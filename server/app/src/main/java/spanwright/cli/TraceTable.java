@@ -66,7 +66,7 @@ final class TraceTable {
                 (name.isEmpty() ? "" : name + ": ") + ends + (path.complete() ? ", complete" : ", not complete")
                         + ", at " + loss.wavelength(),
                 "",
-                100);
+                WIDTH);
         out.printf(Locale.ROOT, ROW, "glass " + unit.symbol(), "", "loss dB", "limit dB");
         List<Length> before = path.glassBefore();
         for (int index = 0; index < before.size(); index++) {

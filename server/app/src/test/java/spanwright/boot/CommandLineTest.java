@@ -79,10 +79,15 @@ class CommandLineTest {
     @Test
     void what_cannot_be_loaded_is_said_in_a_sentence() {
         assertThat(load(folder.resolve("nothing")).err()).contains("There is no folder or file");
-        assertThat(run("load", Cases.WORKED.toString(), "--records", folder.resolve("no/records.db").toString())
+        assertThat(run(
+                                "load",
+                                Cases.WORKED.toString(),
+                                "--records",
+                                folder.resolve("no/records.db").toString())
                         .err())
                 .contains("make it first");
-        assertThat(run("load", Cases.WORKED.toString(), "--records", records, "--by", " ").err())
+        assertThat(run("load", Cases.WORKED.toString(), "--records", records, "--by", " ")
+                        .err())
                 .contains("--by is blank");
         assertThat(load(Cases.WORKED).status()).isZero();
         Ran again = load(Cases.WORKED);
@@ -96,8 +101,18 @@ class CommandLineTest {
 
         Ran circuit = run("trace", "--circuit", "C-1", "--records", records, "--json");
         Ran port = run(
-                "trace", "--port", "E4/T/4", "--wavelength", "1550", "--budget", "3", "--margin", "0.2", "--json",
-                "--records", records);
+                "trace",
+                "--port",
+                "E4/T/4",
+                "--wavelength",
+                "1550",
+                "--budget",
+                "3",
+                "--margin",
+                "0.2",
+                "--json",
+                "--records",
+                records);
 
         assertThat(circuit.err()).isEmpty();
         Expected.assertHeldBy(
@@ -110,7 +125,8 @@ class CommandLineTest {
     void numbers_are_plain_decimals() {
         load(Cases.WORKED);
 
-        String json = run("trace", "--all-circuits", "--records", records, "--json").out();
+        String json =
+                run("trace", "--all-circuits", "--records", records, "--json").out();
 
         assertThat(json).doesNotContainPattern(": -?[0-9.]+[eE]");
     }
@@ -120,21 +136,27 @@ class CommandLineTest {
         load(Cases.WORKED);
         load(Cases.WORKED_LATER);
 
-        assertThat(run("trace", "--circuit", "C-2", "--records", records).status()).isZero();
+        assertThat(run("trace", "--circuit", "C-2", "--records", records).status())
+                .isZero();
         Ran before = run("trace", "--circuit", "C-2", "--as-of", "1", "--records", records);
         assertThat(before.status()).isEqualTo(1);
         assertThat(before.err()).contains("There is no circuit C-2. Is C-1 meant?");
-        assertThat(run("trace", "--circuit", "C-2", "--as-of", "2001-01-01", "--records", records).status())
+        assertThat(run("trace", "--circuit", "C-2", "--as-of", "2001-01-01", "--records", records)
+                        .status())
                 .isEqualTo(1);
-        assertThat(run("trace", "--circuit", "C-2", "--as-of", "3", "--records", records).err())
+        assertThat(run("trace", "--circuit", "C-2", "--as-of", "3", "--records", records)
+                        .err())
                 .contains("There is no posting 3; the last is 2.");
 
-        JsonNode now = Expected.read(run("trace", "--port", "E1/P/1", "--records", records, "--json").out());
-        JsonNode built = Expected.read(
-                run("trace", "--port", "E1/P/1", "--as-if", "J-1", "--records", records, "--json").out());
+        JsonNode now = Expected.read(
+                run("trace", "--port", "E1/P/1", "--records", records, "--json").out());
+        JsonNode built =
+                Expected.read(run("trace", "--port", "E1/P/1", "--as-if", "J-1", "--records", records, "--json")
+                        .out());
         assertThat(now.at("/paths/3/ends/1").asText()).isEqualTo("S1 out 4 @ E3");
         assertThat(built.at("/paths/3/ends/1").asText()).isEqualTo("E4/T/5");
-        assertThat(run("trace", "--port", "E1/P/1", "--as-if", "J-2", "--records", records).err())
+        assertThat(run("trace", "--port", "E1/P/1", "--as-if", "J-2", "--records", records)
+                        .err())
                 .contains("Is J-1 meant?");
     }
 
@@ -150,7 +172,8 @@ class CommandLineTest {
             Ran ran = run(Stream.concat(asked.stream(), List.of("--records", records).stream())
                     .toArray(String[]::new));
             assertThat(ran.status()).as("%s", asked).isZero();
-            assertThat(ran.out().lines()).allSatisfy(line -> assertThat(line.length()).as(line).isLessThanOrEqualTo(100));
+            assertThat(ran.out().lines())
+                    .allSatisfy(line -> assertThat(line.length()).as(line).isLessThanOrEqualTo(100));
         }
     }
 
@@ -163,28 +186,42 @@ class CommandLineTest {
         assertThat(run("trace", "--port", "E1/R/1", "--records", records).err()).contains("no panel in E1 R");
         assertThat(run("trace", "--port", "E9/P/1", "--records", records).err()).contains("no enclosure E9");
         assertThat(run("trace", "--port", "E1", "--records", records).err()).contains("is not a port");
-        assertThat(run("trace", "--fiber", "F-1:25", "--records", records).err()).contains("fibers 1 to 24, not 25");
+        assertThat(run("trace", "--fiber", "F-1:25", "--records", records).err())
+                .contains("fibers 1 to 24, not 25");
         assertThat(run("trace", "--fiber", "F-2:1", "--records", records).err()).contains("Is F-1 meant?");
         assertThat(run("trace", "--fiber", "F-1", "--records", records).err()).contains("is not a fiber");
-        assertThat(run("trace", "--circuit", "C-1", "--wavelength", "1700", "--records", records).err())
+        assertThat(run("trace", "--circuit", "C-1", "--wavelength", "1700", "--records", records)
+                        .err())
                 .contains("1700 nm");
-        assertThat(run("trace", "--circuit", "C-1", "--budget", "Z", "--records", records).err())
+        assertThat(run("trace", "--circuit", "C-1", "--budget", "Z", "--records", records)
+                        .err())
                 .contains("'Z' is no budget");
-        assertThat(run("trace", "--circuit", "C-1", "--margin", "-1", "--records", records).err())
+        assertThat(run("trace", "--circuit", "C-1", "--margin", "-1", "--records", records)
+                        .err())
                 .contains("not a margin");
-        assertThat(run("trace", "--circuit", "C-1", "--wavelength", "0", "--records", records).status())
+        assertThat(run("trace", "--circuit", "C-1", "--wavelength", "0", "--records", records)
+                        .status())
                 .isEqualTo(1);
-        assertThat(run("trace", "--circuit", "C-1", "--as-of", "noon", "--records", records).err())
+        assertThat(run("trace", "--circuit", "C-1", "--as-of", "noon", "--records", records)
+                        .err())
                 .contains("neither a posting's number nor a time");
-        assertThat(run("trace", "--circuit", "C-1", "--records", folder.resolve("none.db").toString()).status())
+        assertThat(run(
+                                "trace",
+                                "--circuit",
+                                "C-1",
+                                "--records",
+                                folder.resolve("none.db").toString())
+                        .status())
                 .isEqualTo(1);
 
         assertThat(run("trace", "--records", records).status()).isEqualTo(2);
-        assertThat(run("trace", "--circuit", "C-1", "--port", "E1/P/1", "--records", records).status())
+        assertThat(run("trace", "--circuit", "C-1", "--port", "E1/P/1", "--records", records)
+                        .status())
                 .isEqualTo(2);
         assertThat(run("trace", "--circuit", "C-1").status()).isEqualTo(2);
         assertThat(run("trcae").status()).isEqualTo(2);
-        assertThat(run("serve", "--port", "many", "--records", records).status()).isEqualTo(2);
+        assertThat(run("serve", "--port", "many", "--records", records).status())
+                .isEqualTo(2);
     }
 
     @Test
@@ -204,7 +241,8 @@ class CommandLineTest {
         assertThat(json.status()).isZero();
         JsonNode findings = Expected.read(json.out()).path("findings");
         assertThat(findings.isArray()).isTrue();
-        findings.forEach(finding -> assertThat(finding.path("severity").asText()).isIn("error", "warning", "note"));
+        findings.forEach(
+                finding -> assertThat(finding.path("severity").asText()).isIn("error", "warning", "note"));
         assertThat(table.out()).contains(" errors, ", " warnings, ");
     }
 
@@ -213,7 +251,8 @@ class CommandLineTest {
         assertThat(run("serve", "--records", records).err()).contains("load a folder into it first");
         load(Cases.WORKED);
         assertThat(run("serve", "--records", records, "--port", "65536").err()).contains("0 to 65535");
-        assertThat(run("serve", "--records", records, "--host", "192.0.2.1", "--port", "0").err())
+        assertThat(run("serve", "--records", records, "--host", "192.0.2.1", "--port", "0")
+                        .err())
                 .contains("Cannot listen at 192.0.2.1");
 
         String body = whileRunning("/status", "serve", "--records", records, "--port", "0");
@@ -241,8 +280,8 @@ class CommandLineTest {
     private static String whileRunning(String path, String... args) throws Exception {
         StringWriter err = new StringWriter();
         int[] status = {-1};
-        Thread running = new Thread(() -> status[0] = CommandLineProgram.run(
-                new Parts(), new PrintWriter(new StringWriter()), new PrintWriter(err), args));
+        Thread running = new Thread(() -> status[0] =
+                CommandLineProgram.run(new Parts(), new PrintWriter(new StringWriter()), new PrintWriter(err), args));
         running.start();
         try {
             Matcher address = ADDRESS.matcher(err.toString());

@@ -86,7 +86,9 @@ class JarIT {
         try (BufferedReader err = process.errorReader(StandardCharsets.UTF_8)) {
             URI address = address(err);
             assertThat(get(address)).contains("<title>Spanwright</title>");
-            assertThat(Expected.read(get(address.resolve("/status"))).path("demo").asBoolean())
+            assertThat(Expected.read(get(address.resolve("/status")))
+                            .path("demo")
+                            .asBoolean())
                     .isTrue();
             assertThat(Expected.read(get(address.resolve("/trace?circuit=RC-01")))
                             .at("/paths/0/complete")
@@ -109,9 +111,7 @@ class JarIT {
 
     private static String get(URI page) throws IOException, InterruptedException {
         HttpResponse<String> answer = HttpClient.newHttpClient()
-                .send(
-                        HttpRequest.newBuilder(page).build(),
-                        HttpResponse.BodyHandlers.ofString(StandardCharsets.UTF_8));
+                .send(HttpRequest.newBuilder(page).build(), HttpResponse.BodyHandlers.ofString(StandardCharsets.UTF_8));
         assertThat(answer.statusCode()).as("%s", page).isEqualTo(200);
         return answer.body();
     }

@@ -70,7 +70,8 @@ class FiberUsesTest {
 
         assertThat(uses(snapshot, 0)).startsWith("suspect", "spare", "dead", "spare");
         assertThat(uses(snapshot, 1)).startsWith("suspect", "leased", "spare", "spare");
-        assertThat(new FiberUses(snapshot).flags(1, 1, 0, 2)).extracting(FiberFlag::flag)
+        assertThat(new FiberUses(snapshot).flags(1, 1, 0, 2))
+                .extracting(FiberFlag::flag)
                 .containsExactly(Flag.SUSPECT, Flag.RESERVED);
     }
 
@@ -139,18 +140,25 @@ class FiberUsesTest {
     }
 
     private static @Nullable Integer id(RecordsView records, @Nullable String enclosure) {
-        return enclosure == null ? null : records.enclosures().find(enclosure).orElseThrow().id();
+        return enclosure == null
+                ? null
+                : records.enclosures().find(enclosure).orElseThrow().id();
     }
 
     private static Snapshot ended(
-            Snapshot snapshot, String enclosure, LegKind side, int seq, int fiber, EndCondition condition, Trust trust) {
+            Snapshot snapshot,
+            String enclosure,
+            LegKind side,
+            int seq,
+            int fiber,
+            EndCondition condition,
+            Trust trust) {
         RecordsView records = snapshot.records();
         int row = records.runOf(1).get(seq).id();
         EndRange ends = new EndRange(new Leg(side, row), FiberRange.of(fiber));
         int at = records.enclosures().find(enclosure).orElseThrow().id();
         return with(
-                snapshot,
-                Change.add(new EndState(records.endStates().count() + 1, at, ends, condition, trust, SEEN)));
+                snapshot, Change.add(new EndState(records.endStates().count() + 1, at, ends, condition, trust, SEEN)));
     }
 
     private static Pass pass(Snapshot snapshot, String enclosure) {

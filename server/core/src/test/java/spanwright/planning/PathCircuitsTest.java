@@ -48,7 +48,8 @@ class PathCircuitsTest {
                 """);
         PathCircuits circuits = new PathCircuits(snapshot);
         Block section = snapshot.network()
-                .sectionsOf(snapshot.records().cables().find("F-1").orElseThrow().id())
+                .sectionsOf(
+                        snapshot.records().cables().find("F-1").orElseThrow().id())
                 .get(0);
 
         assertThat(codes(circuits.through(section.piece(1)))).containsExactly("C-1", "C-2");
@@ -119,9 +120,10 @@ class PathCircuitsTest {
                 .forEach(circuit -> {
                     for (Path path : tracer.ofCircuit(circuit)) {
                         if (path.complete()) {
-                            path.list(Fiber.class).forEach(fiber -> traced.computeIfAbsent(
-                                            piece(snapshot.network(), fiber), piece -> new TreeSet<>())
-                                    .add(circuit.code()));
+                            path.list(Fiber.class)
+                                    .forEach(fiber -> traced.computeIfAbsent(
+                                                    piece(snapshot.network(), fiber), piece -> new TreeSet<>())
+                                            .add(circuit.code()));
                         }
                     }
                 });
