@@ -18,14 +18,14 @@ final class FileCheck {
 
     private FileCheck() {}
 
-    /** What is wrong with a file that is there; nothing where it can be opened, perhaps after {@link Schema#migrate}. */
+    /** What is wrong with a file that is there; nothing where it can be opened, perhaps after {@link Schema#bringUpToDate}. */
     static Optional<Opening.Unopened> check(Path file, Access access) throws IOException {
         try (Connection connection = Connections.reading(file)) {
             long application = pragma(connection, "application_id");
-            if (application != RecordsFile.APPLICATION_ID) {
+            long schema = pragma(connection, "user_version");
+            if (application != RecordsFile.APPLICATION_ID || schema < 1) {
                 return Optional.of(foreign(file, application));
             }
-            long schema = pragma(connection, "user_version");
             if (schema > RecordsFile.SCHEMA) {
                 return Optional.of(new Opening.Unopened(
                         "records-newer",
@@ -47,11 +47,12 @@ final class FileCheck {
     }
 
     private static Opening.Unopened foreign(Path file, long application) {
-        String whose = application == 0 ? "no program's mark" : "the mark " + Long.toHexString(application);
+        String mark = Long.toHexString(application) + ", where a records file bears "
+                + Integer.toHexString(RecordsFile.APPLICATION_ID) + " and the number of its schema";
         return new Opening.Unopened(
                 "records-foreign",
-                file + " is an SQLite file, but not a records file: it bears " + whose + " where a records file bears "
-                        + Integer.toHexString(RecordsFile.APPLICATION_ID) + ". Name a records file.");
+                file + " is an SQLite file, but not a records file: it bears the mark " + mark
+                        + ". Name a records file.");
     }
 
     private static Optional<Opening.Unopened> size(Path file, long pages, long pageSize) throws IOException {
@@ -84,7 +85,8 @@ final class FileCheck {
         return new Opening.Unopened("records-unreadable", file + " cannot be read: " + fault.getMessage());
     }
 
-    private static long pragma(Connection connection, String name) throws SQLException {
+    /** What SQLite says of a file as a whole number. */
+    static long pragma(Connection connection, String name) throws SQLException {
         try (Statement statement = connection.createStatement();
                 ResultSet row = statement.executeQuery("PRAGMA " + name)) {
             return row.getLong(1);

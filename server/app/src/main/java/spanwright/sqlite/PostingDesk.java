@@ -4,7 +4,7 @@ import java.time.Clock;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.Consumer;
+import java.util.function.BiConsumer;
 import java.util.function.Supplier;
 import org.jspecify.annotations.Nullable;
 import org.sqlite.SQLiteErrorCode;
@@ -23,7 +23,7 @@ final class PostingDesk implements PostingLine.Maker {
 
     private final Store store;
     private final Clock clock;
-    private final Consumer<Tip> publish;
+    private final BiConsumer<Tip, Integer> publish;
     private Tip tip;
     private @Nullable Refusal unwritable;
 
@@ -31,9 +31,9 @@ final class PostingDesk implements PostingLine.Maker {
      * A desk.
      *
      * @param tip where the journal ends
-     * @param publish is told where it ends after each commit
+     * @param publish is told where it ends after each commit, and how many changes that held
      */
-    PostingDesk(Store store, Clock clock, Tip tip, Consumer<Tip> publish) {
+    PostingDesk(Store store, Clock clock, Tip tip, BiConsumer<Tip, Integer> publish) {
         this.store = store;
         this.clock = clock;
         this.tip = tip;
@@ -123,11 +123,13 @@ final class PostingDesk implements PostingLine.Maker {
             }
             return;
         }
+        int changes = 0;
         for (Draft draft : drafts) {
+            changes += draft.changes.size();
             tip = draft.sequel().tip();
             draft.pending.settle(new Outcome.Posted(draft.head, tip.snapshot()));
         }
-        publish.accept(tip);
+        publish.accept(tip, changes);
     }
 
     /** Makes a posting by itself whose commit together with others broke a rule of the tables: one of them does. */

@@ -1,7 +1,10 @@
 package spanwright.sqlite;
 
 import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.StringJoiner;
 import org.jspecify.annotations.Nullable;
 import spanwright.sqlite.rows.Column;
@@ -13,12 +16,12 @@ import spanwright.sqlite.rows.RowSink;
  */
 final class RowPattern implements RowSink {
 
-    /** Stands for nothing; known by being this very object, as a word might read the same. */
-    private static final String NOTHING = new StringBuilder("nothing").toString();
+    private static final String NOTHING = "NULL";
 
-    /** What rows have alike: per column a word or {@link #NOTHING}, or null where each has its own value. */
+    /** What rows have alike: per column a literal of SQL, or null where each has its own value. */
     private final @Nullable String[] literals;
 
+    private final Map<String, String> quoted = new HashMap<>();
     private final Object[] values;
     private int column;
     private int bound;
@@ -42,22 +45,11 @@ final class RowPattern implements RowSink {
     /** Whether the row has that in common with others. */
     boolean fits(List<@Nullable String> others) {
         for (int index = 0; index < literals.length; index++) {
-            String literal = literals[index];
-            String other = others.get(index);
-            if (literal == null ? other != null : !same(literal, other)) {
+            if (!Objects.equals(literals[index], others.get(index))) {
                 return false;
             }
         }
         return true;
-    }
-
-    private static boolean same(String literal, @Nullable String other) {
-        return isNothing(literal) ? isNothing(other) : !isNothing(other) && literal.equals(other);
-    }
-
-    @SuppressWarnings("ReferenceEquality")
-    private static boolean isNothing(@Nullable String literal) {
-        return literal == NOTHING;
     }
 
     /** How many values of its own the row has. */
@@ -76,9 +68,9 @@ final class RowPattern implements RowSink {
         StringJoiner marks = new StringJoiner(", ");
         for (int index = 0; index < columns.size(); index++) {
             String literal = literals.get(index);
-            if (!isNothing(literal)) {
+            if (!NOTHING.equals(literal)) {
                 names.add(columns.get(index).name());
-                marks.add(literal == null ? "?" : "'" + literal.replace("'", "''") + "'");
+                marks.add(literal == null ? "?" : literal);
             }
         }
         return "INSERT INTO " + table + " (" + names + ") VALUES (" + marks + ")";
@@ -111,7 +103,7 @@ final class RowPattern implements RowSink {
 
     @Override
     public void word(String value) {
-        literals[column++] = value;
+        literals[column++] = quoted.computeIfAbsent(value, word -> "'" + word.replace("'", "''") + "'");
     }
 
     @Override

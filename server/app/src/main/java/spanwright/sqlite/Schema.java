@@ -38,25 +38,37 @@ final class Schema {
         }
     }
 
+    /** Brings the tables of a file up to the schema of this program. */
+    static void bringUpToDate(Path file) throws SQLException {
+        bringUpTo(RecordsFile.SCHEMA, file, "classpath:" + MIGRATIONS);
+    }
+
     /**
-     * Brings the tables of a file from one schema up to another. Only asked where they differ: to look into its own
-     * history costs Flyway more than opening the file costs us.
+     * Brings the tables of a file up to a schema. Only where they are of an older one is Flyway asked: to look into its
+     * own history costs it more than opening the file costs us.
      *
-     * @param migrations where the migrations are, on the class path
+     * @param migrations where the migrations are
      */
-    static void migrate(Path file, int from, int to, String... migrations) throws SQLException {
+    static void bringUpTo(int schema, Path file, String migrations) throws SQLException {
+        long found;
+        try (Connection connection = Connections.reading(file)) {
+            found = FileCheck.pragma(connection, "user_version");
+        }
+        if (found >= schema) {
+            return;
+        }
         Flyway.configure()
                 .dataSource("jdbc:sqlite:" + file.toAbsolutePath(), "", "")
-                .locations(migrations.length == 0 ? new String[] {"classpath:" + MIGRATIONS} : migrations)
+                .locations(migrations)
                 .table("migration")
                 .baselineOnMigrate(true)
-                .baselineVersion(Integer.toString(from))
-                .target(Integer.toString(to))
+                .baselineVersion(Long.toString(found))
+                .target(Integer.toString(schema))
                 .load()
                 .migrate();
         try (Connection connection = Connections.writing(file)) {
             try (Statement statement = connection.createStatement()) {
-                statement.executeUpdate("PRAGMA user_version = " + to);
+                statement.executeUpdate("PRAGMA user_version = " + schema);
             }
             connection.commit();
         }

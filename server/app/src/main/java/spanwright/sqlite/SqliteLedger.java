@@ -29,23 +29,30 @@ public final class SqliteLedger implements Ledger {
     private final Store store;
     private final PostingDesk desk;
     private final PostingLine line;
+    private final ImageKeeper images;
     private volatile Tip tip;
     private boolean closed;
 
-    private SqliteLedger(Path file, Tip tip, @Nullable WriterLock lock, Clock clock) {
+    private SqliteLedger(Path file, Loading.Loaded loaded, @Nullable WriterLock lock, Clock clock) {
         this.file = file;
-        this.tip = tip;
+        this.tip = loaded.tip();
         this.lock = lock;
         this.readers = new Readers(file);
         this.journal = new Journal(readers);
         this.views = new Views(journal);
         this.integrity = new IntegrityCheck(readers);
         this.store = new Store(file);
-        this.desk = new PostingDesk(store, clock, tip, made -> this.tip = made);
+        this.images = new ImageKeeper(file, loaded.image());
+        this.desk = new PostingDesk(store, clock, loaded.tip(), this::publish);
         this.line = new PostingLine(desk);
         if (lock == null) {
             desk.shut("records-read-only", "The records file was opened to be read only, so nothing can be posted.");
         }
+    }
+
+    private void publish(Tip made, int changes) {
+        tip = made;
+        images.committed(made, changes);
     }
 
     /** Opens a records file. */
@@ -102,7 +109,7 @@ public final class SqliteLedger implements Ledger {
                         "records-missing",
                         "There is no records file " + file + ": name one, or load a folder into it.");
             }
-            return new Opening.Opened(new SqliteLedger(file, Tip.NONE, lock, clock));
+            return new Opening.Opened(new SqliteLedger(file, new Loading.Loaded(Tip.NONE, 0), lock, clock));
         }
         Optional<Opening.Unopened> wrong = FileCheck.check(file, access);
         if (wrong.isPresent()) {
@@ -110,8 +117,14 @@ public final class SqliteLedger implements Ledger {
         }
         if (lock != null) {
             Files.deleteIfExists(RecordsFile.making(file));
+            Schema.bringUpToDate(file);
         }
-        return new Opening.Opened(new SqliteLedger(file, Loading.load(file), lock, clock));
+        Loading.Loaded loaded = Loading.load(file);
+        SqliteLedger ledger = new SqliteLedger(file, loaded, lock, clock);
+        if (loaded.image() < 0) {
+            ledger.images.begin(loaded.tip());
+        }
+        return new Opening.Opened(ledger);
     }
 
     @Override
@@ -192,6 +205,11 @@ public final class SqliteLedger implements Ledger {
             integrity.stop();
             readers.close();
             store.close();
+            if (lock == null) {
+                images.finish();
+            } else {
+                images.close(tip);
+            }
         } catch (SQLException fault) {
             throw new StorageFault(fault);
         } finally {

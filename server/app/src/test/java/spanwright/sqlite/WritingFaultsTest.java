@@ -74,7 +74,8 @@ class WritingFaultsTest {
         Path file = folder.resolve("plant");
         AtomicReference<Tip> published = new AtomicReference<>(Tip.NONE);
         try (Store store = new Store(file)) {
-            PostingDesk desk = new PostingDesk(store, Clock.systemUTC(), Tip.NONE, published::set);
+            PostingDesk desk =
+                    new PostingDesk(store, Clock.systemUTC(), Tip.NONE, (tip, changes) -> published.set(tip));
             assertThat(make(desk, Ledgers.setting("a", "1"))).isInstanceOf(Outcome.Posted.class);
             Tip before = published.get();
             try (Statement statement = store.connection().createStatement()) {

@@ -58,11 +58,11 @@ public final class NetworkImage {
     }
 
     /**
-     * Puts a network together, beside its records.
+     * Puts a network together.
      *
      * @throws IOException where the source fails, or gives the ints of another form of network
      */
-    public static Snapshot read(Records records, IntSource source) throws IOException {
+    public static Network read(IntSource source) throws IOException {
         int[] head = get(source, 6);
         if (head[0] != FORM) {
             throw new IOException("a network of form " + head[0] + ", not " + FORM);
@@ -81,7 +81,12 @@ public final class NetworkImage {
         for (int kind = 0; kind < LooseJoints.empty().byKind.size(); kind++) {
             loose.add(readLoose(source));
         }
-        return new Snapshot(records, new Network(blocks, peer, joint, new LooseJoints(loose, head[5]), paths));
+        return new Network(blocks, peer, joint, new LooseJoints(loose, head[5]), paths);
+    }
+
+    /** The state of which a network is, put together with the records of the same posting. */
+    public static Snapshot beside(Records records, Network network) {
+        return new Snapshot(records, network);
     }
 
     private static int[] get(IntSource source, int count) throws IOException {
