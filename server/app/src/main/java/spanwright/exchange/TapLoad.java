@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.Optional;
 import spanwright.journal.Change;
 import spanwright.quantity.Loss;
+import spanwright.records.RecordsView;
 import spanwright.splicing.Splitter;
 
 /** Enters {@code splitter_outputs.csv}: the losses of unequal taps, which belong to their splitters. */
@@ -76,6 +77,14 @@ final class TapLoad implements TableLoad {
             int line = taps.values().iterator().next().line;
             entering.apply(Table.SPLITTER_OUTPUTS, line, Change.replace(before, after));
         });
+    }
+
+    /** Writes the row of one tap. */
+    static void write(RecordsView view, Splitter splitter, int output, Cells cells) {
+        cells.put(ENCLOSURE, view.enclosures().get(splitter.enclosure()).code());
+        cells.put(SPLITTER, splitter.code());
+        cells.put(OUTPUT, output);
+        cells.put(LOSS, splitter.outputLosses().get(output));
     }
 
     /** A splitter with other losses of its taps. */
