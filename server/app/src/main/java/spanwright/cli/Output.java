@@ -17,7 +17,7 @@ final class Output {
     /** A sentence over as many lines as it needs, each indented; a word longer than a line stands alone. */
     static void wrapped(PrintWriter out, String text, String indent, int width) {
         StringBuilder line = new StringBuilder(indent);
-        for (String word : text.strip().split("\\s+")) {
+        for (String word : text.strip().split("\\s+", -1)) {
             if (line.length() > indent.length() && line.length() + 1 + word.length() > width) {
                 out.println(line);
                 line.setLength(indent.length());

@@ -61,7 +61,7 @@ final class RecordRows {
         }
     }
 
-    @SuppressWarnings("unchecked") // A table's rows are of its kind.
+    @SuppressWarnings({"unchecked", "TypeParameterUnusedInFormals"}) // A table's rows are of its kind.
     private static <T extends Recorded> T cast(Recorded record) {
         return (T) record;
     }

@@ -102,7 +102,7 @@ final class RecordTexts {
         if (record instanceof Splitter splitter) {
             return name(RecordKind.ENCLOSURE, splitter.enclosure()) + "/" + splitter.code();
         }
-        return ((Record) record).toString().replaceFirst(".*?code=([^,]*),.*", "$1");
+        return String.valueOf(record).replaceFirst(".*?code=([^,]*),.*", "$1");
     }
 
     private String text(Object value) {

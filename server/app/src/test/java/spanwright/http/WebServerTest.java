@@ -7,6 +7,7 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.OutputStream;
+import java.net.InetAddress;
 import java.net.Socket;
 import java.net.http.HttpResponse;
 import org.junit.jupiter.api.AfterEach;
@@ -126,7 +127,8 @@ class WebServerTest {
     }
 
     private String raw(String request) throws IOException {
-        try (Socket socket = new Socket("127.0.0.1", server.address().getPort())) {
+        try (Socket socket =
+                new Socket(InetAddress.getLoopbackAddress(), server.address().getPort())) {
             OutputStream out = socket.getOutputStream();
             out.write(request.getBytes(UTF_8));
             out.flush();

@@ -30,6 +30,20 @@ public record SheathMark(
         Trust trust)
         implements Recorded {
 
+    /** One number has one form, so that 100.0 and 100 make equal records. */
+    public SheathMark {
+        markIn = shortest(markIn);
+        markOut = shortest(markOut);
+    }
+
+    private static @Nullable BigDecimal shortest(@Nullable BigDecimal mark) {
+        if (mark == null) {
+            return null;
+        }
+        BigDecimal shortest = mark.stripTrailingZeros();
+        return shortest.scale() < 0 ? shortest.setScale(0) : shortest;
+    }
+
     @Override
     public RecordKind kind() {
         return RecordKind.SHEATH_MARK;
