@@ -2,7 +2,7 @@ import { html, svg } from "lit";
 import { parseColor } from "./names.js";
 
 /** Width of a chip drawn in a drawing, px, for a number of up to three figures. */
-export const CHIP_WIDTH = 40;
+export const CHIP_WIDTH = 46;
 const CHIP_HEIGHT = 14;
 const PATCH = 11;
 

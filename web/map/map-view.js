@@ -51,6 +51,8 @@ export class MapView extends LitElement {
     this.drawing = new Drawing(this.stock);
     /** @type {TileLayer | null} */
     this.tiles = null;
+    /** @type {(() => void) | null} the move that waits for the map to be placed */
+    this.wanted = null;
     new UnitController(this);
   }
 
@@ -93,6 +95,7 @@ export class MapView extends LitElement {
     else if (status.extent) fitExtent(map, status.extent);
     else map.setView([0, 0], 3);
     this.drawing.addTo(map);
+    if (this.standpoint === null) this.wanted?.();
     this.moved();
   }
 
@@ -146,7 +149,9 @@ export class MapView extends LitElement {
     const stays = this.standpoint !== null;
     requestAnimationFrame(() => {
       this.map?.invalidateSize({ animate: false, pan: false });
-      if (!stays && this.drawing.frame()) move();
+      if (this.drawing.frame()) {
+        if (!stays) move();
+      } else this.wanted = move;
     });
   }
 

@@ -17,8 +17,26 @@ import { panelsOf, splittersOf } from "./boxes.js";
  * @extends {RecordView<Enclosure>}
  */
 export class EnclosureView extends RecordView {
+  constructor() {
+    super();
+    /** @type {Set<string>} names of the panels and splitters that are open */
+    this.open = new Set();
+    this.boxes = {
+      isOpen: (/** @type {string} */ name) => this.open.has(name),
+      set: (/** @type {string} */ name, /** @type {boolean} */ open) => this.setBox(name, open),
+    };
+  }
+
+  /** @param {string} name @param {boolean} open */
+  setBox(name, open) {
+    if (open) this.open.add(name);
+    else this.open.delete(name);
+    this.requestUpdate();
+  }
+
   /** @param {AbortSignal} signal @override */
   question(signal) {
+    this.open.clear();
     return ask(pathTo("enclosures", this.code), {}, signal);
   }
 
@@ -36,7 +54,7 @@ export class EnclosureView extends RecordView {
         ${fact("Tray glass", html`${figure(`Glass between sheath and joint in ${it.code}`, "length", it.tray_glass_m, { how: "recorded", changed: it.changed })} <span class="lighter">each side of a joint</span>`)}
         ${fact("Note", it.note)}
       </dl>
-      ${joinedTable(it)}${this.legs(it)}${panelsOf(it)}${splittersOf(it)}
+      ${joinedTable(it)}${this.legs(it)}${panelsOf(it, this.boxes)}${splittersOf(it, this.boxes)}
       ${this.changedLine(it.changed, it.posting)}`;
   }
 
