@@ -1,7 +1,7 @@
 import { Layer } from "leaflet";
 import { Frame, Room } from "./frame.js";
 import { inksOf } from "./inks.js";
-import { paintBase, paintNames } from "./paint-base.js";
+import { paintBase, paintNames, paintPlaces } from "./paint-base.js";
 import { paintSpans, paintStructures } from "./paint-plant.js";
 import { paintHandLines, paintHandSigns } from "./paint-hand.js";
 
@@ -70,6 +70,7 @@ export class Drawing extends Layer {
     paintBase(canvas, frame, inks, this.stock.base);
     paintSpans(canvas, frame, inks, this.stock.spans);
     paintHandLines(canvas, frame, inks, this.atHand);
+    paintPlaces(canvas, frame, inks, this.stock.base, room);
     paintStructures(canvas, frame, inks, this.stock.structures, room);
     paintNames(canvas, frame, inks, this.stock.base, room);
     this.redrawHand();

@@ -82,7 +82,20 @@ function widthOf({ kind, rank }) {
 }
 
 /**
- * Names of the base map, where there is room.
+ * Names of places, which get the room before the plant's small tags do.
+ * @param {CanvasRenderingContext2D} canvas
+ * @param {Frame} frame
+ * @param {Inks} inks
+ * @param {DrawnBase[]} base
+ * @param {Room} room
+ */
+export function paintPlaces(canvas, frame, inks, base, room) {
+  const places = base.filter((each) => each.name && each.rings[0]?.length === 2);
+  for (const place of places.sort((one, other) => one.rank - other.rank)) placeName(canvas, frame, inks, place, room);
+}
+
+/**
+ * Names of ways and areas, where the plant leaves room.
  * @param {CanvasRenderingContext2D} canvas
  * @param {Frame} frame
  * @param {Inks} inks
@@ -90,13 +103,19 @@ function widthOf({ kind, rank }) {
  * @param {Room} room
  */
 export function paintNames(canvas, frame, inks, base, room) {
-  for (const each of [...base].sort((one, other) => one.rank - other.rank)) {
-    if (!each.name) continue;
-    const line = each.rings[0];
-    if (!line) continue;
-    if (line.length === 2) placeName(canvas, frame, inks, each, room);
-    else if (each.area ? frame.zoom > 12 : frame.zoom >= (each.rank > 3 ? 15.5 : 13.5)) wayName(canvas, frame, inks, each, room);
+  const named = base.filter((each) => each.name && (each.rings[0]?.length ?? 0) > 2);
+  for (const each of named.sort((one, other) => one.rank - other.rank)) {
+    if (frame.zoom >= nameFrom(each)) wayName(canvas, frame, inks, each, room);
   }
+}
+
+/**
+ * @param {DrawnBase} each
+ * @returns {number} from which zoom on its name is written
+ */
+function nameFrom({ area, rank, kind }) {
+  if (area) return kind === "building" ? 15 : 12;
+  return rank > 3 ? 15.5 : 13.5;
 }
 
 /**
@@ -107,7 +126,6 @@ export function paintNames(canvas, frame, inks, base, room) {
  * @param {Room} room
  */
 function placeName(canvas, frame, inks, place, room) {
-  if (place.rank > 2 && frame.zoom < 11.5) return;
   const x = frame.x(place.rings[0]?.[0] ?? 0);
   const y = frame.y(place.rings[0]?.[1] ?? 0);
   if (!frame.holds(x, y, 60)) return;

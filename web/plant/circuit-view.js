@@ -2,7 +2,7 @@ import { html } from "lit";
 import { ask, pathTo } from "../server/index.js";
 import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
-import { fact, heading, listed } from "./parts.js";
+import { fact, heading, listed, portLinks } from "./parts.js";
 import { TracedView } from "./traced-view.js";
 
 /** @typedef {import("../server/contract.d.ts").Circuit} Circuit */
@@ -27,8 +27,8 @@ export class CircuitView extends TracedView {
         ${fact("Customer", it.customer)}
         ${fact("Priority", html`<span class="number">${it.priority}</span> <span class="lighter">${PRIORITIES[it.priority] ?? ""}</span>`)}
         ${fact("Serves", html`${figure(`Customers served by ${it.circuit}`, "count", it.customers_served, { how: "recorded", changed: it.changed })} ${it.customers_served === 1 ? "customer" : "customers"}`)}
-        ${fact("From a", html`${link("port", it.a)} <span class="lighter">at</span> ${link("structure", it.a_at.structure)}`)}
-        ${fact("To z", html`${link("port", it.z)} <span class="lighter">at</span> ${link("structure", it.z_at.structure)}`)}
+        ${fact("From a", html`${portLinks(it.a)} <span class="lighter">at</span> ${link("structure", it.a_at.structure)}`)}
+        ${fact("To z", html`${portLinks(it.z)} <span class="lighter">at</span> ${link("structure", it.z_at.structure)}`)}
         ${fact("Protected by", it.partners.length > 0 ? html`${listed(it.partners.map((each) => link("circuit", each)))} <span class="lighter">group ${it.protection_group}</span>` : null)}
       </dl>`;
   }

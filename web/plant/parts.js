@@ -1,5 +1,6 @@
 import { html, nothing } from "lit";
-import { dayInWords } from "../quantity/index.js";
+import { link } from "../address/index.js";
+import { dayInWords, parseRange, rangeSize } from "../quantity/index.js";
 
 /** @typedef {import("../server/contract.d.ts").Mark} Mark */
 
@@ -56,6 +57,20 @@ function markText(mark) {
   const { mark_in: arrives, mark_out: leaves, unit, ink } = mark;
   const read = arrives === leaves || leaves === null ? `${arrives}` : arrives === null ? `${leaves}` : `${arrives} in, ${leaves} out`;
   return `${read} ${unit} ${ink}${mark.governs ? "" : " (does not govern)"}`;
+}
+
+/**
+ * Links to a port, or to each of a range of ports: `E1/P/1-2`.
+ * @param {string} ports
+ * @returns {unknown}
+ */
+export function portLinks(ports) {
+  const at = ports.lastIndexOf("/") + 1;
+  const { first, last } = parseRange(ports.slice(at));
+  const step = last < first ? -1 : 1;
+  const numbers = Array.from({ length: rangeSize({ first, last }) }, (_, index) => first + index * step);
+  const name = (/** @type {number} */ number) => `${ports.slice(0, at)}${number}`;
+  return listed(numbers.map((number, index) => link("port", name(number), index === 0 ? name(number) : String(number))));
 }
 
 /**
