@@ -59,22 +59,25 @@ final class CircuitPathRules implements Rule {
                     "works, but no path joins its ports: from a the glass leads " + reached + ".",
                     "Record the joints that are missing, or mend its ports or its status."));
         }
-        path.list(Fiber.class).forEach(fiber -> dead(checked, circuit, fiber, found));
-        unsure(circuit, path, found);
-    }
-
-    private static void dead(Checked checked, Circuit circuit, Fiber fiber, Consumer<Finding> found) {
-        checked.records()
-                .fiberFlags()
-                .owned(Relation.CABLE_FLAGS, fiber.cable().id())
-                .filter(flag -> flag.flag() == Flag.DEAD && flag.fibers().contains(fiber.fiber()))
-                .filter(flag -> covers(fiber, flag))
-                .forEach(flag -> found.accept(finding(
+        path.list(Fiber.class).stream()
+                .filter(fiber -> dead(checked, fiber))
+                .map(fiber -> fiber.cable().code() + ":" + fiber.fiber())
+                .distinct()
+                .forEach(fiber -> found.accept(finding(
                         Severity.ERROR,
                         "circuit-on-dead-fiber",
                         circuit,
-                        "works on " + fiber.cable().code() + ":" + fiber.fiber() + ", which is flagged dead.",
+                        "works on " + fiber + ", which is flagged dead.",
                         "One of the two is wrong: prove the fiber, then mend the flag or the joints.")));
+        unsure(circuit, path, found);
+    }
+
+    private static boolean dead(Checked checked, Fiber fiber) {
+        return checked.records()
+                .fiberFlags()
+                .owned(Relation.CABLE_FLAGS, fiber.cable().id())
+                .filter(flag -> flag.flag() == Flag.DEAD && flag.fibers().contains(fiber.fiber()))
+                .anyMatch(flag -> covers(fiber, flag));
     }
 
     /** Whether a flag's stretch takes in the whole section; a flag without ends takes in the whole cable. */
