@@ -3,6 +3,7 @@ import { Frame, Room } from "./frame.js";
 import { inksOf } from "./inks.js";
 import { paintBase, paintNames, paintPlaces } from "./paint-base.js";
 import { paintSpans, paintStructures } from "./paint-plant.js";
+import { SITE } from "./tags.js";
 import { paintHandLines, paintHandSigns } from "./paint-hand.js";
 
 /** @typedef {import("./stock.js").Stock} Stock */
@@ -70,8 +71,11 @@ export class Drawing extends Layer {
     paintBase(canvas, frame, inks, this.stock.base);
     paintSpans(canvas, frame, inks, this.stock.spans);
     paintHandLines(canvas, frame, inks, this.atHand);
+    const sites = this.stock.structures.filter((each) => each.importance >= SITE);
+    const others = this.stock.structures.filter((each) => each.importance < SITE);
+    paintStructures(canvas, frame, inks, sites, room);
     paintPlaces(canvas, frame, inks, this.stock.base, room);
-    paintStructures(canvas, frame, inks, this.stock.structures, room);
+    paintStructures(canvas, frame, inks, others, room);
     paintNames(canvas, frame, inks, this.stock.base, room);
     this.redrawHand();
   }

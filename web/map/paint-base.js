@@ -82,7 +82,7 @@ function widthOf({ kind, rank }) {
 }
 
 /**
- * Names of places, which get the room before the plant's small tags do.
+ * Names of places, which get the room after the plant's sites and before its small tags.
  * @param {CanvasRenderingContext2D} canvas
  * @param {Frame} frame
  * @param {Inks} inks
@@ -192,6 +192,9 @@ function longestPiece(frame, line) {
   return best;
 }
 
+/** Where a name is tried about its place, px down. */
+const ABOUT = [0, -22, 22, -36, 36];
+
 /**
  * @param {CanvasRenderingContext2D} canvas
  * @param {Inks} inks
@@ -202,9 +205,10 @@ function longestPiece(frame, line) {
  */
 function written(canvas, inks, text, x, y, room) {
   const half = canvas.measureText(text).width / 2 + 3;
-  if (!room.take(x - half, y - 9, x + half, y + 9)) return;
+  const down = ABOUT.find((each) => room.take(x - half, y + each - 9, x + half, y + each + 9));
+  if (down === undefined) return;
   canvas.save();
-  canvas.translate(x, y);
+  canvas.translate(x, y + down);
   haloed(canvas, inks, text, inks.lighter);
   canvas.restore();
 }

@@ -44,6 +44,9 @@ export function weightOf(fibers) {
   return WEIGHTS.find((each) => fibers <= each.upTo)?.width ?? 1;
 }
 
+/** Structures of this importance and above are sites. */
+export const SITE = 3;
+
 /**
  * How much a structure asks for room: sites before enclosures before the rest.
  * @param {string} kind
