@@ -33,7 +33,9 @@ final class Image {
      */
     static void write(Path file, Tip tip) throws IOException {
         Path place = RecordsFile.network(file);
-        Path making = Files.createTempFile(place.toAbsolutePath().getParent(), place.getFileName() + ".", "");
+        // A name of its own, as a process that reads and one that writes may both make an image.
+        Path making = place.resolveSibling(
+                place.getFileName() + "." + ProcessHandle.current().pid() + "." + tip.number());
         try {
             writeTo(making, tip);
             Disk.moveInto(making, place);

@@ -62,10 +62,10 @@ final class RowPattern implements RowSink {
         return values[index];
     }
 
-    /** The statement that adds rows which have this in common. */
-    static String insert(String table, List<Column> columns, List<@Nullable String> literals) {
-        StringJoiner names = new StringJoiner(", ");
-        StringJoiner marks = new StringJoiner(", ");
+    /** The statement that adds so many rows which have this in common. */
+    static String insert(String table, List<Column> columns, List<@Nullable String> literals, int rows) {
+        StringJoiner names = new StringJoiner(", ", "(", ")");
+        StringJoiner marks = new StringJoiner(", ", "(", ")");
         for (int index = 0; index < columns.size(); index++) {
             String literal = literals.get(index);
             if (!NOTHING.equals(literal)) {
@@ -73,7 +73,7 @@ final class RowPattern implements RowSink {
                 marks.add(literal == null ? "?" : literal);
             }
         }
-        return "INSERT INTO " + table + " (" + names + ") VALUES (" + marks + ")";
+        return "INSERT INTO " + table + " " + names + " VALUES " + marks + (", " + marks).repeat(rows - 1);
     }
 
     private void bind(Object value) {

@@ -64,6 +64,10 @@ final class CodeIndex {
             if (recent.size() <= Math.max(MERGE_AT, from.base.size() / 256)) {
                 return new CodeIndex(from.base, recent);
             }
+            if (from.base.isEmpty()) {
+                recent.values().removeIf(id -> id == GONE);
+                return new CodeIndex(recent, Map.of());
+            }
             Map<String, Integer> merged = new HashMap<>((from.base.size() + recent.size()) * 4 / 3 + 1);
             merged.putAll(from.base);
             merged.putAll(recent);
