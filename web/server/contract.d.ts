@@ -811,8 +811,8 @@ export type Problem = {
   status: number;
   /** What is wrong and what would be right */
   detail: string;
-  /** Stable name of the problem. wavelength_out_of_range: a fiber on the path has no value there */
-  code: "not_found" | "bad_request" | "bad_reference" | "wavelength_out_of_range" | "refused" | "too_large" | "unsupported_media_type" | "method_not_allowed" | "internal";
+  /** Stable name of the problem. wavelength_out_of_range: a fiber on the path has no value there. forbidden: not from this machine, or from another site's page. unavailable: it took too long, or the server is at its bounds */
+  code: "not_found" | "bad_request" | "bad_reference" | "wavelength_out_of_range" | "refused" | "too_large" | "unsupported_media_type" | "method_not_allowed" | "forbidden" | "unavailable" | "internal";
   /** The request that it answers */
   instance?: string;
   /** The query parameter that is wrong, where there is one */

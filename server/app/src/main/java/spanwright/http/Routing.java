@@ -35,6 +35,9 @@ final class Routing {
         get("/trace", new TraceRoute(answering)::trace);
         JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
         get("/postings", journal::list);
+        // A posting is never stopped half way: who sent it would not know whether it was kept.
+        routes.post("/postings", journal::post);
+        get("/postings/{id}", journal::one);
         get("/openapi.json", Routing::openApi);
         get("/health", ctx -> {
             new Question(ctx);

@@ -9,7 +9,6 @@ import spanwright.answers.TraceQuestion;
 /** A glass path end to end, with loss, and where it lies. */
 final class TraceRoute {
 
-    private static final int MOST_NANOMETRES = 100_000;
     private static final int MOST_CIRCUITS = 200;
 
     private final Answering answering;
@@ -30,9 +29,7 @@ final class TraceRoute {
                 false,
                 question.text("port"),
                 question.text("fiber"),
-                question.findWhole("wavelength", 1, MOST_NANOMETRES)
-                        .map(nm -> TraceQuestion.wavelength(BigDecimal.valueOf(nm)))
-                        .orElse(null),
+                question.findDecimal("wavelength").map(TraceQuestion::wavelength).orElse(null),
                 budget == null ? null : TraceQuestion.budget(budget),
                 TraceQuestion.margin(question.findDecimal("margin").orElse(BigDecimal.ZERO)));
         answering.answer(

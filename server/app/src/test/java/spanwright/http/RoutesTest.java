@@ -18,6 +18,7 @@ import spanwright.plant.Cable;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Span;
 import spanwright.plant.Structure;
+import spanwright.records.EndNames;
 import spanwright.records.Records;
 
 /** Every route over real HTTP, on random plants, held to the OpenAPI document. */
@@ -83,6 +84,42 @@ class RoutesTest {
                         "-",
                         records.structures().list().findFirst().orElseThrow().code())
                 .forEach(typed -> get("/find", "/find?q=" + encoded(typed)));
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {21, 22, 23, 24, 25, 26})
+    void every_trace_is_answered_as_described(long seed) {
+        Records records = server.plant(seed).current().records();
+        EndNames names = new EndNames(records);
+        records.circuits().list().forEach(circuit -> trace("circuit", circuit.code()));
+        records.panels().list().forEach(panel -> trace("port", names.port(panel.id(), panel.ports())));
+        records.cables()
+                .list()
+                .forEach(cable -> trace("fiber", names.fiber(cable.id(), 1) + "&wavelength=1550&budget=B%2B&margin=0.5"));
+    }
+
+    /** A random plant may lack a value for some glass or splitter; then that is what is answered. */
+    private void trace(String what, String which) {
+        var answer = server.asking().get("/trace?" + what + "=" + which);
+        JsonNode body = OPEN_API.check("GET", "/trace", answer);
+        assertThat(answer.statusCode() == 200 || body.path("code").asText().equals("wavelength_out_of_range"))
+                .as("%s", body)
+                .isTrue();
+    }
+
+    @Test
+    void a_trace_is_asked_of_one_thing() {
+        server.plant(27);
+        assertThat(problem("/trace", "/trace", 400).path("detail").asText()).startsWith("Nothing to trace is named");
+        problem("/trace", "/trace?port=E1/P/1&fiber=F-1:1", 400);
+        assertThat(problem("/trace", "/trace?circuit=nothing-so-named", 404).path("code").asText())
+                .isEqualTo("bad_reference");
+        assertThat(problem("/trace", "/trace?fiber=F", 400).path("parameter").asText()).isEqualTo("fiber");
+        problem("/trace", "/trace?fiber=F:1&wavelength=1e3", 400);
+        problem("/trace", "/trace?fiber=F:1&wavelength=0", 400);
+        problem("/trace", "/trace?fiber=F:1&margin=-1", 400);
+        problem("/trace", "/trace?fiber=F:1&budget=Q", 400);
+        problem("/trace", "/trace?" + "circuit=a&".repeat(201), 400);
     }
 
     @Test
