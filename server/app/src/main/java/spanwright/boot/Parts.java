@@ -1,20 +1,26 @@
 package spanwright.boot;
 
+import java.io.IOException;
 import java.net.URI;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CountDownLatch;
 import java.util.function.Consumer;
+import org.jspecify.annotations.Nullable;
 import spanwright.answers.LastChanges;
 import spanwright.answers.View;
 import spanwright.answers.Views;
 import spanwright.cli.Program;
 import spanwright.cli.WrongInput;
 import spanwright.exchange.Fault;
+import spanwright.exchange.FolderExport;
 import spanwright.exchange.FolderLoad;
+import spanwright.exchange.GeoJsonExport;
 import spanwright.http.Api;
 import spanwright.http.CannotListenException;
 import spanwright.http.ServerOptions;
@@ -28,6 +34,9 @@ import spanwright.sqlite.SqliteLedger;
 
 /** The parts of the program, put together: storage, records folders, the HTTP interface, behind the command line. */
 final class Parts implements Program {
+
+    private static final String LOOPBACK = "127.0.0.1";
+    private static final int USUAL_PORT = 8080;
 
     @Override
     public String version() {
@@ -57,28 +66,33 @@ final class Parts implements Program {
         if (!Files.exists(folder)) {
             throw new WrongInput("There is no folder or file " + folder + " to load.");
         }
+        try (Ledger ledger = open(records, Access.WRITE)) {
+            return load(folder, ledger, by, reason, progress);
+        }
+    }
+
+    private static LoadResult load(
+            Path folder, Ledger ledger, String by, String reason, Consumer<String> progress) {
         List<Fault> faults = new ArrayList<>();
         List<String> read = new ArrayList<>();
-        try (Ledger ledger = open(records, Access.WRITE)) {
-            Outcome outcome = ledger.post(by, reason, editor -> {
-                faults.addAll(FolderLoad.load(folder, editor, (table, rows, done) -> {
-                    String count = String.format(Locale.ROOT, "%,d %s", rows, table.replace('_', ' '));
-                    progress.accept(done ? count : count + " so far ...");
-                    if (done) {
-                        read.add(count);
-                    }
-                }));
-                return faults.stream().map(Parts::refusal).toList();
-            });
-            if (outcome instanceof Outcome.Posted posted) {
-                return new LoadResult.Loaded(posted.posting(), read);
-            }
-            List<String> lines = faults.isEmpty()
-                    ? ((Outcome.Refused) outcome)
-                            .refusals().stream().map(Refusal::sentence).toList()
-                    : faults.stream().map(Fault::toString).toList();
-            return new LoadResult.Refused(lines);
+        Outcome outcome = ledger.post(by, reason, editor -> {
+            faults.addAll(FolderLoad.load(folder, editor, (table, rows, done) -> {
+                String count = String.format(Locale.ROOT, "%,d %s", rows, table.replace('_', ' '));
+                progress.accept(done ? count : count + " so far ...");
+                if (done) {
+                    read.add(count);
+                }
+            }));
+            return faults.stream().map(Parts::refusal).toList();
+        });
+        if (outcome instanceof Outcome.Posted posted) {
+            return new LoadResult.Loaded(posted.posting(), read);
         }
+        List<String> lines = faults.isEmpty()
+                ? ((Outcome.Refused) outcome)
+                        .refusals().stream().map(Refusal::sentence).toList()
+                : faults.stream().map(Fault::toString).toList();
+        return new LoadResult.Refused(lines);
     }
 
     private static Refusal refusal(Fault fault) {
@@ -87,24 +101,62 @@ final class Parts implements Program {
 
     @Override
     public void export(View view, ExportFormat format, Path out) {
-        if (Files.exists(out)) {
-            throw new WrongInput(out + " is there already; name one that is not.");
+        try {
+            switch (format) {
+                case FOLDER -> FolderExport.write(view.records(), out);
+                case GEOJSON -> GeoJsonExport.write(view.records(), out);
+            }
+        } catch (FileAlreadyExistsException there) {
+            throw new WrongInput(out + " is there already; name one that is not there yet.");
+        } catch (IOException unwritable) {
+            throw new WrongInput(out + " cannot be written: " + unwritable.getMessage());
         }
-        throw new WrongInput("not yet");
     }
 
     @Override
     public Serving serve(ServeOrder order) {
+        ServerOptions options = options(order);
         Ledger ledger = open(order.records(), Access.WRITE);
         try {
             if (ledger.current().records().posting() == 0) {
                 throw new WrongInput("There is no records file " + order.records() + "; load a folder into it first.");
             }
-            WebServer server = WebServer.start(options(order), api(ledger, order.demo()));
-            return new Running(server, ledger, WebServer.isLoopback(order.host()));
-        } catch (CannotListenException taken) {
+            return listen(WebServer.prepare(options, api(ledger, false)), ledger, order.host());
+        } catch (RuntimeException failed) {
             ledger.close();
+            throw failed;
+        }
+    }
+
+    private static Serving listen(WebServer server, Ledger ledger, String host) {
+        try {
+            return new Running(server.listen(), ledger, WebServer.isLoopback(host));
+        } catch (CannotListenException taken) {
             throw new WrongInput(String.valueOf(taken.getMessage()));
+        }
+    }
+
+    @Override
+    public Serving demo(Path records, @Nullable Integer port) {
+        ServerOptions options = options(new ServeOrder(records, LOOPBACK, port == null ? USUAL_PORT : port, null, null));
+        Ledger ledger = open(records, Access.WRITE);
+        try {
+            Api api = api(ledger, true);
+            // The server is put together while the folder is read: either takes a second of a cold start.
+            CompletableFuture<WebServer> server = CompletableFuture.supplyAsync(() -> WebServer.prepare(options, api));
+            LoadResult result = load(PackedDemo.unpack(), ledger, "demo", "The demo, all invented", step -> {});
+            if (result instanceof LoadResult.Refused refused) {
+                server.join().close();
+                throw new WrongInput(String.join(System.lineSeparator(), refused.lines()));
+            }
+            try {
+                return listen(server.join(), ledger, LOOPBACK);
+            } catch (WrongInput taken) {
+                if (port != null) {
+                    throw taken;
+                }
+                return listen(WebServer.prepare(ServerOptions.at(LOOPBACK, 0), api), ledger, LOOPBACK);
+            }
         } catch (RuntimeException failed) {
             ledger.close();
             throw failed;
@@ -125,11 +177,6 @@ final class Parts implements Program {
     private Api api(Ledger ledger, boolean demo) {
         return new Api(
                 new Views(ledger), new LastChanges(ledger), new FolderRows(), new RowDesk(ledger), version(), demo);
-    }
-
-    @Override
-    public Path demoFolder() {
-        return PackedDemo.unpack();
     }
 
     @Override

@@ -46,6 +46,7 @@ public final class CommandLineProgram implements Runnable {
         line.addSubcommand(new LoadCommand(program));
         line.addSubcommand(new TraceCommand(program));
         line.addSubcommand(new CheckCommand(program));
+        line.addSubcommand(new ExportCommand(program));
         line.addSubcommand(new ServeCommand(program));
         line.addSubcommand(new DemoCommand(program));
         line.getSubcommands().values().forEach(command -> command.setUsageHelpWidth(100));

@@ -1,7 +1,6 @@
 package spanwright.cli;
 
 import java.io.IOException;
-import java.io.PrintWriter;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -11,8 +10,6 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Spec;
-import spanwright.cli.Program.LoadResult;
-import spanwright.cli.Program.ServeOrder;
 import spanwright.cli.Program.Serving;
 
 /** Loads the demo into a fresh file and serves it. */
@@ -21,8 +18,6 @@ import spanwright.cli.Program.Serving;
         description = "Loads the demo, an invented network, into a fresh records file and serves it.",
         mixinStandardHelpOptions = true)
 final class DemoCommand implements Callable<Integer> {
-
-    private static final int USUAL_PORT = 8080;
 
     private final Program program;
 
@@ -67,36 +62,14 @@ final class DemoCommand implements Callable<Integer> {
     }
 
     private int run(Path file) {
-        PrintWriter err = spec.commandLine().getErr();
-        LoadResult result =
-                program.load(program.demoFolder(), file, "demo", "The demo scenario, all invented", step -> {});
-        if (result instanceof LoadResult.Refused refused) {
-            refused.lines().forEach(err::println);
-            return CommandLineProgram.WRONG_INPUT;
-        }
-        try (Serving serving = serve(file)) {
-            ServeCommand.announce(err, serving);
+        try (Serving serving = program.demo(file, port)) {
+            ServeCommand.announce(spec.commandLine().getErr(), serving);
             if (!noBrowser) {
                 program.browse(serving.address());
             }
             serving.await();
             return 0;
         }
-    }
-
-    private Serving serve(Path file) {
-        if (port != null) {
-            return program.serve(order(file, port));
-        }
-        try {
-            return program.serve(order(file, USUAL_PORT));
-        } catch (WrongInput taken) {
-            return program.serve(order(file, 0));
-        }
-    }
-
-    private static ServeOrder order(Path file, int port) {
-        return new ServeOrder(file, "127.0.0.1", port, null, null, true);
     }
 
     private static Path fresh() {

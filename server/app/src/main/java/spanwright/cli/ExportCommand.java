@@ -15,8 +15,9 @@ import spanwright.cli.Program.ExportFormat;
         name = "export",
         description = {
             "Writes the records for other programs.",
-            "  folder   a records folder that, loaded into a fresh file, gives the same state",
-            "  geojson  structures and spans on the map"
+            "  folder   a records folder that, loaded into a fresh file, gives the same state;",
+            "           a zip of one where OUT ends in .zip",
+            "  geojson  structures, enclosures, spans and cables on the map"
         },
         mixinStandardHelpOptions = true)
 final class ExportCommand implements Callable<Integer> {
@@ -33,7 +34,7 @@ final class ExportCommand implements Callable<Integer> {
             names = "--format",
             required = true,
             paramLabel = "FORMAT",
-            description = "One of: ${COMPLETION-CANDIDATES}.")
+            description = "folder or geojson.")
     private ExportFormat format;
 
     @Parameters(paramLabel = "OUT", description = "The folder or file to write; not there yet.")

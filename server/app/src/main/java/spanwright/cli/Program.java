@@ -45,8 +45,14 @@ public interface Program {
      */
     Serving serve(ServeOrder order);
 
-    /** Where the folder or zip of the demo is; made where it is packed in the program. */
-    Path demoFolder();
+    /**
+     * Loads the demo into a fresh records file and starts to serve it, to this machine only.
+     *
+     * @param records a file that is not there yet
+     * @param port the port, 0 for any that is free; null for the usual one, or any where that is taken
+     * @throws WrongInput where the file or the port cannot be had
+     */
+    Serving demo(Path records, @Nullable Integer port);
 
     /** Opens a page in the person's browser, if the machine has one. */
     void browse(URI page);
@@ -98,15 +104,13 @@ public interface Program {
      * @param port the port, 0 for any that is free
      * @param tileUrl tile address for the map, or null
      * @param tileAttribution whose tiles they are, or null
-     * @param demo whether the records are those of the demo
      */
     record ServeOrder(
             Path records,
             String host,
             int port,
             @Nullable String tileUrl,
-            @Nullable String tileAttribution,
-            boolean demo) {}
+            @Nullable String tileAttribution) {}
 
     /** A running server. */
     interface Serving extends AutoCloseable {

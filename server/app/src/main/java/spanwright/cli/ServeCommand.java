@@ -57,7 +57,7 @@ final class ServeCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        try (Serving serving = program.serve(new ServeOrder(records, host, port, tile, attribution, false))) {
+        try (Serving serving = program.serve(new ServeOrder(records, host, port, tile, attribution))) {
             announce(spec.commandLine().getErr(), serving);
             serving.await();
             return 0;

@@ -46,18 +46,22 @@ public final class WebServer implements AutoCloseable {
         this.javalin = Javalin.create(config -> configure(config, api, answering));
     }
 
+    /** Puts a server together that does not listen yet. */
+    public static WebServer prepare(ServerOptions options, Api api) {
+        return new WebServer(options, api);
+    }
+
     /**
      * Starts to listen.
      *
-     * @throws CannotListenException where the address or the port cannot be had
+     * @throws CannotListenException where the address or the port cannot be had; the server is then closed
      */
-    public static WebServer start(ServerOptions options, Api api) {
-        WebServer server = new WebServer(options, api);
+    public WebServer listen() {
         try {
-            server.javalin.start();
-            return server;
+            javalin.start();
+            return this;
         } catch (JavalinBindException taken) {
-            server.close();
+            close();
             throw new CannotListenException(options.host(), options.port());
         }
     }

@@ -232,6 +232,32 @@ class CommandLineTest {
     }
 
     @Test
+    void what_is_exported_and_loaded_again_answers_the_same() {
+        load(Cases.WORKED);
+        Path out = folder.resolve("out");
+        Ran exported = run("export", "--format", "folder", out.toString(), "--records", records);
+        assertThat(exported.status()).as(exported.err()).isZero();
+        String first = run("trace", "--all-circuits", "--records", records, "--json").out();
+
+        records = folder.resolve("again.db").toString();
+        assertThat(load(out).status()).isZero();
+
+        assertThat(run("trace", "--all-circuits", "--records", records, "--json").out())
+                .isEqualTo(first);
+        assertThat(run("export", "--format", "folder", out.toString(), "--records", records).err())
+                .contains("is there already");
+        Path map = folder.resolve("map.geojson");
+        assertThat(run("export", "--format", "geojson", map.toString(), "--records", records).status())
+                .isZero();
+        assertThat(Expected.read(map).path("features").isEmpty()).isFalse();
+        assertThat(run("export", "--format", "geojson", folder.resolve("no/map").toString(), "--records", records)
+                        .err())
+                .contains("cannot be written");
+        assertThat(run("export", "--format", "pdf", map.toString(), "--records", records).status())
+                .isEqualTo(2);
+    }
+
+    @Test
     void findings_are_listed_as_a_document_and_as_a_table() {
         load(Cases.WORKED);
 

@@ -65,7 +65,7 @@ final class TestServer implements AutoCloseable {
     }
 
     WebServer server() {
-        WebServer running = server == null ? WebServer.start(options, api(ledger)) : server;
+        WebServer running = server == null ? WebServer.prepare(options, api(ledger)).listen() : server;
         server = running;
         return running;
     }
