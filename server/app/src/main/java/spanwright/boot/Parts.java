@@ -71,8 +71,7 @@ final class Parts implements Program {
         }
     }
 
-    private static LoadResult load(
-            Path folder, Ledger ledger, String by, String reason, Consumer<String> progress) {
+    private static LoadResult load(Path folder, Ledger ledger, String by, String reason, Consumer<String> progress) {
         List<Fault> faults = new ArrayList<>();
         List<String> read = new ArrayList<>();
         Outcome outcome = ledger.post(by, reason, editor -> {
@@ -138,7 +137,8 @@ final class Parts implements Program {
 
     @Override
     public Serving demo(Path records, @Nullable Integer port) {
-        ServerOptions options = options(new ServeOrder(records, LOOPBACK, port == null ? USUAL_PORT : port, null, null));
+        ServerOptions options =
+                options(new ServeOrder(records, LOOPBACK, port == null ? USUAL_PORT : port, null, null));
         Ledger ledger = open(records, Access.WRITE);
         try {
             Api api = api(ledger, true);

@@ -30,11 +30,7 @@ final class ExportCommand implements Callable<Integer> {
     @Mixin
     private ViewOptions view;
 
-    @Option(
-            names = "--format",
-            required = true,
-            paramLabel = "FORMAT",
-            description = "folder or geojson.")
+    @Option(names = "--format", required = true, paramLabel = "FORMAT", description = "folder or geojson.")
     private ExportFormat format;
 
     @Parameters(paramLabel = "OUT", description = "The folder or file to write; not there yet.")

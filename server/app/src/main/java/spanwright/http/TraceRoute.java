@@ -29,7 +29,9 @@ final class TraceRoute {
                 false,
                 question.text("port"),
                 question.text("fiber"),
-                question.findDecimal("wavelength").map(TraceQuestion::wavelength).orElse(null),
+                question.findDecimal("wavelength")
+                        .map(TraceQuestion::wavelength)
+                        .orElse(null),
                 budget == null ? null : TraceQuestion.budget(budget),
                 TraceQuestion.margin(question.findDecimal("margin").orElse(BigDecimal.ZERO)));
         answering.answer(

@@ -237,23 +237,28 @@ class CommandLineTest {
         Path out = folder.resolve("out");
         Ran exported = run("export", "--format", "folder", out.toString(), "--records", records);
         assertThat(exported.status()).as(exported.err()).isZero();
-        String first = run("trace", "--all-circuits", "--records", records, "--json").out();
+        String first =
+                run("trace", "--all-circuits", "--records", records, "--json").out();
 
         records = folder.resolve("again.db").toString();
         assertThat(load(out).status()).isZero();
 
-        assertThat(run("trace", "--all-circuits", "--records", records, "--json").out())
+        assertThat(run("trace", "--all-circuits", "--records", records, "--json")
+                        .out())
                 .isEqualTo(first);
-        assertThat(run("export", "--format", "folder", out.toString(), "--records", records).err())
+        assertThat(run("export", "--format", "folder", out.toString(), "--records", records)
+                        .err())
                 .contains("is there already");
         Path map = folder.resolve("map.geojson");
-        assertThat(run("export", "--format", "geojson", map.toString(), "--records", records).status())
+        assertThat(run("export", "--format", "geojson", map.toString(), "--records", records)
+                        .status())
                 .isZero();
         assertThat(Expected.read(map).path("features").isEmpty()).isFalse();
         assertThat(run("export", "--format", "geojson", folder.resolve("no/map").toString(), "--records", records)
                         .err())
                 .contains("cannot be written");
-        assertThat(run("export", "--format", "pdf", map.toString(), "--records", records).status())
+        assertThat(run("export", "--format", "pdf", map.toString(), "--records", records)
+                        .status())
                 .isEqualTo(2);
     }
 

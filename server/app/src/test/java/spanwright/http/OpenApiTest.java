@@ -30,7 +30,8 @@ class OpenApiTest {
     void a_status_that_is_not_described_falls_to_the_description_of_problems() {
         HttpResponse<byte[]> missing = server.asking().get("/nothing");
 
-        assertThat(openApi.check("GET", "/health", missing).path("code").asText()).isEqualTo("not_found");
+        assertThat(openApi.check("GET", "/health", missing).path("code").asText())
+                .isEqualTo("not_found");
     }
 
     @Test
@@ -41,7 +42,9 @@ class OpenApiTest {
             String path = parts[1].replace("{code}", "no-such").replace("{id}", "1");
             int status = parts[0].equals("GET")
                     ? server.asking().get(path).statusCode()
-                    : server.asking().post(path, "{}", "Content-Type", "application/json").statusCode();
+                    : server.asking()
+                            .post(path, "{}", "Content-Type", "application/json")
+                            .statusCode();
             String detail = new String(server.asking().get(path).body(), UTF_8);
             assertThat(status).as(operation).isNotEqualTo(405).isNotEqualTo(500);
             assertThat(detail).as(operation).doesNotContain("Nothing is at this address");

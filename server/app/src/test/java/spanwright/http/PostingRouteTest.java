@@ -22,7 +22,8 @@ class PostingRouteTest {
             {"by": "A. Marsh", "reason": "Sheet 0412",
              "changes": [{"action": "add", "table": "settings", "row": {"name": "owner", "value": "Valley Fiber"}}]}""";
 
-    private final TestServer server = new TestServer(ServerOptions.at("127.0.0.1", 0).withLargestBody(2_000));
+    private final TestServer server =
+            new TestServer(ServerOptions.at("127.0.0.1", 0).withLargestBody(2_000));
 
     @AfterEach
     void stop() {
@@ -77,11 +78,15 @@ class PostingRouteTest {
 
         JsonNode first = OPEN_API.check("GET", "/postings", server.asking().get("/postings?limit=3"));
         JsonNode rest = OPEN_API.check(
-                "GET", "/postings", server.asking().get("/postings?limit=3&before=" + first.path("next").asInt()));
+                "GET",
+                "/postings",
+                server.asking()
+                        .get("/postings?limit=3&before=" + first.path("next").asInt()));
         JsonNode none = OPEN_API.check("GET", "/postings", server.asking().get("/postings?as_of=2&limit=2"));
-        JsonNode past = OPEN_API.check(
-                "GET", "/postings/{id}", server.asking().get("/postings/2?from_change=1&limit=1"));
-        JsonNode renamed = OPEN_API.check("GET", "/postings/{id}", server.asking().get("/postings/2"));
+        JsonNode past =
+                OPEN_API.check("GET", "/postings/{id}", server.asking().get("/postings/2?from_change=1&limit=1"));
+        JsonNode renamed =
+                OPEN_API.check("GET", "/postings/{id}", server.asking().get("/postings/2"));
 
         assertThat(first.path("postings").size()).isEqualTo(3);
         assertThat(rest.at("/postings/0/posting").asInt()).isEqualTo(2);
@@ -157,7 +162,13 @@ class PostingRouteTest {
 
         assertThat(problem(
                                 server.asking()
-                                        .post("/postings", OWNER, "Content-Type", JSON, "Origin", "http://plant.example"),
+                                        .post(
+                                                "/postings",
+                                                OWNER,
+                                                "Content-Type",
+                                                JSON,
+                                                "Origin",
+                                                "http://plant.example"),
                                 403)
                         .path("code")
                         .asText())

@@ -95,7 +95,8 @@ class RoutesTest {
         records.panels().list().forEach(panel -> trace("port", names.port(panel.id(), panel.ports())));
         records.cables()
                 .list()
-                .forEach(cable -> trace("fiber", names.fiber(cable.id(), 1) + "&wavelength=1550&budget=B%2B&margin=0.5"));
+                .forEach(cable ->
+                        trace("fiber", names.fiber(cable.id(), 1) + "&wavelength=1550&budget=B%2B&margin=0.5"));
     }
 
     /** A random plant may lack a value for some glass or splitter; then that is what is answered. */
@@ -112,9 +113,12 @@ class RoutesTest {
         server.plant(27);
         assertThat(problem("/trace", "/trace", 400).path("detail").asText()).startsWith("Nothing to trace is named");
         problem("/trace", "/trace?port=E1/P/1&fiber=F-1:1", 400);
-        assertThat(problem("/trace", "/trace?circuit=nothing-so-named", 404).path("code").asText())
+        assertThat(problem("/trace", "/trace?circuit=nothing-so-named", 404)
+                        .path("code")
+                        .asText())
                 .isEqualTo("bad_reference");
-        assertThat(problem("/trace", "/trace?fiber=F", 400).path("parameter").asText()).isEqualTo("fiber");
+        assertThat(problem("/trace", "/trace?fiber=F", 400).path("parameter").asText())
+                .isEqualTo("fiber");
         problem("/trace", "/trace?fiber=F:1&wavelength=1e3", 400);
         problem("/trace", "/trace?fiber=F:1&wavelength=0", 400);
         problem("/trace", "/trace?fiber=F:1&margin=-1", 400);

@@ -65,7 +65,8 @@ final class TestServer implements AutoCloseable {
     }
 
     WebServer server() {
-        WebServer running = server == null ? WebServer.prepare(options, api(ledger)).listen() : server;
+        WebServer running =
+                server == null ? WebServer.prepare(options, api(ledger)).listen() : server;
         server = running;
         return running;
     }

@@ -1,6 +1,7 @@
 package spanwright.http;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.catchThrowableOfType;
 
 import java.time.Duration;
 import org.junit.jupiter.api.Test;
@@ -13,19 +14,9 @@ class WatchTest {
     void an_answer_that_takes_too_long_is_stopped_at_its_next_object() {
         try (Watch watch = new Watch(Duration.ofMillis(20))) {
             watch.begin();
-            Unanswerable stopped = null;
-            try {
-                Json.bytes(json -> json.list("items", items -> {
-                    for (int item = 0; item < 10_000_000; item++) {
-                        items.objectHere(empty -> pause());
-                    }
-                }));
-            } catch (Unanswerable late) {
-                stopped = late;
-            }
+            Unanswerable stopped = catchThrowableOfType(Unanswerable.class, WatchTest::answerWithoutEnd);
             watch.end();
 
-            assertThat(stopped).isNotNull();
             assertThat(stopped.kind()).isEqualTo(Unanswerable.Kind.TOO_SLOW);
             assertThat(Problem.of(stopped).status()).isEqualTo(503);
             assertThat(Thread.currentThread().isInterrupted()).isFalse();
@@ -42,7 +33,11 @@ class WatchTest {
         }
     }
 
-    private static void pause() {
-        Thread.onSpinWait();
+    private static void answerWithoutEnd() {
+        Json.bytes(json -> json.list("items", items -> {
+            for (int item = 0; item < 10_000_000; item++) {
+                items.objectHere(empty -> Thread.onSpinWait());
+            }
+        }));
     }
 }
