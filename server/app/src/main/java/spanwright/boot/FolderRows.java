@@ -1,7 +1,7 @@
 package spanwright.boot;
 
-import java.util.Map;
 import spanwright.answers.RowTexts;
+import spanwright.exchange.RecordRow;
 import spanwright.journal.Recorded;
 import spanwright.records.Records;
 
@@ -10,6 +10,7 @@ final class FolderRows implements RowTexts {
 
     @Override
     public RowText of(Records records, Recorded record) {
-        return new RowText("structures", null, Map.of());
+        RecordRow row = RecordRow.of(records, record);
+        return new RowText(row.table(), row.code(), row.columns());
     }
 }

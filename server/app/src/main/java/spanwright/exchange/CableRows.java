@@ -58,7 +58,7 @@ final class CableRows extends Rows<Cable> {
     @Override
     void write(Cable cable, Cells cells) {
         cells.put(CABLE, cable.code());
-        cells.put(TYPE, refs.view().cableTypes().get(cable.cableType()).code());
+        cells.put(TYPE, refs.cableType(cable.cableType()));
         cells.put(PART_OF, cable.partOf());
         cells.put(MARKS_INK, cable.marksInk());
         cells.put(OVERLENGTH, cable.overlengthPct());

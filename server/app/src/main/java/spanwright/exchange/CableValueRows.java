@@ -41,7 +41,7 @@ final class CableValueRows extends Rows<CableValue> {
 
     @Override
     void write(CableValue value, Cells cells) {
-        cells.put(CABLE, refs.view().cables().get(value.cable()).code());
+        cells.put(CABLE, refs.cable(value.cable()));
         cells.put(WAVELENGTH, value.wavelength().exactNanometres());
         cells.put(GROUP_INDEX, value.groupIndex());
         cells.put(LOSS, value.lossPerKm());

@@ -14,7 +14,7 @@ final class ColorCodeLoad implements TableLoad {
     static final int CODE = Table.COLOR_CODES.column("code");
     static final int POSITION = Table.COLOR_CODES.column("position");
     static final int COLOR = Table.COLOR_CODES.column("color");
-    private static final int MOST_POSITIONS = 10_000;
+    static final int MOST_POSITIONS = 10_000;
 
     /** A colour, and the line it stands on. */
     private record Color(String word, int line) {}

@@ -40,7 +40,7 @@ final class CountRows extends Rows<FiberCount> {
 
     @Override
     void write(FiberCount count, Cells cells) {
-        cells.put(CABLE, refs.view().cables().get(count.cable()).code());
+        cells.put(CABLE, refs.cable(count.cable()));
         cells.put(FIBERS, count.fibers());
         cells.put(NAME, count.name());
         cells.put(NUMBERS, count.numbers());

@@ -47,7 +47,7 @@ final class EnclosureRows extends Rows<Enclosure> {
     @Override
     void write(Enclosure enclosure, Cells cells) {
         cells.put(ENCLOSURE, enclosure.code());
-        cells.put(STRUCTURE, refs.view().structures().get(enclosure.structure()).code());
+        cells.put(STRUCTURE, refs.structure(enclosure.structure()));
         cells.put(KIND, enclosure.type().word());
         cells.put(TRAY_GLASS, enclosure.trayGlass());
         cells.put(STATE, enclosure.state().word());

@@ -40,7 +40,7 @@ final class EndStateRows extends Rows<EndState> {
 
     @Override
     void write(EndState state, Cells cells) {
-        cells.put(ENCLOSURE, refs.view().enclosures().get(state.enclosure()).code());
+        cells.put(ENCLOSURE, refs.enclosure(state.enclosure()));
         cells.put(END, ends.text(state.ends()));
         cells.put(STATE, state.condition().word());
         cells.put(TRUST, state.trust().word());

@@ -190,20 +190,13 @@ final class Ends {
     String text(EndRange ends) {
         int owner = ends.leg().owner();
         return switch (ends.leg().kind()) {
-            case BACK -> cableAt(owner) + " back " + ends.numbers();
-            case AHEAD -> cableAt(owner) + " ahead " + ends.numbers();
+            case BACK -> refs.cableAt(owner) + " back " + ends.numbers();
+            case AHEAD -> refs.cableAt(owner) + " ahead " + ends.numbers();
             case IN ->
-                view.splitters().get(owner).code()
-                        + (ends.numbers().last() == 1 && ends.count() == 1 ? " in" : " in " + ends.numbers());
-            case OUT -> view.splitters().get(owner).code() + " out " + ends.numbers();
-            case REAR, FRONT -> {
-                var panel = view.panels().get(owner);
-                yield view.enclosures().get(panel.enclosure()).code() + "/" + panel.code() + "/" + ends.numbers();
-            }
+                refs.splitter(owner)
+                        + (ends.numbers().equals(FiberRange.of(1)) ? " in" : " in " + ends.numbers());
+            case OUT -> refs.splitter(owner) + " out " + ends.numbers();
+            case REAR, FRONT -> refs.panelWhole(owner) + "/" + ends.numbers();
         };
-    }
-
-    private String cableAt(int runRow) {
-        return view.cables().get(view.runRows().get(runRow).cable()).code();
     }
 }

@@ -77,7 +77,7 @@ final class FiberFlagRows extends Rows<FiberFlag> {
 
     @Override
     void write(FiberFlag flag, Cells cells) {
-        cells.put(CABLE, refs.view().cables().get(flag.cable()).code());
+        cells.put(CABLE, refs.cable(flag.cable()));
         cells.put(FIBERS, flag.fibers());
         cells.put(FLAG, flag.flag().word());
         cells.put(FROM, code(flag.from()));
@@ -90,6 +90,6 @@ final class FiberFlagRows extends Rows<FiberFlag> {
     private @Nullable String code(@Nullable Integer enclosure) {
         return enclosure == null
                 ? null
-                : refs.view().enclosures().get(enclosure).code();
+                : refs.enclosure(enclosure);
     }
 }

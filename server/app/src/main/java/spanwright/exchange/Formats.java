@@ -19,6 +19,14 @@ final class Formats {
         return refs;
     }
 
+    Ends ends() {
+        return ends;
+    }
+
+    Ports ports() {
+        return ports;
+    }
+
     RunRowRows runRows() {
         return new RunRowRows(refs);
     }

@@ -74,12 +74,7 @@ final class Lines {
             case PASS -> Table.ENCLOSURE_CABLES;
             case SPLITTER -> Table.SPLITTERS;
             case PANEL -> Table.PANELS;
-            case JOINT ->
-                switch (((Joint) record).type()) {
-                    case SPLICE -> Table.SPLICES;
-                    case TERMINATION -> Table.TERMINATIONS;
-                    case JUMPER -> Table.JUMPERS;
-                };
+            case JOINT -> tableOf((Joint) record);
             case END_STATE -> Table.END_STATES;
             case MEASUREMENT -> Table.MEASUREMENTS;
             case FIBER_FLAG -> Table.FIBER_FLAGS;
@@ -87,6 +82,15 @@ final class Lines {
             case CIRCUIT -> Table.CIRCUITS;
             case PLANNING_VALUE -> Table.PLANNING_VALUES;
             case BASE_FEATURE -> null;
+        };
+    }
+
+    /** The table in which a joint stands. */
+    static Table tableOf(Joint joint) {
+        return switch (joint.type()) {
+            case SPLICE -> Table.SPLICES;
+            case TERMINATION -> Table.TERMINATIONS;
+            case JUMPER -> Table.JUMPERS;
         };
     }
 }

@@ -32,7 +32,7 @@ final class PanelRows extends Rows<Panel> {
 
     @Override
     void write(Panel panel, Cells cells) {
-        cells.put(ENCLOSURE, refs.view().enclosures().get(panel.enclosure()).code());
+        cells.put(ENCLOSURE, refs.enclosure(panel.enclosure()));
         cells.put(PANEL, panel.code());
         cells.put(PORTS, panel.ports());
         cells.put(CONNECTOR, panel.connector());

@@ -48,7 +48,7 @@ final class PassRows extends Rows<Pass> {
         if (Runs.inDoubt(refs, cable)) {
             return visits.size() == 1 ? visits.get(0).id() : 0;
         }
-        String where = refs.view().structures().get(structure).code();
+        String where = refs.structure(structure);
         if (visits.isEmpty()) {
             row.fault(
                     CABLE,
@@ -66,9 +66,9 @@ final class PassRows extends Rows<Pass> {
 
     @Override
     void write(Pass pass, Cells cells) {
-        cells.put(ENCLOSURE, refs.view().enclosures().get(pass.enclosure()).code());
-        cells.put(CABLE, refs.view().cables().get(pass.cable()).code());
-        cells.put(SEQ, refs.view().runRows().get(pass.runRow()).seq());
+        cells.put(ENCLOSURE, refs.enclosure(pass.enclosure()));
+        cells.put(CABLE, refs.cable(pass.cable()));
+        cells.put(SEQ, refs.seq(pass.runRow()));
         cells.ranges(OPENED, pass.opened());
         cells.ranges(TUBES_OPENED, pass.tubesOpened());
     }

@@ -75,7 +75,6 @@ final class Ports {
 
     /** Ports as a row names them. */
     String text(int panel, FiberRange numbers) {
-        Panel found = refs.view().panels().get(panel);
-        return refs.view().enclosures().get(found.enclosure()).code() + "/" + found.code() + "/" + numbers;
+        return refs.panelWhole(panel) + "/" + numbers;
     }
 }

@@ -49,21 +49,16 @@ final class RecordRows {
         return record -> ((Joint) record).type() == type;
     }
 
-    private <T extends Recorded> void each(Rows<T> rows, Predicate<Recorded> which, Taker taker) throws IOException {
+    private void each(Rows<?> rows, Predicate<Recorded> which, Taker taker) throws IOException {
         Cells cells = new Cells(rows.table());
         RecordKind kind = rows.kind();
         for (int id = 1; id < view.limit(kind); id++) {
             Recorded record = view.record(kind, id);
             if (record != null && which.test(record)) {
-                rows.write(cast(record), cells);
+                rows.writeRecord(record, cells);
                 taker.take(cells.texts());
             }
         }
-    }
-
-    @SuppressWarnings({"unchecked", "TypeParameterUnusedInFormals"}) // A table's rows are of its kind.
-    private static <T extends Recorded> T cast(Recorded record) {
-        return (T) record;
     }
 
     private void eachFiberType(Taker taker) throws IOException {
@@ -101,7 +96,7 @@ final class RecordRows {
         Cells cells = new Cells(Table.SPLITTER_OUTPUTS);
         for (Splitter splitter : view.splitters().list().toList()) {
             for (int output : new TreeMap<>(splitter.outputLosses()).keySet()) {
-                TapLoad.write(view, splitter, output, cells);
+                TapLoad.write(formats.refs(), splitter, output, cells);
                 taker.take(cells.texts());
             }
         }

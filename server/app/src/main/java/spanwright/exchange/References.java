@@ -15,9 +15,8 @@ import spanwright.records.RecordsView;
  *
  * <p>Codes found are remembered, so nothing may be renamed or removed while one of these is in use.
  */
-final class References {
+final class References extends Codes {
 
-    private final RecordsView view;
     private final Doubts doubts;
     private @Nullable ZoneId zone;
 
@@ -28,7 +27,7 @@ final class References {
     final Known<Enclosure> enclosures;
 
     References(RecordsView view, Doubts doubts) {
-        this.view = view;
+        super(view);
         this.doubts = doubts;
         structures = new Known<>(view.structures(), Table.STRUCTURES, "structure", Structure::code, doubts);
         spans = new Known<>(view.spans(), Table.SPANS, "span", Span::code, doubts);
@@ -37,24 +36,20 @@ final class References {
         enclosures = new Known<>(view.enclosures(), Table.ENCLOSURES, "enclosure", Enclosure::code, doubts);
     }
 
-    RecordsView view() {
-        return view;
-    }
-
     Doubts doubts() {
         return doubts;
     }
 
     /** The type of a cable. */
     CableType typeOf(int cable) {
-        return view.cableTypes().get(view.cables().get(cable).cableType());
+        return view().cableTypes().get(view().cables().get(cable).cableType());
     }
 
     /** The records' own zone; UTC where no setting says otherwise. */
     ZoneId zone() {
         ZoneId known = zone;
         if (known == null) {
-            known = view.settings()
+            known = view().settings()
                     .find("time_zone")
                     .map(found -> ZoneId.of(found.value()))
                     .orElse(ZoneOffset.UTC);

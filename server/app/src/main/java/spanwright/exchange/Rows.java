@@ -44,6 +44,12 @@ abstract class Rows<T extends Recorded> {
     /** Writes a record into the cells of a row. */
     abstract void write(T record, Cells cells);
 
+    /** Writes a record of the table's kind into the cells of a row. */
+    @SuppressWarnings("unchecked") // A table's rows are of its kind.
+    final void writeRecord(Recorded record, Cells cells) {
+        write((T) record, cells);
+    }
+
     /** What other rows name this one by, as {@link Doubts} keeps it; null where nothing refers to it. */
     @Nullable
     String key(Row row) {

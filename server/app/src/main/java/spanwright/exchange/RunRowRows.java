@@ -53,11 +53,11 @@ final class RunRowRows extends Rows<RunRow> {
 
     @Override
     void write(RunRow run, Cells cells) {
-        cells.put(CABLE, refs.view().cables().get(run.cable()).code());
+        cells.put(CABLE, refs.cable(run.cable()));
         cells.put(SEQ, run.seq());
-        cells.put(STRUCTURE, refs.view().structures().get(run.structure()).code());
+        cells.put(STRUCTURE, refs.structure(run.structure()));
         Integer span = run.span();
-        cells.put(SPAN, span == null ? null : refs.view().spans().get(span).code());
+        cells.put(SPAN, span == null ? null : refs.span(span));
         cells.put(SLACK, run.slack());
         cells.put(SLACK_TRUST, run.slackTrust().word());
         cells.put(SLACK_ON, run.slackOn());

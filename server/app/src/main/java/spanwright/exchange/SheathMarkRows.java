@@ -5,7 +5,6 @@ import java.time.LocalDate;
 import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import spanwright.journal.RecordKind;
-import spanwright.plant.RunRow;
 import spanwright.plant.SheathMark;
 import spanwright.plant.Trust;
 import spanwright.quantity.LengthUnit;
@@ -59,9 +58,8 @@ final class SheathMarkRows extends Rows<SheathMark> {
 
     @Override
     void write(SheathMark mark, Cells cells) {
-        RunRow run = refs.view().runRows().get(mark.runRow());
-        cells.put(CABLE, refs.view().cables().get(run.cable()).code());
-        cells.put(SEQ, run.seq());
+        cells.put(CABLE, refs.cableAt(mark.runRow()));
+        cells.put(SEQ, refs.seq(mark.runRow()));
         cells.put(INK, mark.ink());
         cells.put(UNIT, mark.unit().symbol());
         cells.put(MARK_IN, mark.markIn());

@@ -74,8 +74,8 @@ final class SpanRows extends Rows<Span> {
     @Override
     void write(Span span, Cells cells) {
         cells.put(SPAN, span.code());
-        cells.put(FROM, refs.view().structures().get(span.from()).code());
-        cells.put(TO, refs.view().structures().get(span.to()).code());
+        cells.put(FROM, refs.structure(span.from()));
+        cells.put(TO, refs.structure(span.to()));
         cells.put(PLACEMENT, span.placement().word());
         cells.put(LENGTH, span.measuredLength());
         Line line = span.line();

@@ -99,7 +99,7 @@ final class SpliceRows extends Rows<Joint> {
     void write(Joint joint, Cells cells) {
         JointFacts facts = joint.facts();
         SpliceMethod method = facts.method();
-        cells.put(ENCLOSURE, refs.view().enclosures().get(joint.enclosure()).code());
+        cells.put(ENCLOSURE, refs.enclosure(joint.enclosure()));
         cells.put(TRAY, facts.tray());
         cells.put(A, ends.text(joint.a()));
         cells.put(B, ends.text(joint.b()));

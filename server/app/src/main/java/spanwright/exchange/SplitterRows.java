@@ -39,7 +39,7 @@ final class SplitterRows extends Rows<Splitter> {
 
     @Override
     void write(Splitter splitter, Cells cells) {
-        cells.put(ENCLOSURE, refs.view().enclosures().get(splitter.enclosure()).code());
+        cells.put(ENCLOSURE, refs.enclosure(splitter.enclosure()));
         cells.put(SPLITTER, splitter.code());
         cells.put(INPUTS, splitter.inputs());
         cells.put(OUTPUTS, splitter.outputs());

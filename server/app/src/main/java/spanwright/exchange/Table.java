@@ -152,6 +152,11 @@ enum Table {
         return index;
     }
 
+    /** The names of all tables, without {@code .csv}. */
+    static List<String> words() {
+        return Arrays.stream(values()).map(Table::word).toList();
+    }
+
     /** The table of a name without {@code .csv}, if any. */
     static Optional<Table> find(String word) {
         return Arrays.stream(values()).filter(table -> table.word.equals(word)).findFirst();

@@ -6,7 +6,6 @@ import java.util.Map;
 import java.util.Optional;
 import spanwright.journal.Change;
 import spanwright.quantity.Loss;
-import spanwright.records.RecordsView;
 import spanwright.splicing.Splitter;
 
 /** Enters {@code splitter_outputs.csv}: the losses of unequal taps, which belong to their splitters. */
@@ -80,8 +79,8 @@ final class TapLoad implements TableLoad {
     }
 
     /** Writes the row of one tap. */
-    static void write(RecordsView view, Splitter splitter, int output, Cells cells) {
-        cells.put(ENCLOSURE, view.enclosures().get(splitter.enclosure()).code());
+    static void write(Codes codes, Splitter splitter, int output, Cells cells) {
+        cells.put(ENCLOSURE, codes.enclosure(splitter.enclosure()));
         cells.put(SPLITTER, splitter.code());
         cells.put(OUTPUT, output);
         cells.put(LOSS, splitter.outputLosses().get(output));

@@ -112,9 +112,8 @@ final class TerminationRows extends Rows<Joint> {
     @Override
     void write(Joint joint, Cells cells) {
         JointFacts facts = joint.facts();
-        Panel panel = refs.view().panels().get(joint.a().leg().owner());
-        cells.put(ENCLOSURE, refs.view().enclosures().get(joint.enclosure()).code());
-        cells.put(PANEL, panel.code());
+        cells.put(ENCLOSURE, refs.enclosure(joint.enclosure()));
+        cells.put(PANEL, refs.panel(joint.a().leg().owner()));
         cells.put(PORTS, joint.a().numbers());
         cells.put(END, ends.text(joint.b()));
         cells.put(METHOD, (facts.method() == null ? Way.DIRECT : Way.PIGTAIL).word());

@@ -26,6 +26,20 @@ final class Texts {
         return true;
     }
 
+    /** Whether a file of the folder can hold a text: no control characters, no halves of characters. */
+    static boolean canBeWritten(String text) {
+        for (int index = 0; index < text.length(); ) {
+            int c = text.codePointAt(index);
+            boolean half = c >= Character.MIN_SURROGATE && c <= Character.MAX_SURROGATE;
+            boolean control = (c < ' ' && c != '\t' && c != '\n' && c != '\r') || c == 127;
+            if (half || control) {
+                return false;
+            }
+            index += Character.charCount(c);
+        }
+        return text.length() <= CsvReader.MOST_FIELD_CHARS;
+    }
+
     /** Whether a code may not hold a character. */
     static boolean forbiddenInCode(char c) {
         return c == ',' || c == '/' || c == ':' || c <= ' ' || c == 127 || (c >= 128 && spaceBeyondAscii(c));

@@ -60,6 +60,11 @@ final class EndRules {
         return used.finish();
     }
 
+    /** Who uses ends, all changes regarded. */
+    EndUsers users() {
+        return users;
+    }
+
     private List<Refusal> refuseJoint(Joint joint) {
         List<Refusal> refusals = new ArrayList<>();
         refuseWithin(joint, refusals);

@@ -4,6 +4,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import spanwright.journal.Change;
+import spanwright.plant.FiberRange;
 import spanwright.records.RecordsView;
 import spanwright.splicing.EndRange;
 import spanwright.splicing.Joint;
@@ -91,6 +92,18 @@ final class EndUsers {
     /** Joints in the glass that name a leg out of the network. */
     int[] looseJoints(Leg leg) {
         return network.looseJoints(leg);
+    }
+
+    /** The joint in the glass that an end is in; 0 where it is in none. */
+    int inGlass(Leg leg, int number) {
+        Map<Integer, Long> found = new HashMap<>();
+        inGlass(new EndRange(leg, FiberRange.of(number)), 0, found);
+        return found.isEmpty() ? 0 : found.keySet().iterator().next();
+    }
+
+    /** The joint planned within a job that an end is in; 0 where it is in none. */
+    int planned(String job, long key) {
+        return plannedOf(job).getOrDefault(key, 0);
     }
 
     private Map<Long, Integer> plannedOf(String job) {

@@ -6,6 +6,7 @@ import spanwright.journal.Change;
 import spanwright.records.EntryRules;
 import spanwright.records.RecordsEditor;
 import spanwright.records.Refusal;
+import spanwright.splicing.Leg;
 
 /** Builds the next snapshot from changes. One thread's; dead after {@link #build(int)}. */
 public final class SnapshotEditor {
@@ -52,6 +53,16 @@ public final class SnapshotEditor {
             refusals.addAll(endRules.finish());
         }
         return refusals;
+    }
+
+    /** The joint in the glass that an end is in, all changes regarded; 0 where it is in none. */
+    public int findJoint(Leg leg, int number) {
+        return endRules.users().inGlass(leg, number);
+    }
+
+    /** The joint planned within a job that an end is in, all changes regarded; 0 where it is in none. */
+    public int findPlanned(String job, Leg leg, int number) {
+        return endRules.users().planned(job, leg.key(number));
     }
 
     /** All changes applied or replayed, in order. */
