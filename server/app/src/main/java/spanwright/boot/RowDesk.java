@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import spanwright.exchange.PostingRows;
-import spanwright.exchange.RowChange;
 import spanwright.http.PostingDesk;
 import spanwright.network.Ledger;
 import spanwright.network.Outcome;
@@ -22,8 +21,9 @@ final class RowDesk implements PostingDesk {
     }
 
     @Override
-    public Result post(String by, String reason, List<PostingDesk.RowChange> changes) {
-        List<RowChange> rows = changes.stream().map(RowDesk::row).toList();
+    public Result post(String by, String reason, List<RowChange> changes) {
+        List<spanwright.exchange.RowChange> rows =
+                changes.stream().map(RowDesk::row).toList();
         List<RowFault> faults = new ArrayList<>();
         Outcome outcome = ledger.post(by, reason, editor -> {
             faults.clear();
@@ -42,9 +42,9 @@ final class RowDesk implements PostingDesk {
         return new Result.Refused(faults);
     }
 
-    private static RowChange row(PostingDesk.RowChange change) {
-        return new RowChange(
-                RowChange.Action.valueOf(change.action().name()),
+    private static spanwright.exchange.RowChange row(RowChange change) {
+        return new spanwright.exchange.RowChange(
+                spanwright.exchange.RowChange.Action.valueOf(change.action().name()),
                 change.table(),
                 change.key(),
                 withoutNulls(change.row()));

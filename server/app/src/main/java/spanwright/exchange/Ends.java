@@ -193,8 +193,7 @@ final class Ends {
             case BACK -> refs.cableAt(owner) + " back " + ends.numbers();
             case AHEAD -> refs.cableAt(owner) + " ahead " + ends.numbers();
             case IN ->
-                refs.splitter(owner)
-                        + (ends.numbers().equals(FiberRange.of(1)) ? " in" : " in " + ends.numbers());
+                refs.splitter(owner) + (ends.numbers().equals(FiberRange.of(1)) ? " in" : " in " + ends.numbers());
             case OUT -> refs.splitter(owner) + " out " + ends.numbers();
             case REAR, FRONT -> refs.panelWhole(owner) + "/" + ends.numbers();
         };

@@ -88,8 +88,6 @@ final class FiberFlagRows extends Rows<FiberFlag> {
     }
 
     private @Nullable String code(@Nullable Integer enclosure) {
-        return enclosure == null
-                ? null
-                : refs.enclosure(enclosure);
+        return enclosure == null ? null : refs.enclosure(enclosure);
     }
 }

@@ -75,7 +75,9 @@ final class JointRanges {
             return needed(name);
         }
         Ports.Found found = posting.formats().ports().find(row, column);
-        return found == null ? null : new EndRange(new Leg(LegKind.FRONT, found.panel().id()), found.numbers());
+        return found == null
+                ? null
+                : new EndRange(new Leg(LegKind.FRONT, found.panel().id()), found.numbers());
     }
 
     private @Nullable EndRange glass(Row row, String name) {
@@ -95,7 +97,9 @@ final class JointRanges {
         }
         Panel panel = enclosure == 0
                 ? null
-                : posting.formats().ports().panel(row, panelColumn, enclosure, row.from(panelColumn), row.to(panelColumn));
+                : posting.formats()
+                        .ports()
+                        .panel(row, panelColumn, enclosure, row.from(panelColumn), row.to(panelColumn));
         if (panel == null) {
             return null;
         }
@@ -123,15 +127,19 @@ final class JointRanges {
             int number = named.numbers().at(index);
             int id = joint(named.leg(), number, key);
             if (id == 0) {
-                posting.fault(null, "there is no such row in " + table.word() + ": " + number + " of the ends named is"
-                        + " not joined; name ends that are");
+                posting.fault(
+                        null,
+                        "there is no such row in " + table.word() + ": " + number + " of the ends named is"
+                                + " not joined; name ends that are");
                 return null;
             }
             Joint joint = view.joints().get(id);
             Table held = Lines.tableOf(joint);
             if (table != held) {
-                posting.fault(null, "there is no such row in " + table.word() + ": the end is in a row of "
-                        + held.word() + "; change it there");
+                posting.fault(
+                        null,
+                        "there is no such row in " + table.word() + ": the end is in a row of " + held.word()
+                                + "; change it there");
                 return null;
             }
             BitSet indexes = selected.computeIfAbsent(id, any -> new BitSet());
@@ -172,11 +180,14 @@ final class JointRanges {
         for (Map.Entry<Integer, BitSet> each : selected.entrySet()) {
             Map<String, String> texts = PostingRows.texts(rows, view.joints().get(each.getKey()));
             for (Map.Entry<String, String> asked : rest.entrySet()) {
-                boolean compared = !ends.contains(asked.getKey()) && !asked.getKey().equals("job");
+                boolean compared =
+                        !ends.contains(asked.getKey()) && !asked.getKey().equals("job");
                 if (compared && !texts.getOrDefault(asked.getKey(), "").equals(asked.getValue())) {
-                    posting.fault(asked.getKey(), asked.getKey() + " '" + Texts.shown(asked.getValue())
-                            + "' is not so of that row; it is '"
-                            + Texts.shown(texts.getOrDefault(asked.getKey(), "")) + "'");
+                    posting.fault(
+                            asked.getKey(),
+                            asked.getKey() + " '" + Texts.shown(asked.getValue())
+                                    + "' is not so of that row; it is '"
+                                    + Texts.shown(texts.getOrDefault(asked.getKey(), "")) + "'");
                     return false;
                 }
             }
@@ -186,8 +197,8 @@ final class JointRanges {
 
     /** Where the key names both sides, they are joined to each other. */
     private boolean partnersAsAsked(Map<Integer, BitSet> selected, Map<String, String> key) {
-        boolean both = (key.containsKey("a") && key.containsKey("b"))
-                || (key.containsKey("ports") && key.containsKey("end"));
+        boolean both =
+                (key.containsKey("a") && key.containsKey("b")) || (key.containsKey("ports") && key.containsKey("end"));
         if (!both) {
             return true;
         }
@@ -203,7 +214,8 @@ final class JointRanges {
             right = joined(selected.keySet(), named.key(index), other.key(index));
         }
         if (!right) {
-            posting.fault(column, "the ends of both sides of the key are not joined to each other; name one side alone");
+            posting.fault(
+                    column, "the ends of both sides of the key are not joined to each other; name one side alone");
         }
         return right;
     }

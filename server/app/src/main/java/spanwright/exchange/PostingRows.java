@@ -140,7 +140,8 @@ public final class PostingRows {
     }
 
     /** Reads a row; null where anything is wrong with it, which is then noted. */
-    @Nullable Recorded read(Rows<?> rows, Map<String, String> texts, int id) {
+    @Nullable
+    Recorded read(Rows<?> rows, Map<String, String> texts, int id) {
         Row row = row(rows.table(), texts);
         int before = faults.size();
         row.askRequired();

@@ -69,8 +69,9 @@ public record RecordRow(String table, @Nullable String code, Map<String, String>
         Cells cells = new Cells(Table.FIBER_TYPES);
         for (FiberValues values : type.values()) {
             FiberTypeRows.write(type, values, cells);
-            cells.byColumn().forEach((column, text) -> columns.merge(
-                    column, text, (before, more) -> before.equals(more) ? before : before + " " + more));
+            cells.byColumn()
+                    .forEach((column, text) -> columns.merge(
+                            column, text, (before, more) -> before.equals(more) ? before : before + " " + more));
         }
         return columns;
     }
@@ -86,7 +87,8 @@ public record RecordRow(String table, @Nullable String code, Map<String, String>
     private static String taps(Splitter splitter) {
         return new TreeMap<>(splitter.outputLosses())
                 .entrySet().stream()
-                        .map(tap -> tap.getKey() + ":" + tap.getValue().exactDecibels().toPlainString())
+                        .map(tap -> tap.getKey() + ":"
+                                + tap.getValue().exactDecibels().toPlainString())
                         .collect(Collectors.joining(" "));
     }
 

@@ -27,10 +27,13 @@ final class RowFinder {
     }
 
     /** The one record with a key; null where there is none or are several, which is then noted. */
-    @Nullable Recorded find(Map<String, String> key) {
+    @Nullable
+    Recorded find(Map<String, String> key) {
         if (key.isEmpty()) {
-            posting.fault(null, "the key is empty; name the row by its columns, such as "
-                    + table.columns().get(0));
+            posting.fault(
+                    null,
+                    "the key is empty; name the row by its columns, such as "
+                            + table.columns().get(0));
             return null;
         }
         List<Recorded> found = new ArrayList<>();
@@ -74,11 +77,22 @@ final class RowFinder {
         RecordKind kind = rows.kind();
         String first = key.getOrDefault(table.columns().get(0), "");
         return switch (kind) {
-            case STRUCTURE -> first.isEmpty() ? all(kind) : view.structures().find(first).stream().map(r -> r);
-            case SPAN -> first.isEmpty() ? all(kind) : view.spans().find(first).stream().map(r -> r);
-            case CABLE -> first.isEmpty() ? all(kind) : view.cables().find(first).stream().map(r -> r);
-            case ENCLOSURE -> first.isEmpty() ? all(kind) : view.enclosures().find(first).stream().map(r -> r);
-            case CIRCUIT -> first.isEmpty() ? all(kind) : view.circuits().find(first).stream().map(r -> r);
+            case STRUCTURE ->
+                first.isEmpty()
+                        ? all(kind)
+                        : view.structures().find(first).stream().map(r -> r);
+            case SPAN ->
+                first.isEmpty() ? all(kind) : view.spans().find(first).stream().map(r -> r);
+            case CABLE ->
+                first.isEmpty() ? all(kind) : view.cables().find(first).stream().map(r -> r);
+            case ENCLOSURE ->
+                first.isEmpty()
+                        ? all(kind)
+                        : view.enclosures().find(first).stream().map(r -> r);
+            case CIRCUIT ->
+                first.isEmpty()
+                        ? all(kind)
+                        : view.circuits().find(first).stream().map(r -> r);
             case CABLE_VALUE -> ofCable(first, kind, Relation.CABLE_VALUES);
             case RUN_ROW -> ofCable(first, kind, Relation.CABLE_RUN_ROWS);
             case FIBER_FLAG -> ofCable(first, kind, Relation.CABLE_FLAGS);
@@ -93,7 +107,9 @@ final class RowFinder {
     }
 
     private Stream<Recorded> all(RecordKind kind) {
-        return IntStream.range(0, view.limit(kind)).mapToObj(id -> view.record(kind, id)).flatMap(Stream::ofNullable);
+        return IntStream.range(0, view.limit(kind))
+                .mapToObj(id -> view.record(kind, id))
+                .flatMap(Stream::ofNullable);
     }
 
     private Stream<Recorded> ofCable(String code, RecordKind kind, Relation relation) {
@@ -118,7 +134,8 @@ final class RowFinder {
 
     private Stream<Recorded> marksOf(String code) {
         return view.cables().find(code).stream()
-                .flatMap(cable -> IntStream.of(view.owned(Relation.CABLE_RUN_ROWS, cable.id())).boxed())
+                .flatMap(cable -> IntStream.of(view.owned(Relation.CABLE_RUN_ROWS, cable.id()))
+                        .boxed())
                 .flatMap(row -> owned(RecordKind.SHEATH_MARK, Relation.RUN_ROW_MARKS, row));
     }
 }

@@ -26,8 +26,7 @@ import spanwright.splicing.Splitter;
 final class SharedRows {
 
     /** Columns of a fiber type that are alike on all its rows, so that changing one changes all. */
-    private static final Set<String> ALIKE =
-            Set.of("zero_dispersion_nm", "dispersion_slope", "pmd_ps_per_sqrt_km");
+    private static final Set<String> ALIKE = Set.of("zero_dispersion_nm", "dispersion_slope", "pmd_ps_per_sqrt_km");
 
     private final PostingRows posting;
     private final Table table;
@@ -55,8 +54,9 @@ final class SharedRows {
         }
         Recorded before = find(named);
         if (before == null && (change.action() != RowChange.Action.ADD || table == Table.SPLITTER_OUTPUTS)) {
-            posting.fault(owner.get(owner.size() - 1), "there is no such row in " + table.word() + "; name one that the"
-                    + " records hold");
+            posting.fault(
+                    owner.get(owner.size() - 1),
+                    "there is no such row in " + table.word() + "; name one that the" + " records hold");
             return;
         }
         List<Map<String, String>> rows = before == null ? new ArrayList<>() : rows(before);
@@ -85,8 +85,10 @@ final class SharedRows {
             }
         }
         if (!any) {
-            posting.fault(within, "there is no row with " + within + " '" + Texts.shown(String.valueOf(asked)) + "' in "
-                    + table.word() + "; name one that the records hold");
+            posting.fault(
+                    within,
+                    "there is no row with " + within + " '" + Texts.shown(String.valueOf(asked)) + "' in "
+                            + table.word() + "; name one that the records hold");
         }
         change.row().forEach((column, text) -> {
             if (ALIKE.contains(column)) {
@@ -105,8 +107,7 @@ final class SharedRows {
             default ->
                 view.enclosures()
                         .find(first)
-                        .flatMap(enclosure ->
-                                view.findSplitter(enclosure.id(), named.getOrDefault(owner.get(1), "")))
+                        .flatMap(enclosure -> view.findSplitter(enclosure.id(), named.getOrDefault(owner.get(1), "")))
                         .orElse(null);
         };
     }
@@ -180,8 +181,10 @@ final class SharedRows {
                 return null;
             }
             if (colors.putIfAbsent(position, color) != null) {
-                row.fault(ColorCodeLoad.POSITION, row.named(ColorCodeLoad.POSITION) + " stands twice in code " + code
-                        + "; write one row a position");
+                row.fault(
+                        ColorCodeLoad.POSITION,
+                        row.named(ColorCodeLoad.POSITION) + " stands twice in code " + code
+                                + "; write one row a position");
                 return null;
             }
         }
@@ -213,8 +216,10 @@ final class SharedRows {
                 return null;
             }
             if (losses.putIfAbsent(output, loss) != null) {
-                row.fault(TapLoad.OUTPUT, row.named(TapLoad.OUTPUT) + " of splitter " + splitter.code()
-                        + " stands twice; write one row an output");
+                row.fault(
+                        TapLoad.OUTPUT,
+                        row.named(TapLoad.OUTPUT) + " of splitter " + splitter.code()
+                                + " stands twice; write one row an output");
                 return null;
             }
         }

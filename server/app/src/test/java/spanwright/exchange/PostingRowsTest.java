@@ -49,14 +49,19 @@ class PostingRowsTest {
     }
 
     private List<String> faults(String... lines) {
-        return PostingRows.enter(before.edit(), Arrays.stream(lines).map(PostingRowsTest::change).toList()).stream()
+        return PostingRows.enter(
+                        before.edit(),
+                        Arrays.stream(lines).map(PostingRowsTest::change).toList())
+                .stream()
                 .map(fault -> fault.change() + " " + fault.column() + ": " + fault.text())
                 .toList();
     }
 
     private Records posted(String... lines) {
         SnapshotEditor editor = before.edit();
-        assertThat(PostingRows.enter(editor, Arrays.stream(lines).map(PostingRowsTest::change).toList()))
+        assertThat(PostingRows.enter(
+                        editor,
+                        Arrays.stream(lines).map(PostingRowsTest::change).toList()))
                 .isEmpty();
         return editor.build(2).records();
     }
@@ -84,7 +89,8 @@ class PostingRowsTest {
         assertThat(rows(records, "structures"))
                 .contains("HH-2|handhole|-123|-48.018|0.5||in service|BRIDGE-1 POWER-1|");
         assertThat(records.structures().find("HH-2").orElseThrow().id())
-                .isEqualTo(before.records().structures().find("HH-2").orElseThrow().id());
+                .isEqualTo(
+                        before.records().structures().find("HH-2").orElseThrow().id());
     }
 
     @Test
@@ -98,15 +104,24 @@ class PostingRowsTest {
         assertThat(faults("remove structures structure=HH-1"))
                 .containsExactly("0 structure: structure HH-1 is referred to by span S-1 and S-2; by the run of cable"
                         + " F-1 and D-7; by enclosure E4; remove or change those first");
-        assertThat(faults("remove cable_types cable_type=F24")).first().asString().contains("cable F-1");
-        assertThat(faults("remove fiber_types fiber_type=BEND")).first().asString().contains("cable type D12");
+        assertThat(faults("remove cable_types cable_type=F24"))
+                .first()
+                .asString()
+                .contains("cable F-1");
+        assertThat(faults("remove fiber_types fiber_type=BEND"))
+                .first()
+                .asString()
+                .contains("cable type D12");
         assertThat(faults("remove enclosure_cables enclosure=E4 cable=D-7"))
                 .first()
                 .asString()
                 .contains("D-7 ahead 1 @ E4");
         assertThat(faults("remove splitters enclosure=E9 splitter=S1")).isNotEmpty();
         assertThat(faults("remove panels enclosure=E1 panel=Q")).isNotEmpty();
-        assertThat(faults("remove panels enclosure=E1 panel=P")).first().asString().contains("circuit C-1");
+        assertThat(faults("remove panels enclosure=E1 panel=P"))
+                .first()
+                .asString()
+                .contains("circuit C-1");
     }
 
     @Test
@@ -162,21 +177,30 @@ class PostingRowsTest {
 
     @Test
     void rows_of_which_several_make_a_record_are_changed_one_by_one() {
-        assertThat(rows(posted("add fiber_types fiber_type=BEND wavelength_nm=1625 loss_db_per_km=0.24"
-                                + " zero_dispersion_nm=1312"), "fiber_types"))
+        assertThat(rows(
+                        posted("add fiber_types fiber_type=BEND wavelength_nm=1625 loss_db_per_km=0.24"
+                                + " zero_dispersion_nm=1312"),
+                        "fiber_types"))
                 .hasSize(3);
-        assertThat(rows(posted("change fiber_types fiber_type=BEND wavelength_nm=1550 -> loss_db_per_km=0.2"
-                                + " loss_limit_db_per_km=0.25 zero_dispersion_nm=1313"), "fiber_types"))
+        assertThat(rows(
+                        posted("change fiber_types fiber_type=BEND wavelength_nm=1550 -> loss_db_per_km=0.2"
+                                + " loss_limit_db_per_km=0.25 zero_dispersion_nm=1313"),
+                        "fiber_types"))
                 .containsExactly("BEND|1310|0.35|0.35|1.4677|1313||", "BEND|1550|0.2|0.25|1.4682|1313||");
         assertThat(rows(posted("remove fiber_types fiber_type=BEND wavelength_nm=1310"), "fiber_types"))
                 .hasSize(1);
-        assertThat(rows(posted("add splitter_outputs enclosure=E9 splitter=S1 output=3 loss_db=11.6"), "splitter_outputs"))
+        assertThat(rows(
+                        posted("add splitter_outputs enclosure=E9 splitter=S1 output=3 loss_db=11.6"),
+                        "splitter_outputs"))
                 .hasSize(3);
         assertThat(rows(posted("remove splitter_outputs enclosure=E9 splitter=S1 output=1"), "splitter_outputs"))
                 .containsExactly("E9|S1|2|11.5");
         assertThat(rows(posted("change splitters enclosure=E9 splitter=S1 -> loss_db=7"), "splitter_outputs"))
                 .hasSize(2);
-        assertThat(rows(posted("add color_codes code=X position=1 color=red", "add color_codes code=X position=2 color=blue"),
+        assertThat(rows(
+                        posted(
+                                "add color_codes code=X position=1 color=red",
+                                "add color_codes code=X position=2 color=blue"),
                         "color_codes"))
                 .containsExactly("X|1|red", "X|2|blue");
     }
