@@ -178,7 +178,7 @@ class CommandLineTest {
     }
 
     @Test
-    void what_is_asked_wrongly_is_input_and_what_is_used_wrongly_is_usage() {
+    void what_is_asked_wrongly_is_input() {
         load(Cases.WORKED);
 
         assertThat(run("trace", "--circuit", "C-9", "--records", records).err()).contains("Is C-1 meant?");
@@ -213,6 +213,11 @@ class CommandLineTest {
                                 folder.resolve("none.db").toString())
                         .status())
                 .isEqualTo(1);
+    }
+
+    @Test
+    void what_is_used_wrongly_is_usage() {
+        load(Cases.WORKED);
 
         assertThat(run("trace", "--records", records).status()).isEqualTo(2);
         assertThat(run("trace", "--circuit", "C-1", "--port", "E1/P/1", "--records", records)

@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.io.IOException;
 import java.io.InputStream;
+import java.net.InetAddress;
 import java.net.Socket;
 import java.net.http.HttpResponse;
 import org.junit.jupiter.api.AfterEach;
@@ -197,7 +198,7 @@ class PostingRouteTest {
     }
 
     private static String raw(int port, String request) throws IOException {
-        try (Socket socket = new Socket("127.0.0.1", port)) {
+        try (Socket socket = new Socket(InetAddress.getLoopbackAddress(), port)) {
             socket.getOutputStream().write(request.getBytes(UTF_8));
             InputStream in = socket.getInputStream();
             return new String(in.readAllBytes(), UTF_8);
