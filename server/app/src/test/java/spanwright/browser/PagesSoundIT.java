@@ -72,7 +72,9 @@ class PagesSoundIT {
                 }
             }
             assertThat(opened.requestsElsewhere()).as("requests elsewhere").isEmpty();
-            assertThat(opened.errors()).as("errors").allMatch(error -> hash.equals(NOT_THERE) && isAnsweredNotFound(error));
+            assertThat(opened.errors())
+                    .as("errors")
+                    .allMatch(error -> hash.equals(NOT_THERE) && isAnsweredNotFound(error));
         }
     }
 

@@ -61,6 +61,10 @@ public final class GridFolder {
                 "cable,seq,structure,span,slack_m",
                 records.runRows().list().toList(),
                 this::row);
+        equipment(folder);
+    }
+
+    private void equipment(Path folder) throws IOException {
         write(
                 folder,
                 "enclosures",
