@@ -82,7 +82,8 @@ class KilledProcessTest {
         } catch (InterruptedException early) {
             Thread.currentThread().interrupt();
         }
-        process.destroyForcibly();
+        // By its handle: Process.destroyForcibly would close the stream that is being read, last words and all.
+        process.toHandle().destroyForcibly();
     }
 
     private static void check(Path file, int acknowledged, String run) throws SQLException {
