@@ -745,7 +745,7 @@ export type Posting = {
     /** What was done */
     action: "add" | "change" | "remove";
     /** Table of the records folder, without .csv */
-    table: "settings" | "structures" | "spans" | "fiber_types" | "cable_types" | "color_codes" | "cables" | "cable_values" | "cable_runs" | "sheath_marks" | "enclosures" | "enclosure_cables" | "splitters" | "splitter_outputs" | "splices" | "panels" | "terminations" | "end_states" | "jumpers" | "measurements" | "fiber_flags" | "counts" | "circuits" | "planning_values";
+    table: "settings" | "structures" | "spans" | "fiber_types" | "cable_types" | "color_codes" | "cables" | "cable_values" | "cable_runs" | "sheath_marks" | "enclosures" | "enclosure_cables" | "splitters" | "splitter_outputs" | "splices" | "panels" | "terminations" | "end_states" | "jumpers" | "measurements" | "fiber_flags" | "counts" | "circuits" | "planning_values" | "basemap";
     /** What it is about, in the notation of the records */
     code: string | null;
     /** The row before, by column */
