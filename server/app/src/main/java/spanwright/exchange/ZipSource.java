@@ -80,7 +80,7 @@ final class ZipSource implements Source {
 
     private static void refuseElsewhere(String name) throws IOException {
         boolean absolute = name.startsWith("/") || name.startsWith("\\") || name.matches("[A-Za-z]:.*");
-        if (absolute || Set.of(name.split("[/\\\\]")).contains("..")) {
+        if (absolute || List.of(name.split("[/\\\\]")).contains("..")) {
             throw new ZipException(
                     "it names '" + name + "', which lies outside of it; pack the files with plain names");
         }
