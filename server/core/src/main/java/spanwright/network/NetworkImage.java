@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import spanwright.paged.IntSink;
 import spanwright.paged.IntSource;
+import spanwright.paged.PageSize;
 import spanwright.paged.PagedInts;
 import spanwright.paged.PagedRefs;
 import spanwright.records.Records;
@@ -71,7 +72,12 @@ public final class NetworkImage {
         PagedInts joint = readArray(source);
         PagedInts fields = readArray(source);
         PagedInts chunks = readArray(source);
-        PathIndex paths = new PathIndex(readArray(source), readArray(source), readArray(source), head[3], head[4]);
+        PathIndex paths = new PathIndex(
+                readArray(source),
+                readArray(source, PathIndex.PATHS_PAGE),
+                readArray(source, PathIndex.SLICES_PAGE),
+                head[3],
+                head[4]);
         List<PagedInts> maps = new ArrayList<>();
         for (int map = 0; map < Blocks.MAPS; map++) {
             maps.add(readArray(source));
@@ -96,7 +102,11 @@ public final class NetworkImage {
     }
 
     private static PagedInts readArray(IntSource source) throws IOException {
-        return PagedInts.read(get(source, 1)[0], source);
+        return readArray(source, PageSize.SMALL);
+    }
+
+    private static PagedInts readArray(IntSource source, PageSize pages) throws IOException {
+        return PagedInts.read(get(source, 1)[0], pages, source);
     }
 
     private static PagedRefs<int[]> readLoose(IntSource source) throws IOException {

@@ -26,8 +26,8 @@ final class PathBuilder {
         builder.lay(blocks);
         return new PathIndex(
                 PagedInts.copyOf(builder.pathOf, builder.pathOf.length),
-                PagedInts.copyOf(builder.paths, builder.pathCount * PathIndex.STRIDE),
-                PagedInts.copyOf(builder.slices, builder.used),
+                PagedInts.copyOf(builder.paths, builder.pathCount * PathIndex.STRIDE, PathIndex.PATHS_PAGE),
+                PagedInts.copyOf(builder.slices, builder.used, PathIndex.SLICES_PAGE),
                 NONE,
                 0);
     }

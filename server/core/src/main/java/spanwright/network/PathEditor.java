@@ -1,6 +1,7 @@
 package spanwright.network;
 
 import java.util.Arrays;
+import java.util.function.IntUnaryOperator;
 import spanwright.paged.PagedInts;
 
 /**
@@ -163,26 +164,8 @@ final class PathEditor {
     PathIndex build() {
         PathIndex built = new PathIndex(pathOf.build(), paths.build(), slices.build(), unused, garbage);
         int kept = built.slices.size() - garbage;
-        return garbage > Math.max(GARBAGE_AT_LEAST, kept / 2) ? packed(built, kept) : built;
-    }
-
-    private static PathIndex packed(PathIndex loose, int kept) {
-        int[] from = new int[loose.slices.size()];
-        loose.slices.copyTo(0, from.length, from);
-        int[] paths = new int[loose.paths.size()];
-        loose.paths.copyTo(0, paths.length, paths);
-        int[] slices = new int[kept];
-        int used = 0;
-        for (int at = PathIndex.OFFSET; at < paths.length; at += STRIDE) {
-            int offset = paths[at];
-            if (offset != PathIndex.UNUSED) {
-                int count = 1 + Math.abs(from[offset]);
-                System.arraycopy(from, offset, slices, used, count);
-                paths[at] = used;
-                used += count;
-            }
-        }
-        return new PathIndex(
-                loose.pathOf, PagedInts.copyOf(paths, paths.length), PagedInts.copyOf(slices, used), loose.unused, 0);
+        return garbage > Math.max(GARBAGE_AT_LEAST, kept / 2)
+                ? PathPacker.pack(built, kept, built.pathOf, IntUnaryOperator.identity())
+                : built;
     }
 }

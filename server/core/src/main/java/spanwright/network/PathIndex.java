@@ -1,5 +1,6 @@
 package spanwright.network;
 
+import spanwright.paged.PageSize;
 import spanwright.paged.PagedInts;
 
 /**
@@ -14,6 +15,9 @@ public final class PathIndex {
 
     static final int STRIDE = 4;
     static final int OFFSET = 0;
+    /** In an answer of {@link #across}, where a row has its offset. */
+    static final int PATH = 0;
+
     static final int FIRST = 1;
     static final int LAST = 2;
     static final int CIRCUIT = 3;
@@ -23,6 +27,11 @@ public final class PathIndex {
     static final int SHARED = 1 << 31;
 
     static final int NONE = -1;
+
+    /** Pages of {@link #paths}: rows are read all over the place. */
+    static final PageSize PATHS_PAGE = PageSize.MIDDLE;
+    /** Pages of {@link #slices}: written once, at the end. */
+    static final PageSize SLICES_PAGE = PageSize.LARGE;
 
     final PagedInts pathOf;
     final PagedInts paths;
@@ -41,7 +50,7 @@ public final class PathIndex {
     }
 
     static PathIndex empty() {
-        return new PathIndex(PagedInts.empty(), PagedInts.empty(), PagedInts.empty(), NONE, 0);
+        return new PathIndex(PagedInts.empty(), PagedInts.empty(PATHS_PAGE), PagedInts.empty(SLICES_PAGE), NONE, 0);
     }
 
     /** The path of a piece; {@link Network#NONE} where the piece is dead. */
@@ -114,17 +123,39 @@ public final class PathIndex {
      * @return per piece four ints: path, first end, last end, circuit (0 for none)
      */
     public int[] across(int firstPiece, int count) {
+        int[] across = new int[count];
+        pathOf.copyTo(firstPiece, count, across);
         int[] found = new int[STRIDE * count];
-        pathOf.copyTo(firstPiece, count, found);
-        for (int index = count - 1; index >= 0; index--) {
-            int path = found[index];
-            int at = path * STRIDE;
-            found[index * STRIDE] = path;
-            found[index * STRIDE + FIRST] = paths.get(at + FIRST);
-            found[index * STRIDE + LAST] = paths.get(at + LAST);
-            found[index * STRIDE + CIRCUIT] = paths.get(at + CIRCUIT) & ~SHARED;
+        paths.copyRows(across, count, found);
+        for (int index = 0, at = 0; index < count; index++, at += STRIDE) {
+            found[at + PATH] = across[index];
+            found[at + CIRCUIT] &= ~SHARED;
         }
         return found;
+    }
+
+    /**
+     * The whole path of each of neighbouring pieces: what {@link #ends} gives for each, in one list.
+     *
+     * @param firstPiece the first piece; all are alive
+     * @param count how many pieces
+     * @param into is filled anew
+     */
+    public void listAcross(int firstPiece, int count, PathList into) {
+        int[] rows = across(firstPiece, count);
+        // Each step goes over all paths, as the memory answers many questions as soon as one.
+        for (int at = 0; at < rows.length; at += STRIDE) {
+            rows[at] = paths.get(rows[at] * STRIDE + OFFSET);
+        }
+        into.begin(count);
+        for (int index = 0; index < count; index++) {
+            into.add(Math.abs(slices.get(rows[index * STRIDE])));
+        }
+        int[] ends = into.room();
+        for (int index = 0; index < count; index++) {
+            int from = into.from(index);
+            slices.copyTo(rows[index * STRIDE] + 1, into.from(index + 1) - from, ends, from);
+        }
     }
 
     /** Heap bytes held. */

@@ -98,7 +98,7 @@ public final class SnapshotEditor {
 
     /** The changed snapshot; this editor is not used again. */
     public Snapshot build(int posting) {
-        Network built = network.build();
+        Network built = LivingPlant.of(network.build());
         return new Snapshot(records.build(posting), built);
     }
 }

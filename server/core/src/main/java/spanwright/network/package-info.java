@@ -11,8 +11,10 @@
  *       without a joint.
  *   <li>Every end is named by one joint in the glass at most, in service or not.
  *   <li>A path holds the pieces that are joined without a choice, each piece alive in exactly one path.
- *   <li>A network never changes; the next one shares all pages that no change touched. Piece and path numbers hold
- *       within one network only; across postings an end is known by its {@link spanwright.splicing.EndKey}.
+ *   <li>A network never changes; the next one shares all pages that no change touched, or none once too many
+ *       pieces were dead. Piece and path numbers hold within one network only; across postings an end is known by its
+ *       {@link spanwright.splicing.EndKey}.
+ *   <li>At most a quarter of the pieces is dead, but for some thousands.
  * </ol>
  */
 @NullMarked

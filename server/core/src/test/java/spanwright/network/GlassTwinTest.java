@@ -2,6 +2,7 @@ package spanwright.network;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.SortedSet;
 import java.util.TreeSet;
@@ -88,7 +89,9 @@ class GlassTwinTest {
 
     private static void assertSamePaths(Network network, PlainGlass twin) {
         PathIndex paths = network.paths();
+        PathList list = new PathList();
         for (Block block : network.blocks()) {
+            assertSameList(paths, block, list);
             for (int number = 1; number <= block.count(); number++) {
                 int path = paths.pathOf(block.piece(number));
                 assertThat(paths.exists(path)).isTrue();
@@ -99,6 +102,19 @@ class GlassTwinTest {
             if (paths.exists(path)) {
                 assertSamePath(network, twin, path);
             }
+        }
+    }
+
+    private static void assertSameList(PathIndex paths, Block block, PathList list) {
+        int[] across = paths.across(block.firstPiece(), block.count());
+        paths.listAcross(block.firstPiece(), block.count(), list);
+        assertThat(list.count()).isEqualTo(block.count());
+        for (int index = 0; index < block.count(); index++) {
+            int path = paths.pathOf(block.firstPiece() + index);
+            int[] row = {path, paths.firstEnd(path), paths.lastEnd(path), paths.circuit(path)};
+            assertThat(Arrays.copyOfRange(across, 4 * index, 4 * index + 4)).isEqualTo(row);
+            assertThat(IntStream.range(list.from(index), list.from(index + 1)).map(list::end))
+                    .containsExactly(IntStream.of(paths.ends(path)).boxed().toArray(Integer[]::new));
         }
     }
 

@@ -5,15 +5,18 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.EOFException;
 import java.io.IOException;
+import java.nio.IntBuffer;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Random;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.Arguments;
+import org.junit.jupiter.params.provider.EnumSource;
 import org.junit.jupiter.params.provider.MethodSource;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /** Paged ints against plain arrays. */
 class PagedIntsTest {
@@ -32,7 +35,7 @@ class PagedIntsTest {
     @MethodSource("seeds")
     void every_array_of_a_row_of_edits_stays_as_it_was_built(int seed) {
         Random random = new Random(seed);
-        List<PagedInts> built = new ArrayList<>(List.of(PagedInts.empty()));
+        List<PagedInts> built = new ArrayList<>(List.of(PagedInts.empty(PageSize.values()[seed % 3])));
         List<int[]> expected = new ArrayList<>(List.of(new int[0]));
         int[] now = new int[0];
         for (int round = 0; round < 12; round++) {
@@ -85,22 +88,26 @@ class PagedIntsTest {
         return now;
     }
 
-    @ParameterizedTest
-    @ValueSource(ints = {0, 1, 511, 512, 513, 131_071, 131_072, 131_073, 300_000})
-    void is_copied_written_and_read_back_at_any_size(int size) throws IOException {
+    static Stream<Arguments> sizes() {
+        return Stream.of(PageSize.values())
+                .flatMap(pages -> IntStream.of(0, 1, 2, 256, 512)
+                        .flatMap(count -> IntStream.of(-1, 0, 1).map(more -> count * pages.ints() + more))
+                        .filter(size -> size >= 0)
+                        .mapToObj(size -> Arguments.of(pages, size)));
+    }
+
+    @ParameterizedTest(name = "{0}, {1} ints")
+    @MethodSource("sizes")
+    void is_copied_written_and_read_back_at_any_size(PageSize pages, int size) throws IOException {
         int[] ints = IntStream.range(0, size).map(index -> index * 31 - 7).toArray();
-        PagedInts copied = PagedInts.copyOf(Arrays.copyOf(ints, size + 5), size);
-        List<Integer> written = new ArrayList<>();
-        copied.write((some, count) -> IntStream.of(some).limit(count).forEach(written::add));
-        int[] at = new int[1];
-        PagedInts read = PagedInts.read(size, (into, count) -> {
-            for (int index = 0; index < count; index++) {
-                into[index] = written.get(at[0]++);
-            }
-        });
+        PagedInts copied = PagedInts.copyOf(Arrays.copyOf(ints, size + 5), size, pages);
+        IntBuffer written = IntBuffer.allocate(size + 5);
+        copied.write((some, count) -> written.put(some, 0, count));
+        written.flip();
+        PagedInts read = PagedInts.read(size, pages, (into, count) -> written.get(into, 0, count));
 
         assertThat(plain(copied)).isEqualTo(ints);
-        assertThat(written).hasSize(size);
+        assertThat(written.limit()).isEqualTo(size);
         assertThat(plain(read)).isEqualTo(ints);
         if (size > 0) {
             assertThat(read.get(size - 1)).isEqualTo(ints[size - 1]);
@@ -112,15 +119,35 @@ class PagedIntsTest {
     void a_part_is_copied_over_page_ends() {
         PagedInts ints = PagedInts.copyOf(IntStream.range(0, 2_000).toArray(), 2_000);
         int[] into = new int[1_400];
+        int[] further = new int[1_403];
 
         ints.copyTo(300, 1_400, into);
+        ints.copyTo(300, 1_400, further, 2);
 
         assertThat(into).isEqualTo(IntStream.range(300, 1_700).toArray());
+        assertThat(Arrays.copyOfRange(further, 2, 1_402)).isEqualTo(into);
+        assertThat(further[0] + further[1] + further[1_402]).isZero();
+    }
+
+    @ParameterizedTest
+    @EnumSource(PageSize.class)
+    void rows_are_copied_in_the_order_asked_for(PageSize pages) {
+        int size = 3 * pages.ints() - 4;
+        PagedInts ints = PagedInts.copyOf(IntStream.range(0, size).toArray(), size, pages);
+        int[] rows = new Random(5).ints(700, 0, size / 4).toArray();
+        int[] into = new int[4 * rows.length];
+
+        ints.copyRows(rows, rows.length, into);
+
+        assertThat(into)
+                .isEqualTo(IntStream.of(rows)
+                        .flatMap(row -> IntStream.range(4 * row, 4 * row + 4))
+                        .toArray());
     }
 
     @Test
     void a_source_that_ends_too_soon_is_passed_on() {
-        assertThatThrownBy(() -> PagedInts.read(10, (into, count) -> {
+        assertThatThrownBy(() -> PagedInts.read(10, PageSize.SMALL, (into, count) -> {
                     throw new EOFException("too short");
                 }))
                 .isInstanceOf(EOFException.class);

@@ -21,8 +21,9 @@ import spanwright.network.Snapshot;
 public final class CutAndTrace {
 
     private static final int WARM_UP = 3;
-    /** Answers in microseconds are raced many to a round, so that the clock's own cost vanishes. */
     private static final int TRACES = 1_000;
+    /** The program's own answers are given so often before the race, on all cables in turn, as in a running server. */
+    private static final int COMPILED = 20_000;
 
     private final Random random = new Random(7);
     private final int rounds;
@@ -44,6 +45,7 @@ public final class CutAndTrace {
                 plant.joints(),
                 snapshot.records().circuits().count(),
                 snapshot.records().splitters().count());
+        System.out.println(new Likeness(snapshot.network()).text());
         memory(snapshot, plant.sections());
         CutAndTrace race = new CutAndTrace(rounds);
         race.against("as loaded", snapshot);
@@ -71,57 +73,33 @@ public final class CutAndTrace {
     private void cuts(String when, Snapshot snapshot, SqlNetwork sql) throws Exception {
         CutAnswers own = new CutAnswers(snapshot);
         List<Block> cables = largest(snapshot.network());
+        for (int round = 0; round < COMPILED; round++) {
+            own.across(cable(cables, round));
+            own.hops(cable(cables, round));
+        }
+        int other = cables.size() / 2;
         Race ends = new Race("A cut of " + cables.get(0).count() + " fibers, both ends and the circuits, " + when)
-                .variant(
-                        "recursive SQL",
-                        round -> sql.ends(
-                                cable(cables, round).firstPiece(),
-                                cable(cables, round).count()))
-                .variant(
-                        "path index, circuits collected",
-                        round -> own.ends(
-                                cable(cables, round).firstPiece(),
-                                cable(cables, round).count()))
+                .variant("recursive SQL", round -> sql.ends(cable(cables, round)))
+                .variant("path index, compared with the SQL's", round -> own.ends(cable(cables, round)))
+                .apart("path index", round -> own.across(cable(cables, round + other)))
                 .run(WARM_UP, rounds);
         System.out.println(ends.table());
-        // The bare look-up, without collecting and sorting for the comparison; its answers were compared just above.
-        System.out.println(bare(
-                "path index, two ends and a circuit a fiber",
-                ends,
-                round -> own.across(
-                        cable(cables, round + 1).firstPiece(),
-                        cable(cables, round + 1).count())));
         Race hops = new Race("The same cut, every hop listed, " + when)
-                .variant(
-                        "recursive SQL",
-                        round -> sql.hops(
-                                cable(cables, round).firstPiece(),
-                                cable(cables, round).count()))
-                .variant(
-                        "path index",
-                        round -> own.hops(
-                                cable(cables, round).firstPiece(),
-                                cable(cables, round).count()))
+                .variant("recursive SQL", round -> sql.hops(cable(cables, round)))
+                .variant("path index", round -> own.hops(cable(cables, round)))
                 .run(WARM_UP, rounds);
         System.out.println(hops.table());
-    }
-
-    private String bare(String name, Race against, Race.Runner runner) throws Exception {
-        Race race = new Race(name).variant(name, runner).run(WARM_UP * 20, rounds * 20);
-        return String.format(
-                Locale.ROOT,
-                "%s: median %.1f us, %.0f times faster than the recursive SQL above%n",
-                name,
-                race.samples(0).median() / 1e3,
-                against.samples(0).median() / race.samples(0).median());
     }
 
     private void traces(String when, Snapshot snapshot, SqlNetwork sql) throws Exception {
         CutAnswers own = new CutAnswers(snapshot);
         int[] pieces = circuitPieces(snapshot.network());
+        for (int round = 0; round < COMPILED; round++) {
+            own.trace(pieces[round % TRACES + TRACES]);
+        }
         Race single = new Race("One circuit end to end, " + when)
-                .variant("recursive SQL", round -> sql.hops(pieces[round % pieces.length], 1))
-                .variant("path index", round -> own.hops(pieces[round % pieces.length], 1))
+                .variant("recursive SQL", round -> sql.hops(pieces[round % TRACES], 1))
+                .variant("path index", round -> own.trace(pieces[round % TRACES]))
                 .run(TRACES / 10, TRACES);
         System.out.println(single.table());
         System.out.printf(
@@ -134,7 +112,7 @@ public final class CutAndTrace {
         return cables.get(round % cables.size());
     }
 
-    private List<Block> largest(Network network) {
+    static List<Block> largest(Network network) {
         List<Block> sections = network.blocks().stream()
                 .filter(block -> block.kind() == BlockKind.SECTION)
                 .toList();

@@ -3,9 +3,11 @@ package spanwright.benchmarks.cut;
 import java.util.stream.IntStream;
 import spanwright.circuits.Circuit;
 import spanwright.circuits.PortRange;
+import spanwright.network.Block;
 import spanwright.network.BlockKind;
 import spanwright.network.Network;
 import spanwright.network.PathIndex;
+import spanwright.network.PathList;
 import spanwright.network.Snapshot;
 import spanwright.records.Relation;
 import spanwright.splicing.EndKey;
@@ -21,6 +23,7 @@ final class CutAnswers {
     private final Snapshot snapshot;
     private final Network network;
     private final PathIndex paths;
+    private final PathList list = new PathList();
 
     CutAnswers(Snapshot snapshot) {
         this.snapshot = snapshot;
@@ -28,14 +31,15 @@ final class CutAnswers {
         this.paths = network.paths();
     }
 
-    /** Per piece four ints: path, first end, last end, circuit. */
-    int[] across(int firstPiece, int count) {
-        return paths.across(firstPiece, count);
+    /** Per fiber of a block four ints: path, first end, last end, circuit. */
+    int[] across(Block block) {
+        return paths.across(block.firstPiece(), block.count());
     }
 
     /** The same as {@link spanwright.benchmarks.sql.SqlNetwork#ends}, to compare. */
-    int[][] ends(int firstPiece, int count) {
-        int[] across = across(firstPiece, count);
+    int[][] ends(Block block) {
+        int[] across = across(block);
+        int count = block.count();
         int[][] found = new int[count + 1][2];
         IntStream.Builder circuits = IntStream.builder();
         for (int index = 0; index < count; index++) {
@@ -74,13 +78,24 @@ final class CutAnswers {
     }
 
     /** The sum of all pieces met on the paths of neighbouring pieces, their own piece counted for both ways. */
-    long hops(int firstPiece, int count) {
-        long sum = 0;
-        for (int piece = firstPiece; piece < firstPiece + count; piece++) {
-            sum += piece;
-            for (int end : paths.ends(paths.pathOf(piece))) {
-                sum += end >> 1;
-            }
+    long hops(Block block) {
+        int firstPiece = block.firstPiece();
+        int count = block.count();
+        paths.listAcross(firstPiece, count, list);
+        int[] ends = list.ends();
+        int length = list.from(count);
+        long sum = (long) count * firstPiece + (long) count * (count - 1) / 2;
+        for (int place = 0; place < length; place++) {
+            sum += ends[place] >> 1;
+        }
+        return sum;
+    }
+
+    /** The same for one piece. */
+    long trace(int piece) {
+        long sum = piece;
+        for (int end : paths.ends(paths.pathOf(piece))) {
+            sum += end >> 1;
         }
         return sum;
     }

@@ -75,7 +75,7 @@ final class Grid {
         cableAt[4 * end + (direction + 2) % 4] = cable;
     }
 
-    private static int[] shuffled(int count, Random random) {
+    static int[] shuffled(int count, Random random) {
         int[] order = new int[count];
         for (int place = 0; place < count; place++) {
             int other = random.nextInt(place + 1);
@@ -99,13 +99,9 @@ final class Grid {
         return from[cable] == node ? to[cable] : from[cable];
     }
 
-    /** The cable at a node that goes on straight from another, or -1. */
-    int straight(int cable, int node) {
-        for (int direction = 0; direction < 4; direction++) {
-            if (cable(node, direction) == cable) {
-                return cable(node, (direction + 2) % 4);
-            }
-        }
-        return -1;
+    /** The cable that a section is of. */
+    int cableOf(int section) {
+        int found = Arrays.binarySearch(firstSection, section);
+        return found >= 0 ? found : -found - 2;
     }
 }

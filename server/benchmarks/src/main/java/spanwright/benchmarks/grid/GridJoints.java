@@ -1,7 +1,6 @@
 package spanwright.benchmarks.grid;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import spanwright.plant.FiberRange;
 import spanwright.plant.Trust;
@@ -118,19 +117,14 @@ final class GridJoints {
         if (end >= joins.glassEnds()) {
             return extraLegs[end - joins.glassEnds()];
         }
-        int cable = cable(end >> 1);
+        int cable = grid.cableOf(end >> 1);
         return (end & 1) == 0 ? new Leg(LegKind.AHEAD, 2 * cable + 1) : new Leg(LegKind.BACK, 2 * cable + 2);
     }
 
     private int number(int end) {
         return end >= joins.glassEnds()
                 ? extraNumbers[end - joins.glassEnds()]
-                : (end >> 1) - grid.firstSection[cable(end >> 1)] + 1;
-    }
-
-    private int cable(int section) {
-        int found = Arrays.binarySearch(grid.firstSection, section);
-        return found >= 0 ? found : -found - 2;
+                : (end >> 1) - grid.firstSection[grid.cableOf(end >> 1)] + 1;
     }
 
     private void add(EndRange a, EndRange b) {

@@ -6,10 +6,10 @@ import java.util.List;
 import java.util.Random;
 
 /**
- * Lays circuits over the grid: groups of 1, 2, 4 or 12 fibers on random walks biased straight ahead, spliced at every
- * node, each group brought to ports at both ends; and for a share of the glass feeders that end at a 1:32 splitter
- * whose outputs walk on to ports of their own. What is left runs straight on its own number, in chains of 40 sections
- * at the most, is spliced to what another cable has left, or stays dark.
+ * Lays circuits over the grid: groups of 1, 2, 4 or 12 fibers on random walks biased straight ahead, of 5 to 60
+ * splices, one at every node, each group brought to ports at both ends; and for a share of the glass feeders that end
+ * at a 1:32 splitter whose outputs walk on to ports of their own. A walk ends early where no cable has room for it; one
+ * that comes to fewer than 5 splices is not laid. What is left is for {@link SpareGlass}.
  */
 final class Walks {
 
@@ -17,8 +17,11 @@ final class Walks {
     private static final double CIRCUIT_SHARE = 0.40;
     private static final double SPLITTER_SHARE = 0.05;
     private static final double STRAIGHT = 0.7;
-    private static final int CHAIN = 40;
+    private static final int LEAST_SPLICES = 5;
+    private static final int MOST_SPLICES = 60;
     private static final int OUTPUTS = 32;
+    /** Once so many groups in a row found no way, the plant is as full as it gets. */
+    private static final int FUTILE = 10_000;
 
     /** A port at a node: the end of its rear. */
     record Port(int node, int rear) {}
@@ -50,11 +53,11 @@ final class Walks {
             tree();
         }
         int wanted = (int) (grid.sections * CIRCUIT_SHARE);
-        while (usedSections < wanted) {
-            group();
+        int futile = 0;
+        while (usedSections < wanted && futile < FUTILE) {
+            futile = group() ? 0 : futile + 1;
         }
-        express();
-        new SpareSplices(grid, joins).splice();
+        new SpareGlass(grid, joins, random).splice();
     }
 
     private int[] port(int node, int count) {
@@ -66,21 +69,27 @@ final class Walks {
         return rears;
     }
 
-    private void group() {
+    private boolean group() {
         int count = GROUPS[random.nextInt(GROUPS.length)];
         int node = random.nextInt(grid.nodes());
         int direction = way(node, count);
         if (direction < 0) {
-            return;
+            return false;
+        }
+        int splices = LEAST_SPLICES + random.nextInt(MOST_SPLICES - LEAST_SPLICES + 1);
+        int[] cables = plan(node, direction, count, splices + 1);
+        if (cables.length <= LEAST_SPLICES) {
+            return false;
         }
         int firstPort = ports.size();
         int[] tips = port(node, count);
-        int end = walk(node, direction, tips, 5 + random.nextInt(56));
+        int end = lay(node, cables, tips);
         int lastPort = ports.size();
         connect(tips, port(end, count));
         for (int index = 0; index < count; index++) {
             services.add(new Service(firstPort + index, lastPort + index));
         }
+        return true;
     }
 
     private void tree() {
@@ -116,17 +125,38 @@ final class Walks {
         }
     }
 
-    /** Takes the tips along, one fiber each, and gives the node where the walk came to its end. */
     private int walk(int start, int firstDirection, int[] tips, int hops) {
+        return lay(start, plan(start, firstDirection, tips.length, hops), tips);
+    }
+
+    /** The cables of a walk, as far as there is room for the group; none is taken yet. */
+    private int[] plan(int start, int firstDirection, int count, int hops) {
+        int[] cables = new int[hops];
         int node = start;
         int direction = firstDirection;
-        for (int hop = 0; hop < hops; hop++) {
-            int turned = turn(node, direction, tips.length);
-            if (turned < 0) {
+        int planned = 0;
+        while (planned < hops) {
+            direction = turn(node, direction, count);
+            if (direction < 0) {
                 break;
             }
-            direction = turned;
-            node = advance(node, grid.cable(node, direction), tips);
+            int cable = grid.cable(node, direction);
+            // Taken while the walk is planned, as it may come by here again.
+            used[cable] += count;
+            cables[planned++] = cable;
+            node = grid.across(cable, node);
+        }
+        for (int hop = 0; hop < planned; hop++) {
+            used[cables[hop]] -= count;
+        }
+        return Arrays.copyOf(cables, planned);
+    }
+
+    /** Takes the tips along some cables, one fiber each, and gives the node where they came to their end. */
+    private int lay(int start, int[] cables, int[] tips) {
+        int node = start;
+        for (int cable : cables) {
+            node = advance(node, cable, tips);
         }
         return node;
     }
@@ -156,7 +186,7 @@ final class Walks {
     }
 
     private boolean room(int cable, int count) {
-        return cable >= 0 && used[cable] + count <= grid.fibers[cable] * 3 / 4;
+        return cable >= 0 && used[cable] + count <= grid.fibers[cable];
     }
 
     private int advance(int node, int cable, int[] tips) {
@@ -170,24 +200,5 @@ final class Walks {
         used[cable] += tips.length;
         usedSections += tips.length;
         return grid.across(cable, node);
-    }
-
-    private void express() {
-        for (int node = 0; node < grid.nodes(); node++) {
-            express(node, Grid.EAST, node % grid.side);
-            express(node, Grid.SOUTH, node / grid.side);
-        }
-    }
-
-    private void express(int node, int direction, int place) {
-        int ahead = grid.cable(node, direction);
-        int back = grid.cable(node, direction + 2);
-        if (ahead < 0 || back < 0 || place % CHAIN == 0) {
-            return;
-        }
-        int count = Math.min(grid.fibers[ahead], grid.fibers[back]);
-        for (int fiber = Math.max(used[ahead], used[back]); fiber < count; fiber++) {
-            joins.join(2 * (grid.firstSection[back] + fiber) + 1, 2 * (grid.firstSection[ahead] + fiber));
-        }
     }
 }

@@ -11,6 +11,7 @@ import java.util.Arrays;
 import java.util.stream.IntStream;
 import spanwright.circuits.Circuit;
 import spanwright.circuits.PortRange;
+import spanwright.network.Block;
 import spanwright.network.Network;
 import spanwright.network.Snapshot;
 import spanwright.splicing.EndKey;
@@ -104,11 +105,13 @@ public final class SqlNetwork implements AutoCloseable {
     }
 
     /**
-     * Both ends of the path of each of neighbouring pieces, and all circuits that end there.
+     * Both ends of the path of each piece of a block, and all circuits that end there.
      *
      * @return per piece its lower and its higher end, then the circuits' identities, each once, rising
      */
-    public int[][] ends(int firstPiece, int count) throws SQLException {
+    public int[][] ends(Block block) throws SQLException {
+        int firstPiece = block.firstPiece();
+        int count = block.count();
         start(firstPiece, count);
         int[][] found = new int[count + 1][2];
         IntStream.Builder circuits = IntStream.builder();
@@ -128,7 +131,12 @@ public final class SqlNetwork implements AutoCloseable {
         return found;
     }
 
-    /** The sum of all ends met on the paths of neighbouring pieces, each walk from its own piece. */
+    /** The sum of all pieces met on the paths of a block's pieces, each walk from its own piece. */
+    public long hops(Block block) throws SQLException {
+        return hops(block.firstPiece(), block.count());
+    }
+
+    /** The same for some neighbouring pieces. */
     public long hops(int firstPiece, int count) throws SQLException {
         start(firstPiece, count);
         long sum = 0;

@@ -26,10 +26,8 @@ class CutAndTraceTest {
         CutAnswers own = new CutAnswers(snapshot);
         try (SqlNetwork sql = new SqlNetwork(file, snapshot)) {
             for (Block block : snapshot.network().blocks()) {
-                assertThat(own.ends(block.firstPiece(), block.count()))
-                        .isDeepEqualTo(sql.ends(block.firstPiece(), block.count()));
-                assertThat(own.hops(block.firstPiece(), block.count()))
-                        .isEqualTo(sql.hops(block.firstPiece(), block.count()));
+                assertThat(own.ends(block)).isDeepEqualTo(sql.ends(block));
+                assertThat(own.hops(block)).isEqualTo(sql.hops(block));
             }
         }
     }
