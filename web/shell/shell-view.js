@@ -45,6 +45,8 @@ export class ShellView extends LitElement {
     this.tracing = new Asking(this);
     this.hashed = () => this.arrive(currentAddress());
     this.pressed = (/** @type {KeyboardEvent} */ event) => this.key(event);
+    // What is drawn on a canvas does not change by itself once its typeface has come.
+    this.lettered = () => this.themed();
     new UnitController(this);
     answerFrom(this.address.asOf, this.address.asIf);
   }
@@ -60,6 +62,7 @@ export class ShellView extends LitElement {
     applyTheme();
     addEventListener("hashchange", this.hashed);
     addEventListener("keydown", this.pressed);
+    document.fonts.addEventListener("loadingdone", this.lettered);
     matchMedia("(prefers-color-scheme: dark)").addEventListener("change", () => this.themed());
     matchMedia("print").addEventListener("change", () => this.themed());
     void this.readStatus();
@@ -71,6 +74,7 @@ export class ShellView extends LitElement {
     super.disconnectedCallback();
     removeEventListener("hashchange", this.hashed);
     removeEventListener("keydown", this.pressed);
+    document.fonts.removeEventListener("loadingdone", this.lettered);
   }
 
   /** @returns {string} from which records everything is read */
