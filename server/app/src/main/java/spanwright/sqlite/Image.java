@@ -53,7 +53,7 @@ final class Image {
             PlantPages.write(records, plant);
             ImageHead.Section plantEnd = plant.end();
             SectionWriter joints = new SectionWriter(out);
-            JointPages.write(records, joints);
+            PlantPages.writeJoints(records, joints);
             ImageHead.Section jointsEnd = joints.end();
             SectionWriter network = new SectionWriter(out);
             NetworkImage.write(tip.snapshot().network(), network);
@@ -114,8 +114,9 @@ final class Image {
             }
         });
         try {
-            Network joined = NetworkImage.read(
-                    SectionBytes.open(channel, network, head.network()).ints());
+            SectionInts ints = new SectionInts(channel, network, head.network());
+            Network joined = NetworkImage.read(ints);
+            ints.end();
             return NetworkImage.beside(records.join(), joined);
         } catch (CompletionException fault) {
             throw new IOException(fault.getCause());

@@ -21,7 +21,7 @@ record ImageHead(int posting, PostingHash hash, Section records, Section joints,
     /** How long the head is; the sections follow it one after another. */
     static final int BYTES = 128;
 
-    private static final byte[] MAGIC = {'S', 'P', 'W', 'R', 'N', 'E', 'T', 1};
+    private static final byte[] MAGIC = {'S', 'P', 'W', 'R', 'N', 'E', 'T', 2};
     private static final int HASH = 32;
 
     /**

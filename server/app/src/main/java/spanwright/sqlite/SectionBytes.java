@@ -6,7 +6,6 @@ import java.nio.ByteBuffer;
 import java.nio.ByteOrder;
 import java.nio.channels.FileChannel;
 import java.util.zip.CRC32C;
-import spanwright.paged.IntSource;
 
 /** A section of the side file, checked when it is opened. Its bytes may be read by any number of threads. */
 final class SectionBytes {
@@ -60,17 +59,5 @@ final class SectionBytes {
 
     long longAt(int index) {
         return bytes.getLong(index);
-    }
-
-    /** All of them as ints, in order. */
-    IntSource ints() {
-        ByteBuffer left = bytes.duplicate().order(ByteOrder.LITTLE_ENDIAN);
-        return (into, count) -> {
-            if (left.remaining() < count * Integer.BYTES) {
-                throw new EOFException("the network ends too soon");
-            }
-            left.asIntBuffer().get(into, 0, count);
-            left.position(left.position() + count * Integer.BYTES);
-        };
     }
 }

@@ -85,7 +85,7 @@ public final class NetworkImage {
         BlockTable blocks = new BlockTable(fields, chunks, maps, head[1], head[2]);
         List<PagedRefs<int[]>> loose = new ArrayList<>();
         for (int kind = 0; kind < LooseJoints.empty().byKind.size(); kind++) {
-            loose.add(readLoose(source));
+            loose.add(readLoose(source, head[5]));
         }
         return new Network(blocks, peer, joint, new LooseJoints(loose, head[5]), paths);
     }
@@ -109,14 +109,18 @@ public final class NetworkImage {
         return PagedInts.read(get(source, 1)[0], pages, source);
     }
 
-    private static PagedRefs<int[]> readLoose(IntSource source) throws IOException {
+    private static PagedRefs<int[]> readLoose(IntSource source, int most) throws IOException {
         int size = get(source, 1)[0];
         PagedRefs.Editor<int[]> legs = PagedRefs.<int[]>empty().edit();
         if (size > 0) {
             legs.set(size - 1, null);
         }
         for (int leg = get(source, 1)[0]; leg != Network.NONE; leg = get(source, 1)[0]) {
-            legs.set(leg, get(source, get(source, 1)[0]));
+            int count = get(source, 1)[0];
+            if (count < 0 || count > most) {
+                throw new IOException(count + " joints at one leg, of " + most);
+            }
+            legs.set(leg, get(source, count));
         }
         return legs.build();
     }

@@ -3,7 +3,10 @@ package spanwright.records;
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.function.Supplier;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
+import spanwright.journal.Recorded;
 import spanwright.paged.PagedRefs;
 
 /** An immutable map from an owner's identity to those of what it owns, in the order in which they were entered. */
@@ -11,19 +14,34 @@ final class OwnerIndex {
 
     private static final int[] NOTHING = new int[0];
 
-    private final PagedRefs<int[]> owned;
+    private final Later<PagedRefs<int[]>> owned;
 
-    private OwnerIndex(PagedRefs<int[]> owned) {
+    private OwnerIndex(Later<PagedRefs<int[]>> owned) {
         this.owned = owned;
     }
 
     static OwnerIndex empty() {
-        return new OwnerIndex(PagedRefs.empty());
+        return new OwnerIndex(Later.of(PagedRefs.empty()));
+    }
+
+    /** The index of all records of a kind by one relation, made when an owner is first looked up. */
+    static OwnerIndex later(Relation relation, Supplier<Stream<Recorded>> records) {
+        return new OwnerIndex(Later.by(() -> owned(relation, records.get())));
+    }
+
+    private static PagedRefs<int[]> owned(Relation relation, Stream<Recorded> records) {
+        Editor editor = empty().edit();
+        records.forEach(record -> Ownership.tell(record, (by, owner) -> {
+            if (by == relation) {
+                editor.add(owner, record.id());
+            }
+        }));
+        return editor.build().owned.get();
     }
 
     /** What an owner owns; not to be changed by the caller. */
     int[] find(int owner) {
-        int[] ids = owned.find(owner);
+        int[] ids = owned.get().find(owner);
         return ids == null ? NOTHING : ids;
     }
 
@@ -34,16 +52,16 @@ final class OwnerIndex {
     /** One thread's; dead after {@link #build}. */
     static final class Editor {
 
-        private final PagedRefs<int[]> from;
+        private final Later<PagedRefs<int[]>> from;
         private final Map<Integer, Growing> touched = new HashMap<>();
 
-        private Editor(PagedRefs<int[]> from) {
+        private Editor(Later<PagedRefs<int[]>> from) {
             this.from = from;
         }
 
         int[] find(int owner) {
             Growing growing = touched.get(owner);
-            int[] ids = growing != null ? growing.trimmed() : from.find(owner);
+            int[] ids = growing != null ? growing.trimmed() : from.get().find(owner);
             return ids == null ? NOTHING : ids;
         }
 
@@ -56,16 +74,19 @@ final class OwnerIndex {
         }
 
         private Growing touch(int owner) {
-            return touched.computeIfAbsent(owner, key -> new Growing(from.find(key)));
+            return touched.computeIfAbsent(owner, key -> new Growing(from.get().find(key)));
         }
 
         OwnerIndex build() {
-            PagedRefs.Editor<int[]> next = from.edit();
+            if (touched.isEmpty()) {
+                return new OwnerIndex(from);
+            }
+            PagedRefs.Editor<int[]> next = from.get().edit();
             touched.forEach((owner, growing) -> {
                 int[] ids = growing.trimmed();
                 next.set(owner, ids.length == 0 ? null : ids);
             });
-            return new OwnerIndex(next.build());
+            return new OwnerIndex(Later.of(next.build()));
         }
     }
 

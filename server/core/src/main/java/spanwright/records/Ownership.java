@@ -1,6 +1,8 @@
 package spanwright.records;
 
+import java.util.List;
 import spanwright.circuits.Circuit;
+import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
 import spanwright.plant.Cable;
 import spanwright.plant.CableValue;
@@ -25,6 +27,26 @@ final class Ownership {
     }
 
     private Ownership() {}
+
+    /** The relations by which records of a kind are owned, by whichever owner. */
+    static List<Relation> relationsOf(RecordKind kind) {
+        return switch (kind) {
+            case SPAN -> List.of(Relation.STRUCTURE_SPANS);
+            case CABLE -> List.of(Relation.CABLE_TYPE_CABLES);
+            case CABLE_VALUE -> List.of(Relation.CABLE_VALUES);
+            case RUN_ROW -> List.of(Relation.CABLE_RUN_ROWS, Relation.STRUCTURE_RUN_ROWS, Relation.SPAN_RUN_ROWS);
+            case SHEATH_MARK -> List.of(Relation.RUN_ROW_MARKS);
+            case ENCLOSURE -> List.of(Relation.STRUCTURE_ENCLOSURES);
+            case PASS -> List.of(Relation.ENCLOSURE_PASSES, Relation.CABLE_PASSES, Relation.RUN_ROW_PASSES);
+            case SPLITTER -> List.of(Relation.ENCLOSURE_SPLITTERS);
+            case PANEL -> List.of(Relation.ENCLOSURE_PANELS);
+            case END_STATE -> List.of(Relation.ENCLOSURE_END_STATES);
+            case FIBER_FLAG -> List.of(Relation.CABLE_FLAGS);
+            case FIBER_COUNT -> List.of(Relation.CABLE_COUNTS);
+            case CIRCUIT -> List.of(Relation.PANEL_CIRCUITS);
+            default -> List.of();
+        };
+    }
 
     /** Tells the hearer every owner of a record, each once. */
     static void tell(Recorded record, Hearer hearer) {

@@ -6,6 +6,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.function.Function;
+import java.util.function.Supplier;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import spanwright.journal.Change;
 import spanwright.journal.RecordKind;
@@ -107,19 +110,29 @@ public final class RecordsEditor extends RecordsView {
     }
 
     /**
-     * Takes a whole register of joints as it stands in a trusted store, without indexing each: the planned
-     * ones among them are named apart. Only on an editor that holds no joint.
+     * Takes a whole register as it stands in a trusted store, perhaps loaded page by page. Its records are indexed when
+     * an index is first asked. Planned joints are named apart. Only on an editor that holds no record of the kind.
      *
-     * @param joints all joints by identity, perhaps loaded page by page
+     * @param register all records of the kind by identity
      * @param count how many there are
      * @param limit one more than the largest identity ever given
      */
-    public void adoptJoints(PagedRefs<Recorded> joints, int count, int limit, List<Joint> plannedOnes) {
-        int kind = RecordKind.JOINT.ordinal();
-        byKind.set(kind, joints.edit());
-        counts[kind] = count;
-        limits[kind] = limit;
-        plannedOnes.forEach(joint -> plannedOf(joint.plannedJob()).add(joint.id()));
+    public void adopt(RecordKind kind, PagedRefs<Recorded> register, int count, int limit) {
+        int place = kind.ordinal();
+        byKind.set(place, register.edit());
+        counts[place] = count;
+        limits[place] = limit;
+        Supplier<Stream<Recorded>> records = () ->
+                IntStream.range(0, register.size()).mapToObj(register::find).filter(Objects::nonNull);
+        codes.set(place, CodeIndex.later(records).edit());
+        for (Relation relation : Ownership.relationsOf(kind)) {
+            owners.set(relation.ordinal(), OwnerIndex.later(relation, records).edit());
+        }
+    }
+
+    /** Says that a joint of an adopted register is planned. */
+    public void adoptPlanned(Joint joint) {
+        plannedOf(joint.plannedJob()).add(joint.id());
     }
 
     /** Says that identities of a kind below a limit have been given, though their records may be gone. */
