@@ -1,11 +1,9 @@
 package spanwright.exchange;
 
 import com.fasterxml.jackson.core.JsonFactory;
-import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.databind.JsonNode;
-import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.io.InputStream;
 import java.util.List;
@@ -28,11 +26,15 @@ final class BaseMapLoad {
     static final List<String> LAYERS = List.of("water", "wood", "street", "building", "place");
 
     private static final long MOST_BYTES = 512L << 20;
+    /** The most names, values and brackets of one feature: half a million positions. */
+    private static final int MOST_TOKENS = 2_000_000;
+
     private static final String FORM = "; it is {\"type\": \"FeatureCollection\", \"features\": [...]} of RFC 7946";
 
     private final Entering entering;
     private final FolderLoad.Progress progress;
     private long features;
+    private int begun = 1;
 
     BaseMapLoad(Entering entering, FolderLoad.Progress progress) {
         this.entering = entering;
@@ -40,20 +42,23 @@ final class BaseMapLoad {
     }
 
     /** Reads the file; every fault that can be found is told. */
-    void read(InputStream bytes) throws IOException {
+    void read(InputStream bytes) {
         InputStream bounded = new BoundedStream(
                 bytes, MOST_BYTES, "the base map is larger than " + (MOST_BYTES >> 20) + " MiB; draw less on it");
-        try (JsonParser parser = new JsonFactory().createParser(bounded)) {
-            parser.setCodec(new ObjectMapper());
+        try (FeatureParser parser = new FeatureParser(new JsonFactory().createParser(bounded), MOST_TOKENS)) {
             readCollection(parser);
         } catch (JsonProcessingException e) {
-            int line = e.getLocation() == null ? 1 : Math.max(1, e.getLocation().getLineNr());
+            int line = e.getLocation() == null
+                    ? begun
+                    : Math.max(begun, e.getLocation().getLineNr());
             fault(line, "is no JSON: " + Texts.shown(e.getOriginalMessage()) + FORM);
+        } catch (IOException e) {
+            fault(begun, "cannot be read on from here: " + e.getMessage());
         }
         progress.read("basemap", features, true);
     }
 
-    private void readCollection(JsonParser parser) throws IOException {
+    private void readCollection(FeatureParser parser) throws IOException {
         boolean typed = false;
         boolean listed = false;
         if (parser.nextToken() != JsonToken.START_OBJECT) {
@@ -81,11 +86,10 @@ final class BaseMapLoad {
         }
     }
 
-    private void readFeatures(JsonParser parser) throws IOException {
+    private void readFeatures(FeatureParser parser) throws IOException {
         while (parser.nextToken() != JsonToken.END_ARRAY) {
-            int line = parser.currentTokenLocation().getLineNr();
-            JsonNode feature = parser.readValueAsTree();
-            enter(line, feature);
+            begun = parser.currentTokenLocation().getLineNr();
+            enter(begun, parser.feature());
             features++;
         }
     }
@@ -105,18 +109,27 @@ final class BaseMapLoad {
                                     : "the feature has no layer; its properties name one of ")
                             + String.join(", ", LAYERS));
         }
-        JsonNode name = feature.path("properties").path("name");
+        String name = name(feature.path("properties").path("name"), line);
         try {
             Geometry geometry = GeoJsonGeometry.read(feature.path("geometry"));
             if (known) {
                 int id = entering.view().limit(RecordKind.BASE_FEATURE);
-                String text =
-                        name.isValueNode() && !name.isNull() && !name.asText().isEmpty() ? name.asText() : null;
-                entering.apply(Change.add(new BaseFeature(id, layer.asText(), text, geometry)), line);
+                entering.apply(Change.add(new BaseFeature(id, layer.asText(), name, geometry)), line);
             }
         } catch (GeoJsonGeometry.WrongGeometry e) {
             fault(line, e.sentence());
         }
+    }
+
+    private @Nullable String name(JsonNode name, int line) {
+        String text = name.isValueNode() && !name.isNull() ? name.asText() : "";
+        if (!Texts.canBeWritten(text)) {
+            fault(
+                    line,
+                    "the name '" + Texts.shown(text) + "' holds control characters or halves of characters;"
+                            + " take them out");
+        }
+        return text.isEmpty() ? null : text;
     }
 
     private void fault(int line, String text) {

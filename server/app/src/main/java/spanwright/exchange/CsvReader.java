@@ -292,7 +292,7 @@ final class CsvReader {
             at -= keepFrom;
             rowStart = 0;
         }
-        if (limit == buffer.length) {
+        if (limit + Utf8Reader.LEAST_ROOM > buffer.length) {
             buffer = Arrays.copyOf(buffer, 2 * buffer.length);
         }
         int got = input.read(buffer, limit);

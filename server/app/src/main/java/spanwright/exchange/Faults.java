@@ -25,7 +25,7 @@ final class Faults {
 
     /** A fault of another file. */
     void add(String file, int line, String text) {
-        add(AFTER_TABLES, new Fault(file, line, text));
+        add(AFTER_TABLES, new Fault(Texts.shown(file), line, text));
     }
 
     private void add(int order, Fault fault) {

@@ -72,6 +72,13 @@ public final class FolderLoad {
         return load.faults.list();
     }
 
+    /** Reads a folder whose files come from anywhere. */
+    static List<Fault> load(Source source, SnapshotEditor editor) {
+        FolderLoad load = new FolderLoad(editor, Progress.NONE);
+        load.read(source, "folder");
+        return load.faults.list();
+    }
+
     private void read(Source source, String name) {
         List<String> names = source.names();
         boolean any = false;

@@ -33,7 +33,7 @@ final class PassRows extends Rows<Pass> {
         List<FiberRange> opened = row.ranges(OPENED, fibers, "fibers of cable " + row.text(CABLE));
         List<FiberRange> tubesOpened = row.ranges(TUBES_OPENED, tubes, "tubes of cable " + row.text(CABLE));
         int runRow = runRow(row, enclosure, cable);
-        return runRow == 0 ? null : new Pass(id, enclosure, cable, runRow, opened, tubesOpened);
+        return enclosure == 0 || runRow == 0 ? null : new Pass(id, enclosure, cable, runRow, opened, tubesOpened);
     }
 
     private int runRow(Row row, int enclosure, int cable) {

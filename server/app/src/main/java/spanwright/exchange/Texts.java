@@ -7,10 +7,13 @@ final class Texts {
 
     private Texts() {}
 
-    /** A text short enough for a sentence. */
+    /** A text short enough for a sentence, on one line. */
     static String shown(String text) {
-        String line = text.replace('\n', ' ').replace('\r', ' ');
-        return line.length() <= MOST_SHOWN ? line : line.substring(0, MOST_SHOWN) + "...";
+        StringBuilder line = new StringBuilder(Math.min(text.length(), MOST_SHOWN));
+        text.chars().limit(MOST_SHOWN).forEach(c -> line.append(Character.isISOControl(c) ? ' ' : (char) c));
+        return text.length() <= MOST_SHOWN
+                ? line.toString()
+                : line.append("...").toString();
     }
 
     /** Whether a text equals a slice. */

@@ -15,6 +15,9 @@ import org.jspecify.annotations.Nullable;
 /** Decodes UTF-8 strictly: what is not UTF-8 is noted with its place, and a stand-in given for it. */
 final class Utf8Reader {
 
+    /** The least room for characters to be read into: one beyond the basic plane takes two. */
+    static final int LEAST_ROOM = 2;
+
     private static final char STAND_IN = '\uFFFD';
     private static final int BYTES = 1 << 16;
 
@@ -50,7 +53,7 @@ final class Utf8Reader {
         this.input = input;
     }
 
-    /** Reads at least one character into the rest of an array, which has room, and says how many; -1 at the end. */
+    /** Reads a character or more into the rest of an array, of {@link #LEAST_ROOM} at least; how many, or -1 at the end. */
     int read(char[] chars, int from) throws IOException {
         if (!begun) {
             begun = true;

@@ -3,6 +3,7 @@ package spanwright.exchange;
 import java.io.FilterInputStream;
 import java.io.IOException;
 import java.io.InputStream;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -20,9 +21,6 @@ import java.util.zip.ZipFile;
  */
 final class ZipSource implements Source {
 
-    /** The most entries. */
-    static final int MOST_ENTRIES = 10_000;
-
     /** The most bytes that come out in all. */
     static final long MOST_BYTES = 20L << 30;
 
@@ -34,11 +32,14 @@ final class ZipSource implements Source {
 
     private final ZipFile zip;
     private final Map<String, ZipEntry> files;
+    private final long most;
     private long bytes;
 
-    private ZipSource(ZipFile zip, Map<String, ZipEntry> files) {
+    private ZipSource(ZipFile zip, Map<String, ZipEntry> files, long size) {
         this.zip = zip;
         this.files = files;
+        // Entries may overlap and state any size: what comes out in all is held against the zip as it lies on disk.
+        this.most = Math.min(MOST_BYTES, Math.max(size * MOST_RATIO, FREE_BYTES * Table.values().length));
     }
 
     /**
@@ -47,9 +48,10 @@ final class ZipSource implements Source {
      * @throws IOException where it is none, or names files that lie elsewhere; the message says what would be right
      */
     static ZipSource open(Path path) throws IOException {
+        ZipDirectory.ask(path);
         ZipFile zip = new ZipFile(path.toFile());
         try {
-            return new ZipSource(zip, files(zip));
+            return new ZipSource(zip, files(zip), Files.size(path));
         } catch (IOException | RuntimeException e) {
             zip.close();
             throw e;
@@ -57,9 +59,6 @@ final class ZipSource implements Source {
     }
 
     private static Map<String, ZipEntry> files(ZipFile zip) throws IOException {
-        if (zip.size() > MOST_ENTRIES) {
-            throw new ZipException("it holds more than " + MOST_ENTRIES + " files");
-        }
         Map<String, Map<String, ZipEntry>> byFolder = new TreeMap<>();
         Set<String> names = new HashSet<>();
         for (var entries = zip.entries(); entries.hasMoreElements(); ) {
@@ -67,7 +66,7 @@ final class ZipSource implements Source {
             String name = entry.getName();
             refuseElsewhere(name);
             if (!names.add(name)) {
-                throw new ZipException("it holds '" + name + "' twice; each file stands once");
+                throw new ZipException("it holds '" + Texts.shown(name) + "' twice; each file stands once");
             }
             int slash = name.lastIndexOf('/');
             if (!entry.isDirectory()) {
@@ -79,10 +78,16 @@ final class ZipSource implements Source {
     }
 
     private static void refuseElsewhere(String name) throws IOException {
-        boolean absolute = name.startsWith("/") || name.startsWith("\\") || name.matches("[A-Za-z]:.*");
-        if (absolute || List.of(name.split("[/\\\\]")).contains("..")) {
+        boolean absolute = name.startsWith("/") || name.startsWith("\\") || name.matches("(?s)[A-Za-z]:.*");
+        List<String> steps = List.of(name.split("[/\\\\]", -1));
+        if (absolute || steps.contains("..")) {
             throw new ZipException(
-                    "it names '" + name + "', which lies outside of it; pack the files with plain names");
+                    "it names '" + Texts.shown(name) + "', which lies outside of it; pack the files with plain names");
+        }
+        boolean doubled = steps.subList(0, steps.size() - 1).contains("");
+        if (name.indexOf('\\') >= 0 || doubled || steps.contains(".")) {
+            throw new ZipException("it names '" + Texts.shown(name)
+                    + "'; part folders by one / and write no . or \\ in names, as ordinary zips do");
         }
     }
 
@@ -124,11 +129,12 @@ final class ZipSource implements Source {
             throw new ZipException("there is no " + name);
         }
         long packed = Math.max(0, entry.getCompressedSize());
-        return new Counted(new BoundedStream(
-                bytes,
+        InputStream bounded = new BoundedStream(
+                new WholeEntry(bytes, entry),
                 Math.max(FREE_BYTES, packed * MOST_RATIO),
                 "the file swells to more than " + MOST_RATIO
-                        + " times its packed size, as no records do; load the folder itself"));
+                        + " times its packed size, as no records do; load the folder itself");
+        return new Counted(bounded);
     }
 
     @Override
@@ -159,9 +165,9 @@ final class ZipSource implements Source {
 
         private void count(int more) throws IOException {
             bytes += more;
-            if (bytes > MOST_BYTES) {
-                throw new ZipException(
-                        "more than " + (MOST_BYTES >> 30) + " GiB come out of the zip; load the folder itself");
+            if (bytes > most) {
+                throw new ZipException("more than " + (most >> 20)
+                        + " MiB come out of the zip, as of no records; load the folder itself");
             }
         }
     }
