@@ -106,6 +106,7 @@ public final class Markers {
         table.add("owner", "Sallowmere Valley Fiber Cooperative");
         table.add("time_zone", "America/Los_Angeles");
         table.add("unit", "ft");
+        table.add("invented", "yes");
         return table;
     }
 }

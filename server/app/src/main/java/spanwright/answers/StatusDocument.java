@@ -16,8 +16,7 @@ import spanwright.splicing.Joint;
 /** What these records are: whose, of when, how many of each, where. */
 public final class StatusDocument {
 
-    private static final String INVENTED =
-            "Every name, place and number here is invented; the plant lies where no land is.";
+    private static final String INVENTED = "Every name, place and number here is invented.";
 
     private final Views views;
     private final String version;
@@ -47,7 +46,8 @@ public final class StatusDocument {
         changes.reference(json, "posting", views.ledger().findPosting(view.posting()));
         json.object("counts", item -> counts(item, view));
         extent(json, MapDocuments.extent(view.records()));
-        json.flag("demo", demo).text("invented", demo ? INVENTED : null);
+        boolean invented = demo || "yes".equals(view.setting("invented"));
+        json.flag("demo", demo).text("invented", invented ? INVENTED : null);
         json.texts("jobs", view.records().plannedJobs());
         json.list(
                 "wavelengths_nm",

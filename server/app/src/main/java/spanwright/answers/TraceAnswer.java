@@ -59,10 +59,8 @@ public final class TraceAnswer {
     public Optional<Wavelength> wavelength() {
         Optional<Wavelength> asked = Optional.ofNullable(question.wavelength());
         return asked.or(() -> {
-            List<Wavelength> all = paths.stream()
-                    .map(path -> path.loss.wavelength())
-                    .distinct()
-                    .toList();
+            List<Wavelength> all =
+                    paths.stream().map(Reckoned::wavelength).distinct().toList();
             return all.size() == 1 ? Optional.of(all.get(0)) : Optional.empty();
         });
     }
@@ -102,16 +100,24 @@ public final class TraceAnswer {
         Reckoning reckoning =
                 reckoners.computeIfAbsent(wavelength, this::reckoner).reckon(path);
         if (reckoning instanceof LossUnknown unknown) {
-            throw new Unanswerable(Kind.WAVELENGTH_OUT_OF_RANGE, unknown.sentence() + ".", "wavelength");
+            unknown(path, wavelength, unknown.sentence() + ".");
+            return;
         }
         PathLoss loss = (PathLoss) reckoning;
         Optional<Budget> budget = Optional.ofNullable(question.budget())
                 .or(() -> circuit.flatMap(each -> Optional.ofNullable(each.budget()))
                         .flatMap(Budget::find));
-        paths.add(new Reckoned(
-                loss,
-                budget.map(each -> BudgetCheck.of(loss, each, question.margin()))
-                        .orElse(null)));
+        BudgetCheck check = budget.map(each -> BudgetCheck.of(loss, each, question.margin()))
+                .orElse(null);
+        paths.add(new Reckoned(path, wavelength, loss, check, null));
+    }
+
+    /** Among all circuits, one whose loss cannot be reckoned says so and leaves the others theirs. */
+    private void unknown(Path path, Wavelength wavelength, String problem) {
+        if (!question.allCircuits()) {
+            throw new Unanswerable(Kind.WAVELENGTH_OUT_OF_RANGE, problem, "wavelength");
+        }
+        paths.add(new Reckoned(path, wavelength, null, null, problem));
     }
 
     private LossReckoner reckoner(Wavelength wavelength) {
@@ -124,14 +130,16 @@ public final class TraceAnswer {
     /**
      * One path.
      *
-     * @param loss what it loses
+     * @param path the path
+     * @param wavelength the wavelength at which it is asked about
+     * @param loss what it loses, or null where that cannot be reckoned
      * @param budget its loss held against its budget, or null where it has none
+     * @param problem why its loss cannot be reckoned, and what would be right; else null
      */
-    public record Reckoned(PathLoss loss, @Nullable BudgetCheck budget) {
-
-        /** The path. */
-        public Path path() {
-            return loss.path();
-        }
-    }
+    public record Reckoned(
+            Path path,
+            Wavelength wavelength,
+            @Nullable PathLoss loss,
+            @Nullable BudgetCheck budget,
+            @Nullable String problem) {}
 }

@@ -47,21 +47,18 @@ public final class TraceDocument {
 
     private void path(Json json, TraceAnswer.Reckoned reckoned) {
         Path path = reckoned.path();
-        PathLoss loss = reckoned.loss();
+        @Nullable PathLoss loss = reckoned.loss();
         List<String> circuits = path.circuits().stream().map(Circuit::code).toList();
         json.flag("complete", path.complete()).text("circuit", circuits.isEmpty() ? null : circuits.get(0));
         json.texts("circuits", circuits)
-                .number("wavelength_nm", loss.wavelength().exactNanometres());
+                .number("wavelength_nm", reckoned.wavelength().exactNanometres());
         json.flag("loop", path.loop())
                 .texts("ends", path.ends().stream().map(PathEnd::name).toList());
-        List<Length> before = path.glassBefore();
-        json.list("elements", items -> {
-            for (int index = 0; index < before.size(); index++) {
-                int place = index;
-                items.objectHere(item -> elements.write(item, loss.elements().get(place), before.get(place)));
-            }
-        });
+        json.list("elements", items -> elements(items, path, loss));
         json.object("totals", item -> totals(item, path, loss));
+        if (reckoned.problem() != null) {
+            json.text("problem", reckoned.problem());
+        }
         budget(json, reckoned.budget());
         if (tracks) {
             GlassTrack track = GlassTrack.of(path);
@@ -70,10 +67,26 @@ public final class TraceDocument {
         }
     }
 
-    private static void totals(Json json, Path path, PathLoss loss) {
+    private void elements(Json items, Path path, @Nullable PathLoss loss) {
+        if (loss == null) {
+            // Each would have to state a loss.
+            return;
+        }
+        List<Length> before = path.glassBefore();
+        for (int index = 0; index < before.size(); index++) {
+            int place = index;
+            items.objectHere(item -> elements.write(item, loss.elements().get(place), before.get(place)));
+        }
+    }
+
+    private static void totals(Json json, Path path, @Nullable PathLoss loss) {
         json.metres("sheath_m", path.sheath()).metres("glass_m", path.glass()).metres("route_m", path.route());
         json.whole("splices", path.count(ElementKind.SPLICE)).whole("connectors", path.count(ElementKind.CONNECTOR));
         json.whole("splitters", path.count(ElementKind.SPLITTER));
+        if (loss == null) {
+            json.none("loss_db").none("loss_limit_db").none("loss_statistical_db");
+            return;
+        }
         json.decibels("loss_db", loss.expected()).decibels("loss_limit_db", loss.limit());
         json.decibels("loss_statistical_db", loss.statistical());
         json.number(

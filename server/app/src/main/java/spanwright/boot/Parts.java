@@ -25,6 +25,7 @@ import spanwright.http.Api;
 import spanwright.http.CannotListenException;
 import spanwright.http.ServerOptions;
 import spanwright.http.WebServer;
+import spanwright.journal.Posting;
 import spanwright.network.Ledger;
 import spanwright.network.Outcome;
 import spanwright.records.Refusal;
@@ -99,11 +100,12 @@ final class Parts implements Program {
     }
 
     @Override
-    public void export(View view, ExportFormat format, Path out) {
+    public void export(View view, @Nullable Posting posting, ExportFormat format, Path out) {
         try {
             switch (format) {
                 case FOLDER -> FolderExport.write(view.records(), out);
-                case GEOJSON -> GeoJsonExport.write(view.records(), out);
+                case GEOJSON ->
+                    GeoJsonExport.write(view.records(), posting == null ? null : view.time(posting.at()), out);
             }
         } catch (FileAlreadyExistsException there) {
             throw new WrongInput(out + " is there already; name one that is not there yet.");

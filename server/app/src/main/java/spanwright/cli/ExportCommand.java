@@ -42,8 +42,8 @@ final class ExportCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        return view.answer(program, asked -> {
-            program.export(asked, format, out);
+        return view.answer(program, (asked, posting) -> {
+            program.export(asked, posting, format, out);
             spec.commandLine().getErr().println("Written as of posting " + asked.posting() + ": " + out);
             return 0;
         });

@@ -33,10 +33,11 @@ public interface Program {
     /**
      * Writes the records of a view for other programs.
      *
+     * @param posting the view's last posting, or null where there is none
      * @param out a file or folder that is not there yet
      * @throws WrongInput where it is there, or cannot be written
      */
-    void export(View view, ExportFormat format, Path out);
+    void export(View view, @Nullable Posting posting, ExportFormat format, Path out);
 
     /**
      * Starts to serve a records file.

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
 import spanwright.answers.TraceAnswer;
 import spanwright.answers.View;
 import spanwright.circuits.Circuit;
@@ -55,7 +56,7 @@ final class TraceTable {
 
     private void print(TraceAnswer.Reckoned reckoned) {
         Path path = reckoned.path();
-        PathLoss loss = reckoned.loss();
+        @Nullable PathLoss loss = reckoned.loss();
         String circuits = path.circuits().stream().map(Circuit::code).collect(Collectors.joining(", "));
         String name = circuits.isEmpty() ? path.governing().map(Circuit::code).orElse("") : circuits;
         String ends = path.loop()
@@ -64,9 +65,13 @@ final class TraceTable {
         Output.wrapped(
                 out,
                 (name.isEmpty() ? "" : name + ": ") + ends + (path.complete() ? ", complete" : ", not complete")
-                        + ", at " + loss.wavelength(),
+                        + ", at " + reckoned.wavelength(),
                 "",
                 WIDTH);
+        if (loss == null) {
+            Output.wrapped(out, "No loss: " + reckoned.problem(), "", WIDTH);
+            return;
+        }
         out.printf(Locale.ROOT, ROW, "glass " + unit.symbol(), "", "loss dB", "limit dB");
         List<Length> before = path.glassBefore();
         for (int index = 0; index < before.size(); index++) {

@@ -6,6 +6,7 @@ import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Option;
 import spanwright.answers.View;
 import spanwright.answers.Views;
+import spanwright.journal.Posting;
 import spanwright.network.Ledger;
 
 /** What every command that answers takes. */
@@ -30,8 +31,24 @@ final class ViewOptions {
 
     /** Answers from the view that is asked for. */
     <T> T answer(Program program, Function<View, T> answer) {
+        return answer(program, (view, posting) -> answer.apply(view));
+    }
+
+    /** Answers from the view that is asked for and its last posting, null where there is none. */
+    <T> T answer(Program program, Dated<T> answer) {
         try (Ledger ledger = program.open(records)) {
-            return answer.apply(new Views(ledger).of(asOf, asIf));
+            View view = new Views(ledger).of(asOf, asIf);
+            return answer.of(view, ledger.findPosting(view.posting()).orElse(null));
         }
+    }
+
+    /**
+     * Answers from a view and its last posting.
+     *
+     * @param <T> the answer's type
+     */
+    interface Dated<T> {
+        /** Answers. */
+        T of(View view, @Nullable Posting posting);
     }
 }

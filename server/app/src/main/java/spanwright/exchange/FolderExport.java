@@ -6,7 +6,6 @@ import java.io.OutputStream;
 import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.Arrays;
 import java.util.Locale;
 import java.util.stream.Stream;
@@ -22,7 +21,7 @@ public final class FolderExport {
     private FolderExport() {}
 
     /**
-     * Writes a folder or a zip. Only files that have rows are written. What is written appears under its name when
+     * Writes a folder or a zip. Only files that have rows are written, but for the structures'. What is written appears under its name when
      * it is whole.
      *
      * @param records what is written
@@ -33,20 +32,16 @@ public final class FolderExport {
     public static void write(Records records, Path path) throws IOException {
         boolean zip = path.toString().toLowerCase(Locale.ROOT).endsWith(".zip");
         refuseExisting(path, zip);
-        Path part = path.resolveSibling(path.getFileName() + ".part");
-        if (zip) {
-            try (Sink sink = Sink.zip(part)) {
-                write(records, sink);
-            } catch (IOException | RuntimeException e) {
-                Files.deleteIfExists(part);
-                throw e;
+        Unfinished.write(path, part -> {
+            if (zip) {
+                try (Sink sink = Sink.zip(part)) {
+                    write(records, sink);
+                }
+            } else {
+                Files.createDirectory(part);
+                write(records, Sink.folder(part));
             }
-        } else {
-            Files.createDirectory(part);
-            write(records, Sink.folder(part));
-            Files.deleteIfExists(path);
-        }
-        Files.move(part, path, StandardCopyOption.ATOMIC_MOVE);
+        });
     }
 
     private static void refuseExisting(Path path, boolean zip) throws IOException {
@@ -65,6 +60,10 @@ public final class FolderExport {
 
     private static void write(Records records, Sink sink) throws IOException {
         RecordRows rows = new RecordRows(records);
+        if (records.structures().count() == 0) {
+            // A folder without any file would be none.
+            new TableFile(Table.STRUCTURES, sink).empty();
+        }
         for (Table table : Table.values()) {
             try (TableFile file = new TableFile(table, sink)) {
                 rows.each(table, file);
@@ -91,13 +90,20 @@ public final class FolderExport {
 
         @Override
         public void take(String[] cells) throws IOException {
-            CsvWriter begun = writer;
-            if (begun == null) {
-                begun = new CsvWriter(sink.create(table.file()));
-                writer = begun;
-                begun.row(table.columns());
-            }
+            CsvWriter begun = writer == null ? begin() : writer;
             begun.row(Arrays.asList(cells));
+        }
+
+        private CsvWriter begin() throws IOException {
+            CsvWriter begun = new CsvWriter(sink.create(table.file()));
+            writer = begun;
+            begun.row(table.columns());
+            return begun;
+        }
+
+        /** Writes the file without rows. */
+        void empty() throws IOException {
+            begin().close();
         }
 
         @Override

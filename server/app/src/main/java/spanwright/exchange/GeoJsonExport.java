@@ -3,31 +3,40 @@ package spanwright.exchange;
 import java.io.BufferedOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
+import java.math.RoundingMode;
 import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.Iterator;
 import java.util.List;
 import java.util.Set;
 import java.util.function.Function;
 import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 import spanwright.journal.Recorded;
 import spanwright.plant.Cable;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Position;
+import spanwright.plant.RouteLength;
+import spanwright.plant.Span;
 import spanwright.plant.Structure;
+import spanwright.quantity.Length;
+import spanwright.records.CableLay;
 import spanwright.records.Records;
 
 /**
  * Writes the plant as GeoJSON (RFC 7946): structures and enclosures as points, spans as lines, cables as lines along
- * their runs; WGS 84, longitude first. A foreign member {@code note} says what the positions are not.
+ * their runs; WGS 84, longitude first. Foreign members say what the positions are not, and of which posting they are;
+ * every feature says the former too, as many programs drop the collection's own members.
  */
 public final class GeoJsonExport {
 
     /** What every map of the records says. */
     static final String NOTE = "Positions are records, not a locate. Call before you dig; treat every fiber as live"
             + " until proven dark; local codes and licensed practice prevail.";
+
+    /** What every feature says, for programs that drop the collection's own members. */
+    static final String CAUTION = "records, not a locate: call before you dig";
 
     private static final Set<String> NUMBERS = Set.of("accuracy_m", "length_m", "tray_glass_m", "overlength_pct");
     private static final Set<String> PLACES = Set.of("lon", "lat", "line");
@@ -48,26 +57,29 @@ public final class GeoJsonExport {
      * Writes a file; it appears under its name when it is whole.
      *
      * @param records what is written
+     * @param time when their last posting was made, in the records' own zone; null where there is none
      * @param path the file, which does not exist yet
      * @throws FileAlreadyExistsException where something is there already
      * @throws IOException where it cannot be written
      */
-    public static void write(Records records, Path path) throws IOException {
+    public static void write(Records records, @Nullable String time, Path path) throws IOException {
         if (Files.exists(path)) {
             throw new FileAlreadyExistsException(path.toString(), null, "name a file that is not there yet");
         }
-        Path part = path.resolveSibling(path.getFileName() + ".part");
-        try (OutputStream bytes = new BufferedOutputStream(Files.newOutputStream(part), 1 << 16)) {
-            write(records, bytes);
-        }
-        Files.move(part, path, StandardCopyOption.ATOMIC_MOVE);
+        Unfinished.write(path, part -> {
+            try (OutputStream bytes = new BufferedOutputStream(Files.newOutputStream(part), 1 << 16)) {
+                write(records, time, bytes);
+            }
+        });
     }
 
     /** Writes to a stream, which is closed. */
-    static void write(Records records, OutputStream bytes) throws IOException {
+    static void write(Records records, @Nullable String time, OutputStream bytes) throws IOException {
         try (GeoJsonWriter writer = new GeoJsonWriter(bytes)) {
             writer.begin();
             writer.member("note", NOTE);
+            writer.member("posting", records.posting());
+            writer.member("posted_at", time);
             writer.features();
             new GeoJsonExport(records, writer).plant();
         }
@@ -112,7 +124,29 @@ public final class GeoJsonExport {
                     writer.property(cell.getKey(), cell.getValue());
                 }
             }
+            Length reckoned = reckoned(record);
+            if (reckoned != null) {
+                writer.number(record instanceof Cable ? "sheath_m" : "route_m", rounded(reckoned));
+            }
+            writer.property("caution", CAUTION);
             writer.geometry(place.apply(record));
         }
+    }
+
+    /** The length of a span along its route, of a cable from its start to its end; null for others. */
+    private @Nullable Length reckoned(Recorded record) {
+        if (record instanceof Span span) {
+            Position from = records.structures().get(span.from()).position();
+            return RouteLength.of(
+                            span, from, records.structures().get(span.to()).position())
+                    .length();
+        }
+        return record instanceof Cable cable && !records.runOf(cable.id()).isEmpty()
+                ? CableLay.of(records, cable.id()).positions().length()
+                : null;
+    }
+
+    private static String rounded(Length length) {
+        return length.exactMetres().setScale(3, RoundingMode.HALF_EVEN).toPlainString();
     }
 }

@@ -17,10 +17,17 @@ import org.locationtech.jts.geom.Polygon;
 import spanwright.plant.BaseFeature;
 import spanwright.plant.Position;
 
-/** Writes feature collections of RFC 7946, a feature a line; every coordinate with as many digits as name it. */
+/**
+ * Writes feature collections of RFC 7946, a feature a line; every coordinate with as many digits as name it. Where all
+ * of it lies ({@code bbox}) follows the features, when it is known.
+ */
 final class GeoJsonWriter implements Closeable {
 
     private final JsonGenerator json;
+    private double west = Double.POSITIVE_INFINITY;
+    private double south = Double.POSITIVE_INFINITY;
+    private double east = Double.NEGATIVE_INFINITY;
+    private double north = Double.NEGATIVE_INFINITY;
 
     GeoJsonWriter(OutputStream bytes) throws IOException {
         this.json = new JsonFactory().createGenerator(bytes);
@@ -33,8 +40,13 @@ final class GeoJsonWriter implements Closeable {
     }
 
     /** Writes a member of the collection that RFC 7946 does not know. */
-    void member(String name, String value) throws IOException {
+    void member(String name, @Nullable String value) throws IOException {
         json.writeStringField(name, value);
+    }
+
+    /** Writes a member of the collection that RFC 7946 does not know. */
+    void member(String name, int value) throws IOException {
+        json.writeNumberField(name, value);
     }
 
     /** Begins the features. */
@@ -106,6 +118,10 @@ final class GeoJsonWriter implements Closeable {
     }
 
     private void position(double lon, double lat) throws IOException {
+        west = Math.min(west, lon);
+        east = Math.max(east, lon);
+        south = Math.min(south, lat);
+        north = Math.max(north, lat);
         json.writeStartArray();
         json.writeNumber(Cells.plain(lon));
         json.writeNumber(Cells.plain(lat));
@@ -167,6 +183,13 @@ final class GeoJsonWriter implements Closeable {
     public void close() throws IOException {
         json.writeEndArray();
         json.writeRaw('\n');
+        if (west <= east) {
+            json.writeArrayFieldStart("bbox");
+            for (double edge : new double[] {west, south, east, north}) {
+                json.writeNumber(Cells.plain(edge));
+            }
+            json.writeEndArray();
+        }
         json.writeEndObject();
         json.close();
     }

@@ -6,6 +6,7 @@ import java.util.List;
 import spanwright.plant.Cable;
 import spanwright.plant.Line;
 import spanwright.plant.Position;
+import spanwright.plant.RouteLine;
 import spanwright.plant.RunRow;
 import spanwright.plant.Span;
 import spanwright.records.RecordsView;
@@ -37,7 +38,9 @@ final class MapLines {
             } else {
                 Span span = view.spans().get(row.span());
                 List<Position> along = new ArrayList<>(positions(span));
-                if (span.from() != before.structure()) {
+                Position from = position(before.structure());
+                if (RouteLine.metres(from, along.get(0)) > RouteLine.metres(from, along.get(along.size() - 1))) {
+                    // A span may be travelled, and its line be drawn, either way round.
                     Collections.reverse(along);
                 }
                 along.forEach(position -> add(all, position));

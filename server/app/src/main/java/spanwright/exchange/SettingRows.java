@@ -4,6 +4,7 @@ import java.time.DateTimeException;
 import java.time.ZoneId;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
+import spanwright.exchange.CableTypeRows.YesNo;
 import spanwright.journal.RecordKind;
 import spanwright.plant.Setting;
 import spanwright.quantity.LengthUnit;
@@ -13,7 +14,7 @@ final class SettingRows extends Rows<Setting> {
 
     private static final int NAME = Table.SETTINGS.column("name");
     private static final int VALUE = Table.SETTINGS.column("value");
-    private static final List<String> NAMES = List.of("time_zone", "owner", "unit");
+    private static final List<String> NAMES = List.of("time_zone", "owner", "unit", "invented");
 
     SettingRows(References refs) {
         super(Table.SETTINGS, RecordKind.SETTING, refs);
@@ -30,6 +31,7 @@ final class SettingRows extends Rows<Setting> {
         boolean right = switch (name) {
             case "time_zone" -> zone(row, value);
             case "unit" -> row.word(VALUE, LengthUnit.values(), LengthUnit::symbol) != null;
+            case "invented" -> row.word(VALUE, YesNo.values(), YesNo::word) != null;
             case "owner" -> true;
             default -> {
                 row.fault(

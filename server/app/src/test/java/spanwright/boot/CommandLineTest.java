@@ -310,6 +310,40 @@ class CommandLineTest {
         assertThat(status.path("invented").asText()).contains("invented");
         assertThat(status.at("/counts/circuits").asInt()).isGreaterThan(1_000);
         assertThat(Path.of(kept)).exists();
+
+        JsonNode served = Expected.read(whileRunning("/status", "serve", "--records", kept, "--port", "0"));
+        assertThat(served.path("demo").asBoolean()).isFalse();
+        assertThat(served.path("invented").asText()).contains("invented");
+    }
+
+    /** The built-in fiber types have no value at 1700 nm; what a reel's own sheet gives may end earlier still. */
+    @Test
+    void one_circuit_that_cannot_be_reckoned_does_not_hide_the_others() throws IOException {
+        load(Cases.WORKED);
+        String before =
+                run("trace", "--all-circuits", "--records", records, "--json").out();
+        load(Cases.WORKED_LATER);
+        Path more = Files.createDirectory(folder.resolve("more"));
+        Files.writeString(more.resolve("circuits.csv"), "circuit,wavelength_nm,a,z\nB-1,1700,E1/P/1,E4/T/4\n");
+        assertThat(load(more).status()).isZero();
+
+        Ran named = run("trace", "--circuit", "B-1", "--records", records, "--json");
+        assertThat(named.status()).isEqualTo(1);
+        assertThat(named.out()).isEmpty();
+
+        Ran all = run("trace", "--all-circuits", "--records", records, "--json");
+        assertThat(all.status()).as(all.err()).isZero();
+        JsonNode paths = Expected.read(all.out()).path("paths");
+        JsonNode wrong = paths.get(0);
+        assertThat(wrong.path("wavelength_nm").asInt()).isEqualTo(1700);
+        assertThat(wrong.path("problem").asText()).contains("1700 nm");
+        assertThat(wrong.at("/totals/loss_db").isNull()).isTrue();
+        assertThat(wrong.at("/totals/glass_m").asDouble()).isPositive();
+        assertThat(wrong.path("elements").isEmpty()).isTrue();
+        JsonNode right = Expected.read(before).path("paths").get(0);
+        assertThat(paths.get(1).path("elements")).isEqualTo(right.path("elements"));
+        assertThat(paths.get(1).has("problem")).isFalse();
+        assertThat(run("trace", "--all-circuits", "--records", records).out()).contains("No loss: ");
     }
 
     /** Runs a server in a thread of its own, asks it once, stops it. */

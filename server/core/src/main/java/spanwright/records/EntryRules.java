@@ -1,6 +1,7 @@
 package spanwright.records;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -154,7 +155,10 @@ public final class EntryRules {
             SpanRules.ask(view, span, found);
             refusals.addAll(found.list());
         }));
-        touchedRuns.forEach(cable -> RunRules.ask(view, view.runOf(cable), refusals));
+        touchedRuns.forEach(cable -> {
+            RunRules.ask(view, view.runOf(cable), refusals);
+            askRing(cable, refusals);
+        });
         touchedRows.forEach(row -> view.findPassAt(row).ifPresent(pass -> {
             Refusals found = new Refusals(pass);
             PassRules.askPlace(
@@ -166,5 +170,17 @@ public final class EntryRules {
             refusals.addAll(found.list());
         }));
         return refusals;
+    }
+
+    /** A ring that is made longer is in its enclosure twice with a row that is no longer its last. */
+    private void askRing(int cable, List<Refusal> refusals) {
+        Set<Integer> enclosures = new HashSet<>();
+        view.passes().owned(Relation.CABLE_PASSES, cable).forEach(pass -> {
+            if (!enclosures.add(pass.enclosure())) {
+                Refusals found = new Refusals(pass);
+                PassRules.askTwice(view, pass, found);
+                refusals.addAll(found.list());
+            }
+        });
     }
 }

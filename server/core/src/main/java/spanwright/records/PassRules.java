@@ -36,6 +36,12 @@ final class PassRules {
                         Names.of(view, row) + " is in enclosure " + Names.enclosure(view, other.enclosure())
                                 + "; a run row has one enclosure at most",
                         other));
+        askTwice(view, pass, refusals);
+        askOpened(view, pass, refusals);
+    }
+
+    /** Asks that a cable is in the enclosure once but for a ring; also where its run has got another first or last row. */
+    static void askTwice(RecordsView view, Pass pass, Refusals refusals) {
         view.passes()
                 .owned(Relation.CABLE_PASSES, pass.cable())
                 .filter(other -> other.id() != pass.id()
@@ -46,10 +52,10 @@ final class PassRules {
                 .ifPresent(other -> refusals.add(
                         "cable-twice-in-enclosure",
                         "seq",
-                        "cable " + Names.cable(view, pass.cable()) + " is in enclosure " + enclosure.code()
+                        "cable " + Names.cable(view, pass.cable()) + " is in enclosure "
+                                + Names.enclosure(view, pass.enclosure())
                                 + " already; only its first and its last row may both be there",
                         other));
-        askOpened(view, pass, refusals);
     }
 
     static void askPlace(RecordsView view, Pass pass, Enclosure enclosure, RunRow row, Refusals refusals) {
