@@ -19,7 +19,8 @@ class ArchitectureTest {
             .then("trace")
             .then("loss")
             .then("check")
-            .then("outage", "planning");
+            .then("planning")
+            .then("outage");
 
     @Test
     void each_package_uses_only_those_before_it() {

@@ -50,6 +50,12 @@ public final class FiberUses {
         return new SectionUse(use, on, flag, trust.verifiedOn());
     }
 
+    /** What glass without flags of its own, such as a port, is used for: what its glass path says. */
+    FiberUse ofPath(int path) {
+        int piece = snapshot.network().paths().firstEnd(path) >> 1;
+        return circuits.through(piece).isEmpty() ? unused(null, trusts.of(path)) : FiberUse.IN_USE;
+    }
+
     private static FiberUse unused(@Nullable FiberFlag flag, PathTrust trust) {
         if (flag != null && (flag.flag() == Flag.DEAD || flag.flag() == Flag.SUSPECT)) {
             return flag.flag() == Flag.DEAD ? FiberUse.DEAD : FiberUse.SUSPECT;
