@@ -359,6 +359,93 @@ export type Fault = {
   text: string;
 };
 
+export type FaultAnswer = {
+  /** The wavelength of the shot */
+  wavelength_nm: number;
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+  /** One place; behind a splitter one an output that leads somewhere */
+  places: Array<FaultPlace>;
+  /** What lies between the places of the near and the far shot; given with far_port */
+  between?: {
+    /** Glass between by the records; below 0 where the shots overlap */
+    glass_m: number;
+    /** Sheath between; below 0 where the shots overlap */
+    sheath_m: number;
+    /** How far that sheath may be off either way */
+    within_m: number;
+    /** Whether no more lies between than two cursors may stand apart; else take it as damaged, or as two breaks */
+    one_break: boolean;
+    from: FaultPlace;
+    to: FaultPlace;
+  };
+};
+
+export type FaultPlace = {
+  /** Longitude, degrees */
+  lon: number;
+  /** Latitude, degrees */
+  lat: number;
+  /** The structure before the place as seen from the port, or the one at which it is */
+  structure_before: string;
+  /** The structure after it, or the one at which it is */
+  structure_after: string;
+  /** Sheath from where it leaves the structure before; in a coil from where it arrives */
+  beyond_before_m: number;
+  /** Sheath to where it comes to the structure after; in a coil to where it leaves */
+  short_of_after_m: number;
+  /** The span; null at a structure */
+  span: string | null;
+  /** The cable; null in a jumper */
+  cable: string | null;
+  /** The fiber; null in a jumper */
+  fiber: number | null;
+  /** Along the sheath from the start of the cable's run; null in a jumper */
+  sheath_position_m: number | null;
+  /** The mark to look for; null where the cable has fewer than two ties */
+  mark: null | {
+    /** The number printed, to a thousandth */
+    value: number;
+    /** Its unit */
+    unit: "m" | "ft";
+    /** The governing ink */
+    ink: string;
+  };
+  /** The structure in whose coil it lies */
+  in_slack_at: string | null;
+  /** A structure whose coil the window touches, the nearest of several; not given where the place lies in a coil */
+  may_be_in_slack_at?: string;
+  /** On a span; in a coil; in tray glass or at a joint; in a jumper; at a structure without a coil */
+  lies_in: "span" | "slack" | "tray" | "jumper" | "structure";
+  /** Glass from the port, the launch fiber not counted, as known events stretch it */
+  glass_m: number;
+  /** Twice the root of the summed squares of within: the true place lies this far either side, in about 95 of 100 */
+  within_m: number;
+  /** One standard uncertainty a cause, m along the sheath; see docs/FAULT-PLACE.md */
+  within: {
+    /** Cursor and pulse, of the break and of the events used */
+    cursor: number;
+    /** The glass's group index; 0 between two known points */
+    index: number;
+    /** Glass in a length of sheath */
+    ratio: number;
+    /** Reading of marks; lengths of route in the place of marks */
+    marks: number;
+    /** Coils on the way from the nearest known point, and beside the place */
+    coils: number;
+    /** Where the structures are on the map */
+    map: number;
+  };
+  /** The stretch of route within, from the port's side on: its two ends and the bends between; one position where it stays at a structure */
+  window: Array<Position>;
+  /** Whether the reading lies beyond the path's end; the place is then that end */
+  past_end: boolean;
+  /** Glass read beyond the path's end; given with past_end */
+  over_m?: number;
+  /** Where the path ends, e.g. E9/P/4; null for a circle */
+  path_end: string | null;
+};
+
 export type FiberElement = {
   kind: "fiber";
   /** Cable */

@@ -77,22 +77,23 @@ public final class References {
 
     /** The key of the front of a port written {@code E1/P/1}. */
     public long front(String port) {
+        return front(port, "port");
+    }
+
+    /** The key of the front of a port that a parameter names. */
+    long front(String port, String parameter) {
         Matcher written = PORT.matcher(port);
         if (!written.matches()) {
             throw wrong(
-                    "'" + port + "' is not a port; a port is written enclosure/panel/number, such as E1/P/1.", "port");
+                    "'" + port + "' is not a port; a port is written enclosure/panel/number, such as E1/P/1.",
+                    parameter);
         }
-        Enclosure enclosure = named(
-                records.enclosures().find(written.group(1)),
-                "enclosure",
-                written.group(1),
-                "port",
-                records.enclosures().list().map(Enclosure::code));
+        Enclosure enclosure = namedEnclosure(written.group(1), parameter);
         Panel panel = named(
                 records.findPanel(enclosure.id(), written.group(2)),
                 "panel in " + enclosure.code(),
                 written.group(2),
-                "port",
+                parameter,
                 records.panels()
                         .owned(Relation.ENCLOSURE_PANELS, enclosure.id())
                         .map(Panel::code));
@@ -101,7 +102,7 @@ public final class References {
             throw absent(
                     enclosure.code() + "/" + panel.code() + " has ports 1 to " + panel.ports() + ", not " + number
                             + ".",
-                    "port");
+                    parameter);
         }
         return EndKey.of(LegKind.FRONT, panel.id(), number);
     }
@@ -112,13 +113,28 @@ public final class References {
         if (!written.matches()) {
             throw wrong("'" + fiber + "' is not a fiber; a fiber is written cable:number, such as F-1:3.", "fiber");
         }
-        Cable cable = named(records.cables().find(written.group(1)), "cable", written.group(1), "fiber", cableCodes());
-        int count = records.cableTypes().get(cable.cableType()).fibers();
         int number = Integer.parseInt(written.group(2));
-        if (number < 1 || number > count) {
-            throw absent(cable.code() + " has fibers 1 to " + count + ", not " + number + ".", "fiber");
+        return new FiberRef(cable(written.group(1), number, "fiber"), number);
+    }
+
+    /** The cable that a parameter names, which must have a fiber of that number. */
+    Cable cable(String code, int fiber, String parameter) {
+        Cable cable = named(records.cables().find(code), "cable", code, parameter, cableCodes());
+        int count = records.cableTypes().get(cable.cableType()).fibers();
+        if (fiber < 1 || fiber > count) {
+            throw absent(cable.code() + " has fibers 1 to " + count + ", not " + fiber + ".", parameter);
         }
-        return new FiberRef(cable, number);
+        return cable;
+    }
+
+    /** The enclosure that a parameter names. */
+    Enclosure namedEnclosure(String code, String parameter) {
+        return named(
+                records.enclosures().find(code),
+                "enclosure",
+                code,
+                parameter,
+                records.enclosures().list().map(Enclosure::code));
     }
 
     private Stream<String> cableCodes() {

@@ -45,6 +45,7 @@ public final class CommandLineProgram implements Runnable {
         CommandLine line = new CommandLine(new CommandLineProgram());
         line.addSubcommand(new LoadCommand(program));
         line.addSubcommand(new TraceCommand(program));
+        line.addSubcommand(new FaultCommand(program));
         line.addSubcommand(new CheckCommand(program));
         line.addSubcommand(new ExportCommand(program));
         line.addSubcommand(new ServeCommand(program));

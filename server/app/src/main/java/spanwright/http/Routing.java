@@ -33,6 +33,7 @@ final class Routing {
         get("/circuits", plant::circuits);
         get("/circuits/{code}", plant::circuit);
         get("/trace", new TraceRoute(answering)::trace);
+        get("/fault", new FaultRoute(answering)::fault);
         JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
         get("/postings", journal::list);
         // A posting is never stopped half way: who sent it would not know whether it was kept.

@@ -170,6 +170,11 @@ public final class GlassValues {
         return whyNot(JUMPER_TYPE, "loss", curves(JUMPER_TYPE).loss(), wavelength) + "; give the type a row";
     }
 
+    /** Why jumpers have no group index at a wavelength, for a person. */
+    public String whyNoJumperIndex(Wavelength wavelength) {
+        return whyNot(JUMPER_TYPE, "group index", curves(JUMPER_TYPE).index(), wavelength) + "; give the type a row";
+    }
+
     private static String whyNot(String type, String what, Curve curve, Wavelength wavelength) {
         return "fiber type " + type + " gives no " + what + " at " + wavelength + ": its table reaches "
                 + curve.reach();

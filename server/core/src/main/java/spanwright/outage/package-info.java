@@ -1,5 +1,5 @@
 /**
- * What to do when plant is cut: light another way meanwhile.
+ * What an outage asks of the records: where a distance read on an OTDR lies, and light another way meanwhile.
  *
  * <p>Invariants:
  *
@@ -7,6 +7,12 @@
  *   <li>A temporary path is offered only where every circuit of its group is whole again over it and keeps its budget.
  *   <li>Nothing is offered over the places to avoid, nor along the path of a circuit that protects.
  *   <li>Spare glass is shared so that no piece is promised twice.
+ *   <li>Glass is used up in the order in which light meets it: the launch fiber, then piece after piece; without known
+ *       events the records' glass holds to the micrometre.
+ *   <li>Known events stretch glass between them and nothing else; tray glass is never stretched.
+ *   <li>A place is on a span, or at one structure: in a coil, in tray glass or at a joint, in a jumper.
+ *   <li>What cannot be placed is a sentence, never a guess.
+ *   <li>The window is twice the root of the summed squares of its causes, and each cause can be read.
  * </ol>
  */
 @NullMarked

@@ -50,7 +50,24 @@ public final class Tracer {
         if (front == Network.NONE) {
             return List.of(nothing(panel, port, null));
         }
-        return walker.all(front).stream().map(walk -> path(front, walk, null)).toList();
+        return from(front);
+    }
+
+    private List<Path> from(int entered) {
+        return walker.all(entered).stream()
+                .map(walk -> path(entered, walk, null))
+                .toList();
+    }
+
+    /**
+     * The paths that start at an end and go into its glass; from a splitter's input to its outputs, a path an output,
+     * from an output to its inputs. None where that end is not in service.
+     *
+     * @param key key of the end
+     */
+    public List<Path> fromEnd(long key) {
+        int entered = network.endOf(key);
+        return entered == Network.NONE ? List.of() : from(entered);
     }
 
     private Path nothing(int panel, int port, @Nullable Circuit asked) {

@@ -13,8 +13,8 @@ import spanwright.records.Refusal;
  * <pre>
  * structure H1 lon lat
  * span H1 H2 [length] [lon lat lon lat ...]      the bends between
- * cable F-1 fibers [type=G.652.D] [over=1.5] [planned] : H1 [+slack] length H2 [+slack] length H3
- * mark F-1 row [in] [out] [ft]                   - for a mark not read
+ * cable F-1 fibers [type=G.652.D] [over=1.5] [own=1.4] [ink=yellow] [planned] : H1 [+slack] length H2 [+slack] length H3
+ * mark F-1 row [in] [out] [ft] [ink]             - for a mark not read
  * enclosure E1 H1 [tray=1.5] [planned] : F-1 [F-2/row] [F-1/row(1-3,5)] ...
  * splitter E1 S1 1x4 [loss] [5=7.5 ...]
  * panel E1 P 12

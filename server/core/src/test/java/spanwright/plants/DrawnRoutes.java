@@ -113,8 +113,10 @@ final class DrawnRoutes {
                 null,
                 "TIA-598"));
         PlantState state = options.containsKey("planned") ? PlantState.PLANNED : PlantState.IN_SERVICE;
+        String ink = options.getOrDefault("ink", "white");
+        Double own = options.containsKey("own") ? Double.valueOf(options.get("own")) : null;
         Cable cable = board.add(
-                new Cable(board.next(RecordKind.CABLE), code, type.id(), null, "white", null, null, null, state, null));
+                new Cable(board.next(RecordKind.CABLE), code, type.id(), null, ink, own, null, null, state, null));
         Structure before = null;
         Length length = null;
         for (int seq = 0; words.more(); seq++) {
@@ -134,9 +136,9 @@ final class DrawnRoutes {
         RunRow row = board.view.runOf(board.cableOf(words.next()).id()).get((int) words.number());
         BigDecimal in = words.decimalOrDash();
         BigDecimal out = words.more() ? words.decimalOrDash() : null;
-        LengthUnit unit = words.more() ? LengthUnit.FOOT : LengthUnit.METRE;
-        board.add(new SheathMark(
-                board.next(RecordKind.SHEATH_MARK), row.id(), "white", unit, in, out, null, Trust.POSTED));
+        LengthUnit unit = words.more() ? LengthUnit.find(words.next()).orElseThrow() : LengthUnit.METRE;
+        String ink = words.more() ? words.next() : "white";
+        board.add(new SheathMark(board.next(RecordKind.SHEATH_MARK), row.id(), ink, unit, in, out, null, Trust.POSTED));
     }
 
     void enclosure(Words words) {
