@@ -1,5 +1,16 @@
 // Written from schema/openapi.json by test/contract-types.js: change the contract, not this file.
 
+export type Alarms = {
+  /** Circuits that are down */
+  down: Array<string>;
+  /** Circuits that are up */
+  up?: Array<string>;
+  /** Whether a protected circuit that is up is known to be so on its own path */
+  by_path?: boolean;
+  /** Enclosures that a crew is known to have opened lately: joints may be crossed there */
+  opened?: Array<string>;
+};
+
 export type BaseMap = {
   type: "FeatureCollection";
   /** True where small features were left out because of the zoom */
@@ -280,6 +291,38 @@ export type ConnectorElement = {
   glass_from_m: number;
 };
 
+export type CutFiber = {
+  fiber: number;
+  tube: number;
+  tube_color: string;
+  fiber_color: string;
+  /** The working circuits on it, first restored first */
+  carries: Array<string>;
+  /** Of the first circuit on it */
+  priority: number | null;
+  /** down or single as the first circuit on it is; else what else its glass is used for */
+  state: "down" | "single" | "in_use" | "jumpered" | "reserved" | "leased" | "dead" | "suspect" | "spare_unknown" | "spare" | "spare_verified";
+};
+
+export type CutSection = {
+  cable: string;
+  /** The enclosure toward the cable's start */
+  from: string | null;
+  /** The enclosure toward the cable's end */
+  to: string | null;
+  from_structure: string;
+  to_structure: string;
+  /** Its cut fibers in the order to restore: those of the first circuits first, dark ones last by number */
+  fibers: Array<CutFiber>;
+};
+
+export type DoubtfulJoint = {
+  enclosure: string;
+  a: string;
+  b: string;
+  trust: Trust;
+};
+
 export type Element = ConnectorElement | SpliceElement | FiberElement | ThroughElement | JumperElement | SplitterElement;
 
 export type Enclosure = {
@@ -527,6 +570,34 @@ export type FindTarget = {
 
 export type Health = {
   status: "ok";
+};
+
+export type HitCircuit = {
+  circuit: string;
+  /** down, or single: up while another of its protection group has a whole path */
+  state: "down" | "single";
+  priority: number;
+  customers_served: number;
+  /** Where the cut meets the path, in the path's order: F-1:3 for glass, else the enclosure */
+  at: Array<string>;
+  service: string | null;
+  customer: string | null;
+  protection_group: string | null;
+  /** Whether the records join all its ports; where not, only what they hold of its path was looked at */
+  whole: boolean;
+};
+
+export type ImpactAnswer = {
+  /** The working circuits whose path the cut hits, in the order to restore them */
+  circuits: Array<HitCircuit>;
+  /** The fibers of the cut cables, lit or dark, each once */
+  fibers_cut: number;
+  /** Customers of the circuits that are down, of a protection group the most */
+  customers_down: number;
+  /** The last posting that the answer takes in */
+  posting: number;
+  /** The cut sections, by cable and along it; only with fibers=yes */
+  sheath?: Array<CutSection>;
 };
 
 export type Joint = {
@@ -1113,6 +1184,52 @@ export type Structure = {
 };
 
 export type StructureKind = "pole" | "handhole" | "manhole" | "vault" | "pedestal" | "cabinet" | "hut" | "building" | "point";
+
+export type Suspect = {
+  /** The likeliest span, where there is any */
+  span?: string;
+  /** The likeliest enclosure, where there is no span */
+  enclosure?: string;
+  /** All spans, in order along the route */
+  spans: Array<string>;
+  /** All enclosures, in order along the route */
+  enclosures: Array<string>;
+  /** The length of the spans together */
+  route_m: number;
+  /** Circuits that are down and lie on it */
+  explains: number;
+  /** Circuits that are up although they lie on it */
+  contradicts: number;
+  /** The natural logarithm of its odds; how it is reckoned stands in docs/SUSPECTS.md */
+  score: number;
+  /** cut (glass is broken), crossed (joints made wrongly where an enclosure was opened lately), end (equipment, jumper or drop behind a port) */
+  kind: "cut" | "crossed" | "end";
+  /** The tubes that it means, F-1/7; none where it means whole sheaths */
+  tubes: Array<string>;
+  /** The ports behind which it lies */
+  ports: Array<string>;
+  /** The circuits that it explains */
+  explained: Array<string>;
+  /** The circuits that contradict it */
+  contradicted: Array<string>;
+  /** Joints of trust unknown or reported on the paths of the explained circuits, the first few */
+  rests_on: Array<DoubtfulJoint>;
+};
+
+export type SuspectsAnswer = {
+  /** Best first, the best hundred and those taken together */
+  suspects: Array<Suspect>;
+  /** How many suspects there are */
+  total: number;
+  /** The suspects that explain most when taken together */
+  together: {
+    /** Their places in the list, from 0 */
+    suspects: Array<number>;
+    score: number;
+  };
+  /** The last posting that the answer takes in */
+  posting: number;
+};
 
 export type ThroughElement = {
   kind: "through";

@@ -1,5 +1,6 @@
 package spanwright.answers;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -21,6 +22,9 @@ public final class References {
 
     private static final Pattern PORT = Pattern.compile("([^\\s,/:]+)/([^\\s,/:]+)/([0-9]{1,7})");
     private static final Pattern FIBER = Pattern.compile("([^\\s,/:]+):([0-9]{1,7})");
+
+    /** The parameter that names what is cut. */
+    static final String CUT = "cut";
 
     private final Records records;
 
@@ -73,6 +77,60 @@ public final class References {
                 code,
                 "circuit",
                 records.circuits().list().map(Circuit::code));
+    }
+
+    /** A span that is cut. */
+    Span cutSpan(String code) {
+        return named(
+                records.spans().find(code),
+                "span",
+                code,
+                CUT,
+                records.spans().list().map(Span::code));
+    }
+
+    /** A structure that is cut. */
+    Structure cutStructure(String code) {
+        return named(
+                records.structures().find(code),
+                "structure",
+                code,
+                CUT,
+                records.structures().list().map(Structure::code));
+    }
+
+    /** An enclosure that is cut. */
+    Enclosure cutEnclosure(String code) {
+        return named(
+                records.enclosures().find(code),
+                "enclosure",
+                code,
+                CUT,
+                records.enclosures().list().map(Enclosure::code));
+    }
+
+    /** A cable that is cut. */
+    Cable cutCable(String code) {
+        return named(records.cables().find(code), "cable", code, CUT, cableCodes());
+    }
+
+    /** An enclosure that was opened. */
+    Enclosure openedEnclosure(String code) {
+        return named(
+                records.enclosures().find(code),
+                "enclosure",
+                code,
+                "opened",
+                records.enclosures().list().map(Enclosure::code));
+    }
+
+    /** The cable with a code, or all reels of the longer cable with that name. */
+    List<Cable> cutCables(String name) {
+        List<Cable> reels = records.cables()
+                .list()
+                .filter(cable -> name.equals(cable.code()) || name.equals(cable.partOf()))
+                .toList();
+        return reels.isEmpty() ? List.of(cutCable(name)) : reels;
     }
 
     /** The key of the front of a port written {@code E1/P/1}. */

@@ -2,6 +2,7 @@ package spanwright.answers;
 
 import java.time.DateTimeException;
 import java.time.Instant;
+import java.time.LocalDate;
 import java.time.ZoneId;
 import java.time.ZoneOffset;
 import java.time.format.DateTimeFormatter;
@@ -26,6 +27,7 @@ public final class View {
 
     private final Snapshot snapshot;
     private final @Nullable String job;
+    private final @Nullable LocalDate day;
     private final EndNames names;
     private final Catalogue catalogue;
     private final FiberUses uses;
@@ -39,8 +41,18 @@ public final class View {
      * @param job the planned job that is built in it, or null
      */
     public View(Snapshot snapshot, @Nullable String job) {
+        this(snapshot, job, null);
+    }
+
+    /**
+     * A view of the past.
+     *
+     * @param day the day as of which it is, or null for today
+     */
+    View(Snapshot snapshot, @Nullable String job, @Nullable LocalDate day) {
         this.snapshot = snapshot;
         this.job = job;
+        this.day = day;
         this.names = new EndNames(snapshot.records());
         this.catalogue = new Catalogue(snapshot.records());
         this.uses = new FiberUses(snapshot);
@@ -111,6 +123,11 @@ public final class View {
     /** The records' own zone. */
     public ZoneId zone() {
         return zone(records());
+    }
+
+    /** The day as of which it is, in the records' own zone. */
+    public LocalDate day() {
+        return day == null ? LocalDate.now(zone()) : day;
     }
 
     /** The zone that records name; UTC where they name none. */

@@ -47,7 +47,15 @@ public final class Views {
      */
     public View of(@Nullable String asOf, @Nullable String asIf) {
         Snapshot snapshot = asOf == null ? ledger.current() : asOf(asOf.strip());
-        return asIf == null ? new View(snapshot, null) : new View(asIf(snapshot, asIf), asIf);
+        LocalDate day = asOf == null ? null : day(snapshot);
+        return new View(asIf == null ? snapshot : asIf(snapshot, asIf), asIf, day);
+    }
+
+    /** The day of the last posting in a past state. */
+    private @Nullable LocalDate day(Snapshot past) {
+        return ledger.findPosting(past.records().posting())
+                .map(posting -> posting.at().atZone(View.zone(past.records())).toLocalDate())
+                .orElse(null);
     }
 
     private Snapshot asOf(String asked) {

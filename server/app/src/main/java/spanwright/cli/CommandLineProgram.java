@@ -46,11 +46,15 @@ public final class CommandLineProgram implements Runnable {
         line.addSubcommand(new LoadCommand(program));
         line.addSubcommand(new TraceCommand(program));
         line.addSubcommand(new FaultCommand(program));
+        line.addSubcommand(new ImpactCommand(program));
+        line.addSubcommand(new SuspectsCommand(program));
         line.addSubcommand(new CheckCommand(program));
         line.addSubcommand(new ExportCommand(program));
         line.addSubcommand(new ServeCommand(program));
         line.addSubcommand(new DemoCommand(program));
         line.getSubcommands().values().forEach(command -> command.setUsageHelpWidth(100));
+        // A command that takes a file of codes reads it itself.
+        line.setExpandAtFiles(false);
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setOut(out).setErr(err);
         line.getCommandSpec()

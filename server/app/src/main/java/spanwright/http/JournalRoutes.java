@@ -1,11 +1,6 @@
 package spanwright.http;
 
 import io.javalin.http.Context;
-import java.io.IOException;
-import java.io.InputStream;
-import java.util.List;
-import java.util.Locale;
-import org.jspecify.annotations.Nullable;
 import spanwright.answers.Json;
 import spanwright.answers.PostingDocuments;
 import spanwright.answers.View;
@@ -58,10 +53,7 @@ final class JournalRoutes {
     void post(Context ctx) {
         guard.checkPosting(ctx);
         new Question(ctx);
-        if (!isJson(ctx.contentType())) {
-            throw new ProblemException(Problem.unsupported("A posting is sent as application/json."));
-        }
-        PostingBody body = PostingBody.read(body(ctx));
+        PostingBody body = PostingBody.read(SentBody.read(ctx, largestBody, "A posting", "post it in parts"));
         Result result = desk.post(body.by(), body.reason(), body.changes());
         if (result instanceof Result.Refused refused) {
             throw new ProblemException(Problem.refused(refused.faults().stream()
@@ -71,26 +63,5 @@ final class JournalRoutes {
         Posting posting = ((Result.Posted) result).posting();
         ctx.status(201).header("Location", "/postings/" + posting.number());
         Answering.json(ctx, Json.bytes(json -> documents.one(json, posting, 0, FIRST_CHANGES)));
-    }
-
-    private static boolean isJson(@Nullable String type) {
-        return type != null
-                && List.of(type.toLowerCase(Locale.ROOT).split(";"))
-                        .get(0)
-                        .strip()
-                        .equals("application/json");
-    }
-
-    private byte[] body(Context ctx) {
-        try (InputStream in = ctx.req().getInputStream()) {
-            byte[] body = in.readNBytes(largestBody + 1);
-            if (body.length > largestBody) {
-                throw new ProblemException(
-                        Problem.tooLarge("A posting is " + largestBody + " bytes long at most; post it in parts."));
-            }
-            return body;
-        } catch (IOException broken) {
-            throw new ProblemException(Problem.badRequest("The body ended before its end.", null));
-        }
     }
 }

@@ -55,6 +55,18 @@ final class Question {
         return ctx.queryParams(name);
     }
 
+    /** Whether a wish is given as {@code yes}; {@code no} and not given are the same. */
+    boolean yes(String name) {
+        String value = text(name);
+        if (value == null || value.equals("no")) {
+            return false;
+        }
+        if (value.equals("yes")) {
+            return true;
+        }
+        throw wrong(name, name + " is yes or no, not '" + value + "'.");
+    }
+
     /** A text that must be given and may not be blank, of so many characters at most. */
     String needed(String name, int longest) {
         String value = text(name);

@@ -34,6 +34,8 @@ final class Routing {
         get("/circuits/{code}", plant::circuit);
         get("/trace", new TraceRoute(answering)::trace);
         get("/fault", new FaultRoute(answering)::fault);
+        routes.post("/suspects", timed.apply(new SuspectsRoute(answering, guard)::suspects));
+        get("/impact", new ImpactRoute(answering)::impact);
         JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
         get("/postings", journal::list);
         // A posting is never stopped half way: who sent it would not know whether it was kept.

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import java.net.URLEncoder;
+import java.net.http.HttpResponse;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
@@ -97,6 +98,84 @@ class RoutesTest {
                 .list()
                 .forEach(cable ->
                         trace("fiber", names.fiber(cable.id(), 1) + "&wavelength=1550&budget=B%2B&margin=0.5"));
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {31, 32, 33, 34})
+    void every_cut_is_answered_as_described(long seed) {
+        Records records = server.plant(seed).current().records();
+        records.spans().list().forEach(span -> cut("span:" + span.code()));
+        records.structures().list().forEach(structure -> cut("structure:" + structure.code()));
+        records.enclosures().list().forEach(enclosure -> cut("enclosure:" + enclosure.code()));
+        records.cables().list().forEach(cable -> {
+            cut("cable:" + cable.code() + "&cut=tube:" + cable.code() + "/1");
+            cut("place:" + cable.code() + "@0");
+        });
+    }
+
+    @ParameterizedTest
+    @ValueSource(longs = {41, 42, 43})
+    void every_circuit_that_is_down_has_its_suspects(long seed) {
+        Records records = server.plant(seed).current().records();
+        records.circuits().list().forEach(circuit -> {
+            JsonNode answer = OPEN_API.check(
+                    "POST", "/suspects", post("{\"down\":[\"" + circuit.code() + "\"],\"by_path\":true}"));
+            assertThat(answer.path("suspects").isArray()).isTrue();
+        });
+    }
+
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "{}",
+                "[]",
+                "{\"down\":[]}",
+                "{\"down\":[\"no-such\"]}",
+                "{\"down\":\"C-1\"}",
+                "{\"down\":[1]}",
+                "{\"down\":[\"C-1\"],\"by_path\":1}",
+                "{\"down\":[\"C-1\"],\"left\":[]}",
+                "{\"down\":[\"C-1\"],\"up\":[\"C-1\"]}",
+                "{"
+            })
+    void alarms_that_cannot_be_are_refused(String body) {
+        server.plant(31);
+        var answer = post(body);
+
+        assertThat(answer.statusCode()).isIn(400, 404);
+        OPEN_API.check("POST", "/suspects", answer);
+    }
+
+    private HttpResponse<byte[]> post(String body) {
+        return server.asking().post("/suspects", body, "Content-Type", "application/json");
+    }
+
+    private void cut(String what) {
+        assertThat(get("/impact", "/impact?cut=" + what).has("sheath")).isFalse();
+        JsonNode sheath = get("/impact", "/impact?fibers=yes&cut=" + what).path("sheath");
+        assertThat(sheath.isArray()).isTrue();
+    }
+
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "",
+                "?cut=span",
+                "?cut=span:no-such",
+                "?cut=tube:F-1",
+                "?cut=tube:F-1/999",
+                "?cut=place:F-1@-1",
+                "?cut=place:F-1@9999999",
+                "?cut=pole:H-1",
+                "?cut=span:no-such&fibers=maybe"
+            })
+    void a_cut_of_nothing_is_refused(String asked) {
+        server.plant(31);
+        var answer = server.asking().get("/impact" + asked);
+
+        assertThat(answer.statusCode()).isIn(400, 404);
+        assertThat(OPEN_API.check("GET", "/impact", answer).path("parameter").asText())
+                .isIn("cut", "fibers");
     }
 
     /** A random plant may lack a value for some glass or splitter; then that is what is answered. */

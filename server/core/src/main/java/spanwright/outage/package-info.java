@@ -1,5 +1,6 @@
 /**
- * What an outage asks of the records: where a distance read on an OTDR lies, and light another way meanwhile.
+ * What an outage asks of the records: where a distance read on an OTDR lies, what is down, what may be the cause, and
+ * light another way meanwhile.
  *
  * <p>Invariants:
  *
@@ -13,6 +14,9 @@
  *   <li>A place is on a span, or at one structure: in a coil, in tray glass or at a joint, in a jumper.
  *   <li>What cannot be placed is a sentence, never a guess.
  *   <li>The window is twice the root of the summed squares of its causes, and each cause can be read.
+ *   <li>A circuit's path is the one that a trace of the circuit gives, incomplete ones too.
+ *   <li>A circuit on several fibers is hit when any of its paths is.
+ *   <li>A circuit of a protection group is down only where no other working one of its group has a whole path left.
  * </ol>
  */
 @NullMarked
