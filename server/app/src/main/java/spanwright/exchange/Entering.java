@@ -9,6 +9,7 @@ import spanwright.network.SnapshotEditor;
 import spanwright.plant.RunRow;
 import spanwright.records.RecordsView;
 import spanwright.records.Refusal;
+import spanwright.splicing.Joint;
 
 /** Enters the records of one folder into an editor, and turns what refuses them into faults with their lines. */
 final class Entering {
@@ -61,6 +62,18 @@ final class Entering {
         return apply(table, line, Change.add(record));
     }
 
+    /**
+     * Adds a range of joints whose rows stand on a line each, from one line on; false where any of it is refused,
+     * which is not reported, and then none of it is added.
+     */
+    boolean addFolded(Joint range, int firstLine) {
+        if (!editor.apply(Change.add(range)).isEmpty()) {
+            return false;
+        }
+        lines.noteFolded(range, firstLine);
+        return true;
+    }
+
     /** Applies a change that a line makes; false where it is refused, which is then reported. */
     boolean apply(Table table, int line, Change change) {
         List<Refusal> refusals = editor.apply(change);
@@ -93,11 +106,13 @@ final class Entering {
     /** What is wrong, and where the earlier row stands that it clashes with. */
     String sentence(Refusal refusal) {
         Recorded earlier = refusal.earlier();
-        return earlier == null ? refusal.sentence() : refusal.sentence() + " (" + where(earlier) + ")";
+        return earlier == null
+                ? refusal.sentence()
+                : refusal.sentence() + " (" + where(earlier, refusal.record()) + ")";
     }
 
-    private String where(Recorded earlier) {
-        int line = lines.of(earlier);
+    private String where(Recorded earlier, @Nullable Recorded refused) {
+        int line = lines.of(earlier, refused);
         Table table = Lines.table(earlier);
         return line == 0 || table == null
                 ? "it is in the records file already"

@@ -39,6 +39,14 @@ final class Formats {
         return new PlanningValueRows(refs);
     }
 
+    SpliceRows splices() {
+        return new SpliceRows(refs, ends);
+    }
+
+    TerminationRows terminations() {
+        return new TerminationRows(refs, ends, ports);
+    }
+
     /**
      * The rows of a table of which each is a record.
      *
@@ -57,9 +65,9 @@ final class Formats {
             case ENCLOSURES -> new EnclosureRows(refs);
             case ENCLOSURE_CABLES -> new PassRows(refs);
             case SPLITTERS -> new SplitterRows(refs);
-            case SPLICES -> new SpliceRows(refs, ends);
+            case SPLICES -> splices();
             case PANELS -> new PanelRows(refs);
-            case TERMINATIONS -> new TerminationRows(refs, ends, ports);
+            case TERMINATIONS -> terminations();
             case END_STATES -> new EndStateRows(refs, ends);
             case JUMPERS -> new JumperRows(refs, ends, ports);
             case MEASUREMENTS -> new MeasurementRows(refs, ends, ports);

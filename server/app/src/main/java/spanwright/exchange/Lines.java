@@ -1,13 +1,16 @@
 package spanwright.exchange;
 
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.HashMap;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
 import spanwright.records.RecordsView;
+import spanwright.splicing.EndRange;
 import spanwright.splicing.Joint;
+import spanwright.splicing.Leg;
 
 /** Remembers on which line each record of the folder stands. */
 final class Lines {
@@ -15,6 +18,8 @@ final class Lines {
     private final int[] firstIdentity;
     private final int[][] lines;
     private final Map<String, Integer> replaced = new HashMap<>();
+    /** The joints, by how far they lie above the first of the folder, that stand on a line for each end. */
+    private final BitSet folded = new BitSet();
 
     Lines(RecordsView view) {
         RecordKind[] kinds = RecordKind.values();
@@ -55,6 +60,43 @@ final class Lines {
         int kind = record.kind().ordinal();
         int index = record.id() - firstIdentity[kind];
         return index < lines[kind].length ? lines[kind][index] : 0;
+    }
+
+    /** Notes a new range of joints whose rows stand on a line each, from one line on. */
+    void noteFolded(Joint range, int firstLine) {
+        note(range, firstLine);
+        folded.set(range.id() - firstIdentity[RecordKind.JOINT.ordinal()]);
+    }
+
+    /** The line of a record of this folder where another clashes with it; 0 where it is not of this folder. */
+    int of(Recorded record, @Nullable Recorded other) {
+        int line = of(record);
+        return line != 0 && record instanceof Joint range && other instanceof Joint joint && isFolded(range)
+                ? line + firstShared(range, joint)
+                : line;
+    }
+
+    private boolean isFolded(Joint range) {
+        return !before(range) && folded.get(range.id() - firstIdentity[RecordKind.JOINT.ordinal()]);
+    }
+
+    /** The first index of a range whose ends another joint names as well; 0 where it names none. */
+    private static int firstShared(Joint range, Joint joint) {
+        for (int index = 0; index < range.count(); index++) {
+            if (names(joint, range.a(), index) || names(joint, range.b(), index)) {
+                return index;
+            }
+        }
+        return 0;
+    }
+
+    private static boolean names(Joint joint, EndRange side, int index) {
+        int number = side.numbers().at(index);
+        return names(joint.a(), side.leg(), number) || names(joint.b(), side.leg(), number);
+    }
+
+    private static boolean names(EndRange ends, Leg leg, int number) {
+        return ends.leg().equals(leg) && ends.numbers().contains(number);
     }
 
     /** The table in which a record stands, or null for a feature of the base map. */

@@ -31,6 +31,8 @@ final class Tables {
             case COLOR_CODES -> new ColorCodeLoad(entering);
             case CABLE_RUNS -> new RunLoad(entering, formats.runRows());
             case SPLITTER_OUTPUTS -> new TapLoad(entering);
+            case SPLICES -> new JointLoad(entering, formats.splices());
+            case TERMINATIONS -> new JointLoad(entering, formats.terminations());
             default -> plain(formats.of(table));
         };
     }
