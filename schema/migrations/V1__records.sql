@@ -314,7 +314,8 @@ CREATE TABLE base_feature (
     geometry BLOB NOT NULL -- WKB in lon lat
 ) STRICT;
 
--- One more than the largest identity ever given to a record of a table, records removed since included.
+-- One more than the largest identity of a record that was removed from a table: with those that are there it says
+-- which identities have been given. A posting that removes nothing leaves it as it is.
 CREATE TABLE next_identity (
     of_table TEXT PRIMARY KEY,
     id INTEGER NOT NULL
@@ -327,11 +328,14 @@ CREATE TABLE posting (
     posted_by TEXT NOT NULL,
     reason TEXT NOT NULL,
     changes INTEGER NOT NULL,
-    hash BLOB NOT NULL -- SHA-256 over the hash before, this head and its pages: names the whole history
+    hash BLOB NOT NULL, -- SHA-256 over the hash before, this head and its pages: names the whole history
+    of_table TEXT, -- of a small posting its only page, else nothing
+    rows BLOB,
+    CHECK ((of_table IS NULL) = (rows IS NULL))
 ) STRICT;
 
--- What each posting changed, in order: pages of rows of one table, each before and after. A page names its own
--- columns, so that it can be read whatever becomes of the tables above.
+-- What each posting changed, in order, but for a small posting's only page: pages of rows of one table, each before
+-- and after. A page names its own columns, so that it can be read whatever becomes of the tables above.
 CREATE TABLE posting_page (
     posting INTEGER NOT NULL REFERENCES posting DEFERRABLE INITIALLY DEFERRED,
     page INTEGER NOT NULL,

@@ -14,10 +14,18 @@ import spanwright.journal.Change;
 import spanwright.journal.Posting;
 import spanwright.sqlite.rows.ChangePacker;
 
-/** Reads the journal. Safe for any number of threads. */
+/**
+ * Reads the journal. Safe for any number of threads.
+ *
+ * <p>What people ask of it now and then goes through Jdbi, for the named parameters and the mapping. Pages of changes,
+ * as all that is written, go by plain JDBC: there may be thousands, and they are read within a caller's transaction.
+ */
 final class Journal {
 
     private static final String HEAD = "SELECT number, posted_at, posted_by, reason, changes FROM posting ";
+    private static final String SMALL =
+            "SELECT of_table, rows FROM posting WHERE number = ? AND of_table IS NOT NULL";
+    private static final String PAGES = "SELECT of_table, rows FROM posting_page WHERE posting = ? ORDER BY page";
     private static final RowMapper<Posting> POSTING = (row, context) -> posting(row);
 
     private final Readers readers;
@@ -74,9 +82,13 @@ final class Journal {
     }
 
     static List<Change> changes(Connection connection, int posting) throws SQLException {
+        List<Change> small = unpack(connection, SMALL, posting);
+        return small.isEmpty() ? unpack(connection, PAGES, posting) : small;
+    }
+
+    private static List<Change> unpack(Connection connection, String question, int posting) throws SQLException {
         List<Change> changes = new ArrayList<>();
-        try (PreparedStatement pages = connection.prepareStatement(
-                "SELECT of_table, rows FROM posting_page WHERE posting = ? ORDER BY page")) {
+        try (PreparedStatement pages = connection.prepareStatement(question)) {
             pages.setInt(1, posting);
             try (ResultSet rows = pages.executeQuery()) {
                 while (rows.next()) {

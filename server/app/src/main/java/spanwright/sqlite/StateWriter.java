@@ -126,12 +126,15 @@ final class StateWriter {
                 && joint.b().equals(twin.b());
     }
 
+    /** Keeps the identities that a table forgets: without a removal its largest says as much. */
     private void writeIdentities(List<Change> changes) throws SQLException {
-        Map<RecordKind, Integer> highest = new EnumMap<>(RecordKind.class);
+        Map<RecordKind, Integer> removed = new EnumMap<>(RecordKind.class);
         for (Change change : changes) {
-            highest.merge(change.kind(), change.id() + 1, Math::max);
+            if (change.after() == null) {
+                removed.merge(change.kind(), change.id() + 1, Math::max);
+            }
         }
-        for (Map.Entry<RecordKind, Integer> entry : highest.entrySet()) {
+        for (Map.Entry<RecordKind, Integer> entry : removed.entrySet()) {
             if (entry.getValue() > nextIdentities.getOrDefault(entry.getKey(), 0)) {
                 nextIdentities.put(entry.getKey(), entry.getValue());
                 nextIdentity.setString(1, Layouts.of(entry.getKey()).table());

@@ -29,10 +29,13 @@ final class Store implements AutoCloseable {
      */
     void commit(List<Draft> drafts) {
         try {
-            if (exists(file)) {
+            if (connection == null && !exists(file)) {
+                make(drafts);
+            } else if (file.toFile().exists()) {
                 append(drafts);
             } else {
-                make(drafts);
+                // Not made anew: what stood in it would be gone.
+                throw new IOException(file + " is there no longer");
             }
         } catch (SQLException fault) {
             throw new StorageFault(fault);

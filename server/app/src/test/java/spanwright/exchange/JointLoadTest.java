@@ -35,6 +35,8 @@ class JointLoadTest {
     @TempDir
     private Path temp;
 
+    private SnapshotEditor editor = Snapshot.empty().edit();
+
     static LongStream seeds() {
         return LongStream.rangeClosed(1, 40);
     }
@@ -118,8 +120,6 @@ class JointLoadTest {
                 ends.leg(),
                 new FiberRange(ends.numbers().at(first), ends.numbers().at(last)));
     }
-
-    private SnapshotEditor editor;
 
     private List<String> load(String... splices) throws IOException {
         try (Stream<Path> files = Files.list(SMALL)) {

@@ -12,9 +12,13 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import spanwright.journal.Change;
 import spanwright.journal.Posting;
+import spanwright.journal.RecordKind;
+import spanwright.network.RandomPostings;
 import spanwright.network.RecordsText;
 import spanwright.network.SetClock;
+import spanwright.plant.Setting;
 
 /** Invariant 3 of the package: the journal makes the state again. */
 class JournalReplayTest {
@@ -75,5 +79,57 @@ class JournalReplayTest {
         }
 
         assertThat(hashes(one)).hasSize(2).doesNotContainAnyElementsOf(hashes(other));
+    }
+
+    @Test
+    void a_small_posting_is_one_row_of_the_journal_and_a_larger_one_has_pages() throws SQLException {
+        Path file = folder.resolve("plant");
+        try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+            Ledgers.post(ledger, Ledgers.setting("a", "1"));
+            Ledgers.post(ledger, Ledgers.setting("b", "x".repeat(2_000)));
+            Ledgers.post(ledger, new RandomPostings(5).foundation());
+
+            assertThat(ledger.changesOf(1)).hasSize(1);
+            assertThat(ledger.changesOf(2)).hasSize(1);
+            assertThat(ledger.changesOf(3))
+                    .hasSize(ledger.findPosting(3).orElseThrow().changes());
+        }
+        try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
+            assertThat(Ledgers.rows(
+                            connection,
+                            "SELECT number, of_table, (SELECT count(*) > 0 FROM posting_page WHERE posting = number)"
+                                    + " FROM posting ORDER BY number"))
+                    .containsExactly("1|setting|0", "2|null|1", "3|null|1");
+        }
+    }
+
+    @Test
+    void no_identity_is_given_twice_whether_its_record_is_there_or_was_removed() throws SQLException {
+        Path file = folder.resolve("plant");
+        try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+            Ledgers.post(ledger, Ledgers.setting("a", "1"));
+            Ledgers.post(ledger, Ledgers.setting("b", "2"));
+        }
+        assertThat(identities(file)).as("none is removed").isEmpty();
+        assertThat(nextAfterReading(file)).isEqualTo(3);
+        try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+            Setting last = ledger.current().records().settings().get(2);
+            Ledgers.post(ledger, editor -> editor.apply(Change.remove(last)));
+        }
+        assertThat(identities(file)).containsExactly("setting|3");
+        assertThat(nextAfterReading(file)).isEqualTo(3);
+    }
+
+    private static List<String> identities(Path file) throws SQLException {
+        try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
+            return Ledgers.rows(connection, "SELECT of_table, id FROM next_identity");
+        }
+    }
+
+    /** The next identity of a setting, as the tables alone tell it. */
+    private static int nextAfterReading(Path file) throws SQLException {
+        try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
+            return StateReader.read(connection, 1).records().limit(RecordKind.SETTING);
+        }
     }
 }

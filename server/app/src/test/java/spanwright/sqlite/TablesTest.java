@@ -127,7 +127,7 @@ class TablesTest {
         run("INSERT INTO joined_end VALUES (100, 200, 1), (200, 100, 1)");
         run("INSERT INTO planned_end VALUES ('J', 100, 200, 2), ('J', 200, 100, 2)");
         run("INSERT INTO front_use VALUES (500, 1, 0), (501, 0, 1)");
-        run("INSERT INTO posting VALUES (1, '2026-03-31T14:05:00.000000Z', 'Ana', 'as built', 1, x'00')");
+        run("INSERT INTO posting VALUES (1, '2026-03-31T14:05:00.000000Z', 'Ana', 'as built', 1, x'00', NULL, NULL)");
         connection.commit();
     }
 
@@ -152,7 +152,8 @@ class TablesTest {
                 "a second jumper on a front | UPDATE front_use SET jumpers = 2 WHERE end_key = 500",
                 "a circuit on a front with a jumper | UPDATE front_use SET circuit_ends = 1 WHERE end_key = 500",
                 "a jumper on a front with a circuit | UPDATE front_use SET jumpers = 1 WHERE end_key = 501",
-                "a posting's number twice | INSERT INTO posting VALUES (1, 'x', 'x', 'x', 0, x'00')",
+                "a posting's number twice | INSERT INTO posting VALUES (1, 'x', 'x', 'x', 0, x'00', NULL, NULL)",
+                "a small posting's page of no table | INSERT INTO posting VALUES (2, 'x', 'x', 'x', 0, x'00', NULL, x'00')",
                 "a splitter with three inputs | INSERT INTO splitter VALUES (2, 1, 'S2', 3, 4, NULL, '')",
                 "text where a number belongs | INSERT INTO panel VALUES (2, 1, 'Q', 'twelve', 'SC/APC')",
                 "a side that is none | INSERT INTO joint VALUES (1, 'splice', 1, 'up', 1, 1, 1, 'back', 1, 2, 2, NULL, NULL, NULL, 'posted', NULL, NULL, NULL, NULL, NULL, NULL)",

@@ -70,6 +70,22 @@ class WritingFaultsTest {
     }
 
     @Test
+    void a_file_taken_away_is_not_made_anew_from_the_middle_of_its_journal() throws IOException {
+        Path file = folder.resolve("plant");
+        try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+            Ledgers.post(ledger, Ledgers.setting("a", "1"));
+            Ledgers.post(ledger, Ledgers.setting("b", "2"));
+            Files.move(file, folder.resolve("elsewhere"));
+
+            Outcome lost = ledger.post("Ana", "as built", Ledgers.setting("c", "3"));
+            assertThat(refusal(lost)).isEqualTo("records-unwritable");
+            assertThat(((Outcome.Refused) lost).refusals().get(0).sentence()).contains("is there no longer");
+            assertThat(file).doesNotExist();
+            assertThat(ledger.current().records().posting()).isEqualTo(2);
+        }
+    }
+
+    @Test
     void a_full_disk_keeps_nothing_and_says_so() throws SQLException {
         Path file = folder.resolve("plant");
         AtomicReference<Tip> published = new AtomicReference<>(Tip.NONE);

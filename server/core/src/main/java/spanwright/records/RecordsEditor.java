@@ -40,7 +40,12 @@ public final class RecordsEditor extends RecordsView {
     }
 
     private static <A, B> List<B> each(List<A> list, Function<A, B> how) {
-        return new ArrayList<>(list.stream().map(how).toList());
+        // Plain loops: each posting makes and builds these lists.
+        List<B> made = new ArrayList<>(list.size());
+        for (A one : list) {
+            made.add(how.apply(one));
+        }
+        return made;
     }
 
     /** Gives the next identity of a kind, never given before. */

@@ -19,6 +19,7 @@ public final class ChangePacker {
     private static final int BEFORE = 3;
     private static final int AFTER = 4;
     private static final Column CHANGE = new Column("change", ColumnType.INTEGER);
+    private static final List<Head> HEADS = Layouts.all().stream().map(Head::new).toList();
 
     /** One page: packed rows of one table, headed by their columns. */
     public static final class Page {
@@ -43,31 +44,45 @@ public final class ChangePacker {
         }
     }
 
+    /** What the pages of one table have in common: its columns, the sort of change before them. */
+    private static final class Head {
+
+        final Layout layout;
+        final List<Column> columns;
+        /** The columns as a page begins with them. */
+        final byte[] packed;
+
+        Head(Layout layout) {
+            this.layout = layout;
+            this.columns = Stream.concat(Stream.of(CHANGE), layout.columns().stream())
+                    .toList();
+            ByteWriter bytes = new ByteWriter(512);
+            PackedWriter.writeColumns(columns, bytes);
+            this.packed = bytes.copy();
+        }
+    }
+
     private ChangePacker() {}
 
     /** Packs changes in order, and gives each page as it is full. */
     public static void pack(List<Change> changes, Consumer<Page> pages) {
         int from = 0;
         while (from < changes.size()) {
-            Layout layout = Layouts.of(changes.get(from).kind());
-            List<Column> columns = columns(layout);
+            Head head = HEADS.get(changes.get(from).kind().ordinal());
+            Layout layout = head.layout;
             ByteWriter rows = new ByteWriter(1024);
-            PackedWriter writer = new PackedWriter(columns, rows);
+            PackedWriter writer = new PackedWriter(head.columns, rows);
             int at = from;
             while (at < changes.size() && changes.get(at).kind() == layout.kind() && rows.size() < FULL) {
                 pack(changes.get(at++), layout, writer);
             }
-            ByteWriter page = new ByteWriter(rows.size() + 512);
-            PackedWriter.writeColumns(columns, page);
+            ByteWriter page = new ByteWriter(rows.size() + head.packed.length + 16);
+            page.raw(head.packed, 0, head.packed.length);
             page.varint(writer.rows());
             page.raw(rows.array(), 0, rows.size());
             pages.accept(new Page(layout.table(), page.copy()));
             from = at;
         }
-    }
-
-    private static List<Column> columns(Layout layout) {
-        return Stream.concat(Stream.of(CHANGE), layout.columns().stream()).toList();
     }
 
     private static void pack(Change change, Layout layout, PackedWriter writer) {
@@ -93,7 +108,7 @@ public final class ChangePacker {
         ByteReader in = new ByteReader(page.rows(), 0);
         List<Column> packed = PackedReader.columns(in);
         int rows = in.count();
-        PackedReader reader = new PackedReader(packed, columns(layout), in);
+        PackedReader reader = new PackedReader(packed, HEADS.get(layout.kind().ordinal()).columns, in);
         List<Change> changes = new ArrayList<>();
         Recorded before = null;
         for (int row = 0; row < rows; row++) {
