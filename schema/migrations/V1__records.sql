@@ -195,14 +195,13 @@ CREATE TABLE joint (
 CREATE INDEX joint_in_enclosure ON joint (enclosure);
 
 -- Both ends of every single joint in the glass: its primary key is what lets an end be joined once, whichever side
--- of a joint it stands on. A key holds the leg's side (back 0, ahead 1, in 2, out 3, rear 4, front 5) in bits 56
--- to 58, the leg in bits 24 to 55, the number in bits 0 to 23. The joint is not declared a reference: that would
--- need an index as large as the table, and both are written from the same record.
+-- of a joint it stands on, and never to itself. A key holds the leg's side (back 0, ahead 1, in 2, out 3, rear 4,
+-- front 5) in bits 56 to 58, the leg in bits 24 to 55, the number in bits 0 to 23. To what an end is joined the joint
+-- says. It is not declared a reference: that would need an index as large as the table, and both are written from the
+-- same record.
 CREATE TABLE joined_end (
     end_key INTEGER PRIMARY KEY,
-    peer_key INTEGER NOT NULL,
-    joint INTEGER NOT NULL,
-    CHECK (end_key <> peer_key)
+    joint INTEGER NOT NULL
 ) STRICT;
 
 -- The same for joints that are planned only: within its job an end is used once.

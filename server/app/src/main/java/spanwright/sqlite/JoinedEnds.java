@@ -26,13 +26,13 @@ final class JoinedEnds {
     /** The longest range that one statement adds. */
     private static final int COUNTING = 1024;
 
-    private static final String ROW = "(?, ?, ?)";
+    private static final String ROW = "(?, ?)";
     private static final int[] ROWS = {64, 8, 1};
 
     private final PreparedStatement remove;
     private final PreparedStatement[] byRows = new PreparedStatement[ROWS.length];
     private final PreparedStatement byRange;
-    private final long[] waiting = new long[3 * ROWS[0]];
+    private final long[] waiting = new long[2 * ROWS[0]];
     private int rows;
 
     JoinedEnds(Connection connection) throws SQLException {
@@ -43,7 +43,7 @@ final class JoinedEnds {
         }
         count(connection);
         this.byRange = connection.prepareStatement(
-                "INSERT INTO joined_end SELECT ?1 + n, ?2 + ?3 * n, ?4 FROM temp.counting WHERE n < ?5");
+                "INSERT INTO joined_end SELECT ?1 + n, ?2 FROM temp.counting WHERE n < ?3");
     }
 
     private static void count(Connection connection) throws SQLException {
@@ -104,19 +104,16 @@ final class JoinedEnds {
     private void addRange(JointSide side) throws SQLException {
         for (int from = 0; from < side.count(); from += COUNTING) {
             byRange.setLong(1, side.key() + from);
-            byRange.setLong(2, side.peer() + (long) side.step() * from);
-            byRange.setInt(3, side.step());
-            byRange.setInt(4, side.joint());
-            byRange.setInt(5, Math.min(COUNTING, side.count() - from));
+            byRange.setInt(2, side.joint());
+            byRange.setInt(3, Math.min(COUNTING, side.count() - from));
             byRange.executeUpdate();
         }
     }
 
     private void addRows(JointSide side) throws SQLException {
         for (int index = 0; index < side.count(); index++) {
-            waiting[3 * rows] = side.key() + index;
-            waiting[3 * rows + 1] = side.peer() + (long) side.step() * index;
-            waiting[3 * rows + 2] = side.joint();
+            waiting[2 * rows] = side.key() + index;
+            waiting[2 * rows + 1] = side.joint();
             if (++rows == ROWS[0]) {
                 flush();
             }
@@ -128,8 +125,8 @@ final class JoinedEnds {
         for (int index = 0; index < ROWS.length; index++) {
             while (rows - written >= ROWS[index]) {
                 PreparedStatement statement = byRows[index];
-                for (int cell = 0; cell < 3 * ROWS[index]; cell++) {
-                    statement.setLong(cell + 1, waiting[3 * written + cell]);
+                for (int cell = 0; cell < 2 * ROWS[index]; cell++) {
+                    statement.setLong(cell + 1, waiting[2 * written + cell]);
                 }
                 statement.executeUpdate();
                 written += ROWS[index];

@@ -124,7 +124,7 @@ class TablesTest {
         run("INSERT INTO splitter VALUES (1, 1, 'S1', 1, 4, NULL, '')");
         run(
                 "INSERT INTO circuit VALUES (1, 'C-1', NULL, NULL, 3, 1, '1310000', NULL, NULL, 1, 1, 1, 1, 2, 2, 'working')");
-        run("INSERT INTO joined_end VALUES (100, 200, 1), (200, 100, 1)");
+        run("INSERT INTO joined_end VALUES (100, 1), (200, 1)");
         run("INSERT INTO planned_end VALUES ('J', 100, 200, 2), ('J', 200, 100, 2)");
         run("INSERT INTO front_use VALUES (500, 1, 0), (501, 0, 1)");
         run("INSERT INTO posting VALUES (1, '2026-03-31T14:05:00.000000Z', 'Ana', 'as built', 1, x'00', NULL, NULL)");
@@ -145,9 +145,9 @@ class TablesTest {
                 "a circuit's code twice | UPDATE circuit SET id = 2; INSERT INTO circuit SELECT 1, code, service, customer, priority, customers_served, wavelengths_pm, budget, protection_group, a_panel, a_first, a_last, z_panel, z_first, z_last, status FROM circuit",
                 "a second enclosure on a run row | INSERT INTO pass VALUES (2, 2, 1, 1, '', '')",
                 "a row of a run twice | INSERT INTO run_row VALUES (3, 1, 1, 2, 1, 0, 'posted', NULL, NULL)",
-                "an end joined twice | INSERT INTO joined_end VALUES (100, 300, 2)",
-                "an end joined twice, standing on the other side | INSERT INTO joined_end VALUES (300, 200, 2), (200, 300, 2)",
-                "an end joined to itself | INSERT INTO joined_end VALUES (300, 300, 2)",
+                "an end joined twice | INSERT INTO joined_end VALUES (100, 2)",
+                "an end joined twice, standing on the other side | INSERT INTO joined_end VALUES (300, 2), (200, 2)",
+                "an end joined to itself | INSERT INTO joined_end VALUES (300, 2), (300, 2)",
                 "an end used twice within a job | INSERT INTO planned_end VALUES ('J', 200, 300, 3)",
                 "a second jumper on a front | UPDATE front_use SET jumpers = 2 WHERE end_key = 500",
                 "a circuit on a front with a jumper | UPDATE front_use SET circuit_ends = 1 WHERE end_key = 500",
