@@ -42,8 +42,8 @@ final class JoinedEnds {
                     "INSERT INTO joined_end VALUES " + ROW + (", " + ROW).repeat(ROWS[index] - 1));
         }
         count(connection);
-        this.byRange = connection.prepareStatement(
-                "INSERT INTO joined_end SELECT ?1 + n, ?2 FROM temp.counting WHERE n < ?3");
+        this.byRange =
+                connection.prepareStatement("INSERT INTO joined_end SELECT ?1 + n, ?2 FROM temp.counting WHERE n < ?3");
     }
 
     private static void count(Connection connection) throws SQLException {

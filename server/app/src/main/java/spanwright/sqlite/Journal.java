@@ -23,8 +23,7 @@ import spanwright.sqlite.rows.ChangePacker;
 final class Journal {
 
     private static final String HEAD = "SELECT number, posted_at, posted_by, reason, changes FROM posting ";
-    private static final String SMALL =
-            "SELECT of_table, rows FROM posting WHERE number = ? AND of_table IS NOT NULL";
+    private static final String SMALL = "SELECT of_table, rows FROM posting WHERE number = ? AND of_table IS NOT NULL";
     private static final String PAGES = "SELECT of_table, rows FROM posting_page WHERE posting = ? ORDER BY page";
     private static final RowMapper<Posting> POSTING = (row, context) -> posting(row);
 

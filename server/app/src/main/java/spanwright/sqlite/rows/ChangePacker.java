@@ -19,7 +19,8 @@ public final class ChangePacker {
     private static final int BEFORE = 3;
     private static final int AFTER = 4;
     private static final Column CHANGE = new Column("change", ColumnType.INTEGER);
-    private static final List<Head> HEADS = Layouts.all().stream().map(Head::new).toList();
+    private static final List<Head> HEADS =
+            Layouts.all().stream().map(Head::new).toList();
 
     /** One page: packed rows of one table, headed by their columns. */
     public static final class Page {
@@ -54,8 +55,8 @@ public final class ChangePacker {
 
         Head(Layout layout) {
             this.layout = layout;
-            this.columns = Stream.concat(Stream.of(CHANGE), layout.columns().stream())
-                    .toList();
+            this.columns =
+                    Stream.concat(Stream.of(CHANGE), layout.columns().stream()).toList();
             ByteWriter bytes = new ByteWriter(512);
             PackedWriter.writeColumns(columns, bytes);
             this.packed = bytes.copy();
