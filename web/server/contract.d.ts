@@ -637,6 +637,236 @@ export type Joint = {
   changed: PostingRef | null;
 };
 
+export type Incident = {
+  /** Its number */
+  incident: number;
+  /** What it is called */
+  title: string;
+  /** Whether it is open */
+  open: boolean;
+  /** Who opened it */
+  by: string;
+  /** When service was lost */
+  began_at: string;
+  /** When it was entered */
+  opened_at: string;
+  /** The last posting when it was opened: ask with as_of this number for the records as they stood */
+  posting: number;
+  from: {
+    /** What is believed cut */
+    cuts: Array<string>;
+    /** Circuits whose path is down from the beginning */
+    down: Array<string>;
+    /** Circuits known to be up */
+    up: Array<string>;
+    /** A reading as it was told */
+    reading: string | null;
+  };
+  clock: {
+    /** When service was lost */
+    began: string;
+    /** When somebody was told */
+    called: string | null;
+    /** When a crew was there */
+    on_site: string | null;
+    /** When the damage was found */
+    found: string | null;
+    /** When the first circuit had light again */
+    first_light: string | null;
+    /** Since when nothing is down any more */
+    all_light: string | null;
+    /** When it was closed */
+    closed: string | null;
+  };
+  /** Every entry, in the order written */
+  log: Array<IncidentEntry>;
+  /** When it was counted */
+  counted_at: string;
+  counts: {
+    /** Circuits whose path is down */
+    circuits_down: Array<string>;
+    /** Circuits that were down and are back */
+    circuits_back: Array<string>;
+    /** Customers of services that are down */
+    customers_down: number;
+    /** Circuits of priority 1 whose service is down */
+    first_priority_down: Array<string>;
+    /** Minutes that at least one service was down */
+    outage_minutes: number;
+    /** Minutes of circuits whose path is down */
+    circuit_minutes: number;
+    /** Minutes of customers of services that are down */
+    customer_minutes: number;
+    /** Minutes of users stated in the log; null where none are stated */
+    stated_user_minutes: number | null;
+    /** OC3-minutes of capacity stated in the log; null where none is stated */
+    oc3_minutes: number | null;
+    /** Protection groups that run, or ran, on a single path */
+    single_path: Array<{
+      /** The group */
+      protection_group: string;
+      /** For how many days in all */
+      days: number;
+      /** Whether it does now */
+      now: boolean;
+    }>;
+    /** How it stood whenever something changed */
+    over_time: Array<{
+      /** From when */
+      from: string;
+      /** Circuits whose path was down */
+      circuits_down: number;
+      /** Customers of services that were down */
+      customers_down: number;
+      /** Protection groups on a single path */
+      single_path: Array<string>;
+    }>;
+  };
+  /** How far each count is from its threshold */
+  thresholds: Array<ThresholdStanding>;
+  /** When each paper would be due, if the outage is one to report */
+  papers: Array<PaperDue>;
+  decision: "a person decides";
+};
+
+export type IncidentCloseRequest = {
+  /** When, with its offset */
+  at: string;
+  by: string;
+  text?: string | null;
+};
+
+export type IncidentEntry = {
+  /** In the order written */
+  number: number;
+  kind: "called" | "on_site" | "found" | "first_light" | "all_light" | "circuits_down" | "circuits_back" | "stated" | "note" | "reading" | "closed" | "reopened";
+  /** When it happened */
+  at: string;
+  /** When it was written */
+  written_at: string;
+  /** Who wrote */
+  by: string;
+  /** In words */
+  text: string | null;
+  /** The circuits that it names */
+  circuits: Array<string>;
+  /** Users that it states to be down */
+  users: number | null;
+  /** OC3 equivalents that it states to be down */
+  oc3: number | null;
+  /** The entry in whose place it stands */
+  corrects: number | null;
+  /** The entry that stands in its place; then it counts no longer */
+  corrected_by: number | null;
+};
+
+export type IncidentEntryRequest = {
+  kind: "called" | "on_site" | "found" | "first_light" | "all_light" | "circuits_down" | "circuits_back" | "stated" | "note" | "reading" | "closed" | "reopened";
+  /** When it happened, with its offset */
+  at: string;
+  by: string;
+  text?: string | null;
+  /** For circuits_down and circuits_back */
+  circuits?: Array<string>;
+  /** For stated: users down from then on */
+  users?: number | null;
+  /** For stated: OC3 equivalents down from then on */
+  oc3?: number | null;
+  /** The entry in whose place it stands */
+  corrects?: number | null;
+};
+
+export type IncidentList = {
+  /** Open first, then the last begun first */
+  incidents: Array<IncidentSummary>;
+};
+
+export type IncidentRequest = {
+  title: string;
+  by: string;
+  /** When service was lost, with its offset */
+  began_at: string;
+  /** span:, structure:, cable:, enclosure:, tube: or place: before a code */
+  cuts?: Array<string>;
+  down?: Array<string>;
+  up?: Array<string>;
+  reading?: string | null;
+};
+
+export type IncidentSummary = {
+  /** Its number */
+  incident: number;
+  /** What it is called */
+  title: string;
+  /** Whether it is open */
+  open: boolean;
+  /** Who opened it */
+  by: string;
+  /** When service was lost */
+  began_at: string;
+  /** When it was entered */
+  opened_at: string;
+  /** The last posting when it was opened: ask with as_of this number for the records as they stood */
+  posting: number;
+  /** When it was closed */
+  closed_at: string | null;
+  /** Circuits whose path is down */
+  circuits_down: number;
+  /** Customers of services that are down */
+  customers_down: number;
+};
+
+export type PaperDue = any;
+
+export type ReportingThreshold = {
+  /** The setting of the records that replaces it */
+  setting: string;
+  /** What it is about */
+  title: string;
+  /** The figure */
+  limit: number;
+  /** What it counts */
+  unit: string;
+  /** Where the figure is from */
+  source: string;
+  /** READ-P stated by the primary text, READ-S by a secondary page, MEM from memory, COMP reckoned; null where the records set it */
+  source_status: string | null;
+  /** Why the records' own setting is not used */
+  note: string | null;
+};
+
+export type TemporaryList = {
+  /** The day from which days are counted, in the records' own zone */
+  today: string;
+  /** The one longest past its day first; each is listed until it is undone */
+  temporary: Array<{
+    /** Where it is */
+    enclosure: string;
+    /** Ends on one side */
+    a: string;
+    /** Ends on the other */
+    b: string;
+    /** How many joints */
+    count: number;
+    /** fusion or mechanical; null for a jumper or a direct termination */
+    method: string | null;
+    /** Its last day */
+    until: string;
+    /** Days until then; below 0 where it is past */
+    days_left: number;
+    /** Whether that day is past */
+    lapsed: boolean;
+    /** The job it belongs to */
+    job: string | null;
+    /** When it was made */
+    spliced_on: string | null;
+    /** Who made it */
+    spliced_by: string | null;
+  }>;
+};
+
+export type ThresholdStanding = any;
+
 export type JumperElement = {
   kind: "jumper";
   /** Port */

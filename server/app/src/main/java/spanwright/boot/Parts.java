@@ -5,6 +5,7 @@ import java.net.URI;
 import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Clock;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -28,6 +29,7 @@ import spanwright.http.WebServer;
 import spanwright.journal.Posting;
 import spanwright.network.Ledger;
 import spanwright.network.Outcome;
+import spanwright.outage.IncidentDesk;
 import spanwright.records.Refusal;
 import spanwright.sqlite.Access;
 import spanwright.sqlite.Opening;
@@ -50,7 +52,7 @@ final class Parts implements Program {
         return open(records, Access.READ);
     }
 
-    private static Ledger open(Path records, Access access) {
+    private static SqliteLedger open(Path records, Access access) {
         Path folder = records.toAbsolutePath().getParent();
         if (folder != null && !Files.isDirectory(folder)) {
             throw new WrongInput("There is no folder " + folder + " for the records file; make it first.");
@@ -117,7 +119,7 @@ final class Parts implements Program {
     @Override
     public Serving serve(ServeOrder order) {
         ServerOptions options = options(order);
-        Ledger ledger = open(order.records(), Access.WRITE);
+        SqliteLedger ledger = open(order.records(), Access.WRITE);
         try {
             if (ledger.current().records().posting() == 0) {
                 throw new WrongInput("There is no records file " + order.records() + "; load a folder into it first.");
@@ -141,7 +143,7 @@ final class Parts implements Program {
     public Serving demo(Path records, @Nullable Integer port) {
         ServerOptions options =
                 options(new ServeOrder(records, LOOPBACK, port == null ? USUAL_PORT : port, null, null));
-        Ledger ledger = open(records, Access.WRITE);
+        SqliteLedger ledger = open(records, Access.WRITE);
         try {
             Api api = api(ledger, true);
             // The server is put together while the folder is read: either takes a second of a cold start.
@@ -176,9 +178,15 @@ final class Parts implements Program {
                         order.tileUrl(), order.tileAttribution() == null ? "" : order.tileAttribution()));
     }
 
-    private Api api(Ledger ledger, boolean demo) {
+    private Api api(SqliteLedger ledger, boolean demo) {
         return new Api(
-                new Views(ledger), new LastChanges(ledger), new FolderRows(), new RowDesk(ledger), version(), demo);
+                new Views(ledger),
+                new LastChanges(ledger),
+                new FolderRows(),
+                new RowDesk(ledger),
+                new IncidentDesk(ledger, ledger.incidents(), Clock.systemUTC()),
+                version(),
+                demo);
     }
 
     @Override

@@ -3,6 +3,7 @@ package spanwright.http;
 import spanwright.answers.Changes;
 import spanwright.answers.RowTexts;
 import spanwright.answers.Views;
+import spanwright.outage.IncidentDesk;
 
 /**
  * What the routes answer from.
@@ -11,7 +12,15 @@ import spanwright.answers.Views;
  * @param finder by which posting a record was last changed
  * @param rows writes records as rows
  * @param desk takes postings
+ * @param incidents the incidents of the outage desk
  * @param version version of the program
  * @param demo whether these are the records of the demo
  */
-public record Api(Views views, Changes.Finder finder, RowTexts rows, PostingDesk desk, String version, boolean demo) {}
+public record Api(
+        Views views,
+        Changes.Finder finder,
+        RowTexts rows,
+        PostingDesk desk,
+        IncidentDesk incidents,
+        String version,
+        boolean demo) {}

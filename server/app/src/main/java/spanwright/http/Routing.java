@@ -41,6 +41,13 @@ final class Routing {
         // A posting is never stopped half way: who sent it would not know whether it was kept.
         routes.post("/postings", journal::post);
         get("/postings/{id}", journal::one);
+        IncidentRoutes incidents = new IncidentRoutes(api, guard, options.largestBody());
+        get("/incidents", incidents::list);
+        routes.post("/incidents", incidents::open);
+        get("/incidents/{id}", incidents::one);
+        routes.post("/incidents/{id}/entries", incidents::write);
+        routes.post("/incidents/{id}/close", incidents::close);
+        get("/temporary", new TemporaryRoute(answering, api.incidents())::list);
         get("/openapi.json", Routing::openApi);
         get("/health", ctx -> {
             new Question(ctx);

@@ -18,8 +18,11 @@ final class FileCheck {
 
     private FileCheck() {}
 
-    /** What is wrong with a file that is there; nothing where it can be opened, perhaps after {@link Schema#bringUpToDate}. */
-    static Optional<Opening.Unopened> check(Path file, Access access) throws IOException {
+    /**
+     * What is wrong with a file that is there; nothing where it can be opened. One of an older schema can be read as it
+     * is, and is written after {@link Schema#bringUpToDate}.
+     */
+    static Optional<Opening.Unopened> check(Path file) throws IOException {
         try (Connection connection = Connections.reading(file)) {
             long application = pragma(connection, "application_id");
             long schema = pragma(connection, "user_version");
@@ -32,13 +35,6 @@ final class FileCheck {
                         file + " was written by a newer version of this program (its schema is " + schema
                                 + ", this one knows schemas up to " + RecordsFile.SCHEMA
                                 + "): open it with that version or a later one."));
-            }
-            if (schema < RecordsFile.SCHEMA && access == Access.READ) {
-                return Optional.of(new Opening.Unopened(
-                        "records-older",
-                        file + " was written by an older version of this program (its schema is " + schema
-                                + ", this one's " + RecordsFile.SCHEMA
-                                + "): open it once for writing, which brings it up to date."));
             }
             return size(file, pragma(connection, "page_count"), pragma(connection, "page_size"));
         } catch (SQLException fault) {

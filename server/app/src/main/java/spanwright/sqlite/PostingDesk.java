@@ -40,6 +40,12 @@ final class PostingDesk implements PostingLine.Maker {
         this.publish = publish;
     }
 
+    /** Why nothing can be written any more; null where it can. In turn with postings. */
+    @Nullable
+    Refusal unwritable() {
+        return unwritable;
+    }
+
     /** Refuses all postings from now on. */
     void shut(String code, String sentence) {
         unwritable = new Refusal(code, sentence, null, null, null);

@@ -67,9 +67,17 @@ final class PostingLine {
 
     /** Does something while nobody posts. */
     void alone(Runnable action) {
+        inTurn(() -> {
+            action.run();
+            return true;
+        });
+    }
+
+    /** Asks something, or writes it, while nobody posts. */
+    <T> T inTurn(Supplier<T> action) {
         turn.lock();
         try {
-            action.run();
+            return action.get();
         } finally {
             turn.unlock();
             wakeNext();

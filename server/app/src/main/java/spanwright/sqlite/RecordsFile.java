@@ -9,7 +9,7 @@ final class RecordsFile {
     static final int APPLICATION_ID = 0x53505752;
 
     /** The schema that this program writes: the number of the last migration. */
-    static final int SCHEMA = 1;
+    static final int SCHEMA = 2;
 
     private RecordsFile() {}
 
@@ -26,6 +26,11 @@ final class RecordsFile {
     /** A new records file while it is being made. */
     static Path making(Path file) {
         return beside(file, ".making");
+    }
+
+    /** The file as it was before it was brought up to a schema. */
+    static Path before(Path file, int schema) {
+        return beside(file, ".before-V" + schema);
     }
 
     /** SQLite's own log of what is not yet in the file. */

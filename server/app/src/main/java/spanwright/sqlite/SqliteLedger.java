@@ -16,6 +16,7 @@ import spanwright.journal.Posting;
 import spanwright.network.Ledger;
 import spanwright.network.Outcome;
 import spanwright.network.Snapshot;
+import spanwright.outage.IncidentBook;
 
 /** The ledger in a records file. Safe for any number of threads. */
 public final class SqliteLedger implements Ledger {
@@ -30,6 +31,7 @@ public final class SqliteLedger implements Ledger {
     private final PostingDesk desk;
     private final PostingLine line;
     private final ImageKeeper images;
+    private final SqliteIncidents incidents;
     private volatile Tip tip;
     private boolean closed;
 
@@ -45,6 +47,7 @@ public final class SqliteLedger implements Ledger {
         this.images = new ImageKeeper(file, loaded.image());
         this.desk = new PostingDesk(store, clock, loaded.tip(), this::publish);
         this.line = new PostingLine(desk);
+        this.incidents = new SqliteIncidents(readers, line, store, desk, clock);
         if (lock == null) {
             desk.shut("records-read-only", "The records file was opened to be read only, so nothing can be posted.");
         }
@@ -111,7 +114,7 @@ public final class SqliteLedger implements Ledger {
             }
             return new Opening.Opened(new SqliteLedger(file, new Loading.Loaded(Tip.NONE, 0), lock, clock));
         }
-        Optional<Opening.Unopened> wrong = FileCheck.check(file, access);
+        Optional<Opening.Unopened> wrong = FileCheck.check(file);
         if (wrong.isPresent()) {
             return wrong.get();
         }
@@ -183,6 +186,11 @@ public final class SqliteLedger implements Ledger {
      */
     public CompletionStage<Integrity> integrity() {
         return integrity.begin();
+    }
+
+    /** The incidents kept in the same file. */
+    public IncidentBook incidents() {
+        return incidents;
     }
 
     /** The records file. */

@@ -31,12 +31,31 @@ final class Store implements AutoCloseable {
         try {
             if (connection == null && !exists(file)) {
                 make(drafts);
-            } else if (file.toFile().exists()) {
-                append(drafts);
             } else {
-                // Not made anew: what stood in it would be gone.
-                throw new IOException(file + " is there no longer");
+                append(writing -> write(drafts, stateWriter(writing), journalWriter(writing)));
             }
+        } catch (SQLException fault) {
+            throw new StorageFault(fault);
+        } catch (IOException fault) {
+            throw new StorageFault(fault);
+        }
+    }
+
+    /** Something written to the file besides postings. */
+    @FunctionalInterface
+    interface Writing {
+        /** Writes; the transaction is committed afterwards. */
+        void write(Connection connection) throws SQLException;
+    }
+
+    /**
+     * Writes in one transaction, and returns once it is durable. After a fault nothing of it is kept.
+     *
+     * @throws StorageFault where the file, or a rule of its tables, does not take it
+     */
+    void commit(Writing writing) {
+        try {
+            append(writing);
         } catch (SQLException fault) {
             throw new StorageFault(fault);
         } catch (IOException fault) {
@@ -49,13 +68,17 @@ final class Store implements AutoCloseable {
         return Files.exists(file) && Files.size(file) > 0;
     }
 
-    private void append(List<Draft> drafts) throws SQLException {
-        Connection writing = connection();
+    private void append(Writing writing) throws SQLException, IOException {
+        if (!file.toFile().exists()) {
+            // Not made anew: what stood in it would be gone.
+            throw new IOException(file + " is there no longer");
+        }
+        Connection open = connection();
         try {
-            write(drafts, stateWriter(writing), journalWriter(writing));
-            writing.commit();
+            writing.write(open);
+            open.commit();
         } catch (SQLException | RuntimeException | Error fault) {
-            undo(writing, fault);
+            undo(open, fault);
             throw fault;
         }
     }

@@ -17,6 +17,8 @@ import spanwright.network.Ledger;
 import spanwright.network.MemoryLedger;
 import spanwright.network.Outcome;
 import spanwright.network.SnapshotEditor;
+import spanwright.outage.IncidentDesk;
+import spanwright.outage.MemoryIncidents;
 import spanwright.plant.Setting;
 import spanwright.plants.RandomPlant;
 import spanwright.records.Records;
@@ -77,7 +79,13 @@ final class TestServer implements AutoCloseable {
 
     private static Api api(Ledger ledger) {
         return new Api(
-                new Views(ledger), new LastChanges(ledger), new PlainRows(), new SettingsDesk(ledger), "0.1.0", false);
+                new Views(ledger),
+                new LastChanges(ledger),
+                new PlainRows(),
+                new SettingsDesk(ledger),
+                new IncidentDesk(ledger, new MemoryIncidents(Clock.systemUTC()), Clock.systemUTC()),
+                "0.1.0",
+                false);
     }
 
     @Override

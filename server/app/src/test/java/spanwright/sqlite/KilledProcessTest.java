@@ -38,6 +38,21 @@ class KilledProcessTest {
         killOften(50, System.nanoTime());
     }
 
+    @Test
+    void entries_acknowledged_before_a_kill_are_there() throws Exception {
+        Path file = folder.resolve("plant");
+        Random random = new Random(20260331);
+        int acknowledged = 0;
+        for (int kill = 0; kill < 4; kill++) {
+            Process process = PostingProcess.start(EntryProcess.class, file, 0);
+            acknowledged = Math.max(acknowledged, killed(process, random, "written "));
+            try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+                assertThat(ledger.incidents().entries(1)).as("kill %d", kill).hasSizeGreaterThanOrEqualTo(acknowledged);
+            }
+        }
+        assertThat(acknowledged).isPositive();
+    }
+
     private void killOften(int kills, long seed) throws IOException, SQLException, InterruptedException {
         Random random = new Random(seed);
         Path file = folder.resolve("plant");
@@ -49,7 +64,8 @@ class KilledProcessTest {
                 Files.deleteIfExists(RecordsFile.log(file));
                 acknowledged = 0;
             }
-            acknowledged = Math.max(acknowledged, killOne(file, random));
+            Process process = PostingProcess.start(file, random.nextLong());
+            acknowledged = Math.max(acknowledged, killed(process, random, "posted "));
             String run = "seed " + seed + ", kill " + kill + ", acknowledged " + acknowledged;
             if (acknowledged > 0 || Store.exists(file)) {
                 check(file, acknowledged, run);
@@ -57,17 +73,16 @@ class KilledProcessTest {
         }
     }
 
-    /** Lets a process post for a moment and kills it; gives the last posting that it was told of. */
-    private static int killOne(Path file, Random random) throws IOException, InterruptedException {
-        Process process = PostingProcess.start(file, random.nextLong());
+    /** Lets a process write for a moment and kills it; gives the last number that it was told is durable. */
+    private static int killed(Process process, Random random, String told) throws IOException, InterruptedException {
         int acknowledged = 0;
         try (BufferedReader lines = process.inputReader(StandardCharsets.UTF_8)) {
             assertThat(lines.readLine()).isEqualTo("opened");
             Thread killer = new Thread(() -> sleepAndKill(process, random.nextInt(1500)));
             killer.start();
             for (String line = lines.readLine(); line != null; line = lines.readLine()) {
-                if (line.startsWith("posted ") && line.length() > "posted ".length()) {
-                    acknowledged = Math.max(acknowledged, Integer.parseInt(line.substring("posted ".length())));
+                if (line.startsWith(told) && line.length() > told.length()) {
+                    acknowledged = Math.max(acknowledged, Integer.parseInt(line.substring(told.length())));
                 }
             }
             killer.join();

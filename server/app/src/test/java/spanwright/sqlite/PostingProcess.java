@@ -83,13 +83,18 @@ final class PostingProcess {
 
     /** Starts one, with the class path of this process. */
     static Process start(Path file, long seed) throws IOException {
+        return start(PostingProcess.class, file, seed);
+    }
+
+    /** Starts the program of a class so. */
+    static Process start(Class<?> main, Path file, long seed) throws IOException {
         return new ProcessBuilder(
                         Path.of(System.getProperty("java.home"), "bin", "java").toString(),
                         "-Xmx512m",
                         "-XX:TieredStopAtLevel=1",
                         "-cp",
                         System.getProperty("java.class.path"),
-                        PostingProcess.class.getName(),
+                        main.getName(),
                         file.toString(),
                         Long.toString(seed))
                 .redirectError(ProcessBuilder.Redirect.DISCARD)

@@ -5,7 +5,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.nio.file.Path;
 import java.sql.Connection;
 import java.sql.DriverManager;
-import java.sql.SQLException;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -27,35 +26,35 @@ class SchemaTest {
         }
     }
 
-    private String ask(String sql) throws SQLException {
+    private String ask(String sql) throws Exception {
         try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
             return String.join("\n", Ledgers.rows(connection, sql));
         }
     }
 
     @Test
-    void an_older_file_is_brought_up_to_date_with_all_that_it_holds() throws SQLException {
-        Schema.bringUpTo(2, file, TO_COME);
+    void an_older_file_is_brought_up_to_date_with_all_that_it_holds() throws Exception {
+        Schema.bringUpTo(3, file, TO_COME);
 
-        assertThat(ask("PRAGMA user_version")).isEqualTo("2");
+        assertThat(ask("PRAGMA user_version")).isEqualTo("3");
         assertThat(ask("SELECT name, text FROM setting")).isEqualTo("owner|Valley Fiber");
         assertThat(ask("SELECT count(depth_um) FROM structure")).isEqualTo("0");
         assertThat(ask("SELECT version FROM migration WHERE success ORDER BY installed_rank"))
-                .isEqualTo("1\n2");
+                .isEqualTo("2\n3");
     }
 
     @Test
-    void a_file_that_is_up_to_date_is_left_alone() throws SQLException {
-        Schema.bringUpTo(2, file, TO_COME);
-        Schema.bringUpTo(2, file, "classpath:no-such-migrations");
+    void a_file_that_is_up_to_date_is_left_alone() throws Exception {
+        Schema.bringUpTo(3, file, TO_COME);
+        Schema.bringUpTo(3, file, "classpath:no-such-migrations");
         Schema.bringUpToDate(file);
 
-        assertThat(ask("PRAGMA user_version")).isEqualTo("2");
+        assertThat(ask("PRAGMA user_version")).isEqualTo("3");
     }
 
     @Test
-    void the_journal_of_an_older_schema_is_read_by_the_names_of_its_columns() throws SQLException {
-        Schema.bringUpTo(2, file, TO_COME);
+    void the_journal_of_an_older_schema_is_read_by_the_names_of_its_columns() throws Exception {
+        Schema.bringUpTo(3, file, TO_COME);
 
         try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
             assertThat(Journal.changes(connection, 1)).hasSize(1);
@@ -63,14 +62,14 @@ class SchemaTest {
     }
 
     @Test
-    void a_new_file_bears_its_marks_and_is_kept_with_a_log() throws SQLException {
+    void a_new_file_bears_its_marks_and_is_kept_with_a_log() throws Exception {
         assertThat(ask("PRAGMA application_id")).isEqualTo(Integer.toString(RecordsFile.APPLICATION_ID));
         assertThat(ask("PRAGMA user_version")).isEqualTo(Integer.toString(RecordsFile.SCHEMA));
         assertThat(ask("PRAGMA journal_mode")).isEqualTo("wal");
     }
 
     @Test
-    void the_one_that_writes_waits_for_the_disk_and_minds_references() throws SQLException {
+    void the_one_that_writes_waits_for_the_disk_and_minds_references() throws Exception {
         try (Connection connection = Connections.writing(file)) {
             assertThat(FileCheck.pragma(connection, "synchronous")).isEqualTo(2);
             assertThat(FileCheck.pragma(connection, "foreign_keys")).isEqualTo(1);

@@ -1,10 +1,13 @@
 /**
- * What an outage asks of the records: where a distance read on an OTDR lies, what is down, what may be the cause, and
- * light another way meanwhile.
+ * What an outage asks of the records: where a distance read on an OTDR lies, what is down and since when, what may be the
+ * cause, what is done about it, and light another way meanwhile.
  *
  * <p>Invariants:
  *
  * <ol>
+ *   <li>An incident and its log only grow: an entry is corrected by a later entry that names it, never erased.
+ *   <li>Counts are reckoned from the log and from the records as they stood when the incident was opened.
+ *   <li>The program counts and warns; whether an outage is reported, a person decides.
  *   <li>A temporary path is offered only where every circuit of its group is whole again over it and keeps its budget.
  *   <li>Nothing is offered over the places to avoid, nor along the path of a circuit that protects.
  *   <li>Spare glass is shared so that no piece is promised twice.

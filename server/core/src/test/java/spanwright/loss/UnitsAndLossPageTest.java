@@ -16,7 +16,7 @@ class UnitsAndLossPageTest {
     private static final Path ROOT = Path.of("../..");
 
     @ParameterizedTest
-    @ValueSource(strings = {"planning_values", "budget_classes", "fiber_types"})
+    @ValueSource(strings = {"planning_values", "budget_classes", "fiber_types", "reporting_thresholds"})
     void every_row_of_a_built_in_table_stands_on_the_page_with_its_numbers(String table) throws IOException {
         List<String> page = Files.readAllLines(ROOT.resolve("docs/UNITS-AND-LOSS.md"));
 
