@@ -18,6 +18,7 @@ final class JumperRows extends Rows<Joint> {
     private static final int A = Table.JUMPERS.column("a");
     private static final int B = Table.JUMPERS.column("b");
     private static final int LENGTH = Table.JUMPERS.column("length_m");
+    private static final int TEMPORARY_UNTIL = Table.JUMPERS.column("temporary_until");
     private static final Length USUAL = new Length(3_000_000);
 
     private final Ends ends;
@@ -46,7 +47,7 @@ final class JumperRows extends Rows<Joint> {
                 null,
                 null,
                 null,
-                null,
+                row.date(TEMPORARY_UNTIL, refs.zone()),
                 null,
                 Objects.requireNonNullElse(length, USUAL));
         return new Joint(id, JointKind.JUMPER, a.panel().enclosure(), fronts(a), fronts(b), facts);
@@ -61,5 +62,6 @@ final class JumperRows extends Rows<Joint> {
         cells.put(A, ends.text(joint.a()));
         cells.put(B, ends.text(joint.b()));
         cells.put(LENGTH, joint.facts().jumperLength());
+        cells.put(TEMPORARY_UNTIL, joint.facts().temporaryUntil());
     }
 }

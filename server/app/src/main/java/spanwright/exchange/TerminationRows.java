@@ -28,6 +28,7 @@ final class TerminationRows extends Rows<Joint> {
     private static final int TRUST = Table.TERMINATIONS.column("trust");
     private static final int VERIFIED_ON = Table.TERMINATIONS.column("verified_on");
     private static final int JOB = Table.TERMINATIONS.column("job");
+    private static final int TEMPORARY_UNTIL = Table.TERMINATIONS.column("temporary_until");
 
     /** How an end comes to a port. */
     private enum Way {
@@ -100,7 +101,7 @@ final class TerminationRows extends Rows<Joint> {
                 verifiedOn,
                 null,
                 null,
-                null,
+                row.date(TEMPORARY_UNTIL, refs.zone()),
                 row.free(JOB),
                 null));
     }
@@ -121,5 +122,6 @@ final class TerminationRows extends Rows<Joint> {
         cells.put(TRUST, facts.trust().word());
         cells.put(VERIFIED_ON, facts.verifiedOn());
         cells.put(JOB, facts.job());
+        cells.put(TEMPORARY_UNTIL, facts.temporaryUntil());
     }
 }

@@ -36,6 +36,7 @@ final class Routing {
         get("/fault", new FaultRoute(answering)::fault);
         routes.post("/suspects", timed.apply(new SuspectsRoute(answering, guard)::suspects));
         get("/impact", new ImpactRoute(answering)::impact);
+        routes.post("/light", timed.apply(new LightRoute(answering, api.rows(), guard)::light));
         JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
         get("/postings", journal::list);
         // A posting is never stopped half way: who sent it would not know whether it was kept.
