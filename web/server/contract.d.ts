@@ -944,6 +944,148 @@ export type Leg = {
 
 export type LengthBasis = "marks" | "nominal" | "measured" | "geodesic" | "recorded" | "unknown";
 
+export type LightAnswer = {
+  /** The last posting taken in */
+  posting: number;
+  /** By priority, then more customers first, then code */
+  groups: Array<LightGroup>;
+  /** Circuits that nothing named hits by the records, or whose ports no path joins */
+  strays: Array<string>;
+  /** Spare glass shared out: at most one offer a group, no fiber used twice */
+  assigned: Array<{
+    /** Index in groups */
+    group: number;
+    offer: LightOffer;
+  }>;
+  /** Groups for which nothing is left, as indexes in groups */
+  unserved: Array<number>;
+  /** Whether no other sharing out of the offers found serves more; else the search for one was cut short */
+  proven: boolean;
+};
+
+export type LightGroup = {
+  /** Codes, by priority, then more customers first, then code */
+  circuits: Array<string>;
+  /** The best of their priorities */
+  priority: number;
+  /** Customers on all of them */
+  customers: number;
+  /** Glass paths to light */
+  fibers: number;
+  /** Temporary paths, least work first, then least loss */
+  offers: Array<LightOffer>;
+  /** What is not offered, and why not */
+  refused: Array<LightRefused>;
+};
+
+export type LightJoint = {
+  /** What joins */
+  kind: "splice" | "termination" | "jumper";
+  /** Where; of a jumper, that of its a side */
+  enclosure: string;
+  /** One end, e.g. F-1 back 3, or a port */
+  a: string;
+  /** The other end */
+  b: string;
+};
+
+export type LightOffer = {
+  work: LightWork;
+  /** Structures where hands work, by code */
+  structures: Array<string>;
+  /** Spans that the path lies on, from one end on, of the fibers one after another, each once */
+  spans: Array<string>;
+  /** For each glass path its fibers in order, e.g. F-1:3 */
+  fibers: Array<Array<string>>;
+  /** Joints to make, in order */
+  joints: Array<LightJoint>;
+  /** Glass of the longest path, m */
+  glass_m: number;
+  /** What the worst of the circuits would lose, dB, traced as if the joints were posted; null where a value is missing */
+  loss_db: number | null;
+  /** The circuit that has least left of its budget; where none has one, that loses most */
+  worst: string;
+  /** Its budget, dB; null where it has none */
+  budget_db: number | null;
+  /** What is left of its budget beside margin_db; null where it has none */
+  left_db: number | null;
+  /** Why the loss is not known, as sentences; empty where it is */
+  unknown: Array<string>;
+  /** Circuits whose ends move to other ports */
+  moves: Array<{
+    /** Code */
+    circuit: string;
+    /** Ports at one end */
+    a: string;
+    /** Ports at the other end */
+    z: string;
+  }>;
+  /** What to send to POST /postings to keep it in the records */
+  changes: Array<RowChange>;
+  /** What to send to POST /postings after the repair: the records are as before */
+  undo: Array<RowChange>;
+};
+
+export type LightRefused = {
+  /** The reason */
+  why: "over_budget" | "suspect" | "partner" | "unverified" | "no_spare_glass" | "not_down_by_records";
+  /** The reason for a person */
+  text: string;
+  work?: LightWork;
+  /** Structures where hands work, by code */
+  structures?: Array<string>;
+  /** Spans that the path lies on, from one end on, of the fibers one after another, each once */
+  spans?: Array<string>;
+  /** For each glass path its fibers in order, e.g. F-1:3 */
+  fibers?: Array<Array<string>>;
+  /** Joints to make, in order */
+  joints?: Array<LightJoint>;
+  /** Glass of the longest path, m */
+  glass_m?: number;
+  /** What the worst of the circuits would lose, dB, traced as if the joints were posted; null where a value is missing */
+  loss_db?: number | null;
+  /** The circuit that has least left of its budget; where none has one, that loses most */
+  worst?: string;
+  /** Its budget, dB; null where it has none */
+  budget_db?: number | null;
+  /** What is left of its budget beside margin_db; null where it has none */
+  left_db?: number | null;
+  /** Why the loss is not known, as sentences; empty where it is */
+  unknown?: Array<string>;
+};
+
+export type LightRequest = {
+  /** Codes of circuits that are down; left out or empty: all working ones that cuts and avoid take down */
+  down?: Array<string>;
+  /** What is cut, as in GET /impact, e.g. span:S-1 */
+  cuts?: Array<string>;
+  /** What else to keep away from, such as suspects, in the same notation */
+  avoid?: Array<string>;
+  /** Panels whose free ports may feed splitters in the place of their own, e.g. HUT-S/OLT; equipment is not in the records */
+  from_panels?: Array<string>;
+  /** Whether spare glass must be verified */
+  verified_only?: boolean;
+  /** Kept free of each budget, dB */
+  margin_db?: number;
+  /** Most offers a group */
+  offers?: number;
+  /** Last day of the temporary joints, in changes as temporary_until; null or left out: none */
+  until?: string | null;
+};
+
+export type LightWork = {
+  /** Structures where hands work */
+  visits: number;
+  /** Closed tubes that must be opened */
+  tubes_opened: number;
+  /** New splices, pigtails among them */
+  new_splices: number;
+  /** Jumpers laid and plugs moved */
+  patches: number;
+  /** Joints crossed as they are that nobody has verified */
+  unverified: number;
+};
+
 export type Line = Array<Position>;
 
 export type LossBasis = "measured" | "planning" | "type" | "sheet" | "none";
@@ -1166,16 +1308,7 @@ export type PostingRequest = {
   by: string;
   /** Why */
   reason: string;
-  changes: Array<{
-    /** What to do */
-    action: "add" | "change" | "remove";
-    /** Table of the records folder, without .csv */
-    table: "settings" | "structures" | "spans" | "fiber_types" | "cable_types" | "color_codes" | "cables" | "cable_values" | "cable_runs" | "sheath_marks" | "enclosures" | "enclosure_cables" | "splitters" | "splitter_outputs" | "splices" | "panels" | "terminations" | "end_states" | "jumpers" | "measurements" | "fiber_flags" | "counts" | "circuits" | "planning_values";
-    /** Columns as in the records folder; for change, those that change; for remove, may be left out */
-    row?: Record<string, string | number | null>;
-    /** Natural key of the row to change or remove, by column */
-    key?: Record<string, string | number | null>;
-  }>;
+  changes: Array<RowChange>;
 };
 
 export type PostingSummary = {
@@ -1207,6 +1340,17 @@ export type Problem = {
   parameter?: string;
   /** For a refused posting: every fault, not only the first */
   faults?: Array<Fault>;
+};
+
+export type RowChange = {
+  /** What to do */
+  action: "add" | "change" | "remove";
+  /** Table of the records folder, without .csv */
+  table: "settings" | "structures" | "spans" | "fiber_types" | "cable_types" | "color_codes" | "cables" | "cable_values" | "cable_runs" | "sheath_marks" | "enclosures" | "enclosure_cables" | "splitters" | "splitter_outputs" | "splices" | "panels" | "terminations" | "end_states" | "jumpers" | "measurements" | "fiber_flags" | "counts" | "circuits" | "planning_values";
+  /** Columns as in the records folder; for change, those that change; for remove, may be left out */
+  row?: Record<string, string | number | null>;
+  /** Natural key of the row to change or remove, by column */
+  key?: Record<string, string | number | null>;
 };
 
 export type RunRowHere = {

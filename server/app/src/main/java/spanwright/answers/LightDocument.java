@@ -3,9 +3,11 @@ package spanwright.answers;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.Circuit;
 import spanwright.loss.BudgetCheck;
@@ -20,6 +22,7 @@ import spanwright.outage.Refused;
 import spanwright.planning.NewJoint;
 import spanwright.planning.SpareWay;
 import spanwright.planning.SpareWork;
+import spanwright.plant.RunRow;
 
 /** The document of temporary paths. */
 public final class LightDocument {
@@ -46,17 +49,15 @@ public final class LightDocument {
         json.texts("strays", answer.strays().stream().map(Circuit::code).toList());
         json.list("assigned", answer.shared(), (item, offer) -> {
             item.whole("group", order.indexOf(offer.group()));
-            offer(item, offer);
+            item.object("offer", share -> offer(share, offer));
         });
-        json.wholes(
-                "unserved", answer.unserved().stream().map(order::indexOf).toList());
+        json.wholes("unserved", answer.unserved().stream().map(order::indexOf).toList());
         json.flag("proven", answer.proven());
     }
 
     private void group(Json json, GroupLight light) {
         json.texts(
-                "circuits",
-                light.group().circuits().stream().map(Circuit::code).toList());
+                "circuits", light.group().circuits().stream().map(Circuit::code).toList());
         json.whole("priority", light.group().priority())
                 .whole("customers", light.group().customers());
         json.whole("fibers", light.group().fibers());
@@ -66,9 +67,18 @@ public final class LightDocument {
 
     private void offer(Json json, LightOffer offer) {
         path(json, offer.ways(), offer.lit());
-        json.list("moves", offer.moves(), (item, circuit) -> item.text("circuit", circuit.code())
-                .text("a", view.names().ports(circuit.a().panel(), circuit.a().ports()))
-                .text("z", view.names().ports(circuit.z().panel(), circuit.z().ports())));
+        json.list(
+                "moves",
+                offer.moves(),
+                (item, circuit) -> item.text("circuit", circuit.code())
+                        .text(
+                                "a",
+                                view.names()
+                                        .ports(circuit.a().panel(), circuit.a().ports()))
+                        .text(
+                                "z",
+                                view.names()
+                                        .ports(circuit.z().panel(), circuit.z().ports())));
         LightRows.Posting posting = rows.of(offer);
         json.list("changes", posting.changes(), LightDocument::change);
         json.list("undo", posting.undo(), LightDocument::change);
@@ -111,7 +121,10 @@ public final class LightDocument {
                         .map(id -> view.records().structures().get(id).code())
                         .sorted(Comparator.naturalOrder())
                         .toList());
-        json.list("fibers", list -> ways.forEach(way -> list.listHere(items -> fibers(way).forEach(items::textHere))));
+        json.texts("spans", spans(ways));
+        json.list(
+                "fibers",
+                list -> ways.forEach(way -> list.listHere(items -> fibers(way).forEach(items::textHere))));
         List<NewJoint> joints = new ArrayList<>();
         ways.forEach(way -> joints.addAll(way.joints()));
         json.list("joints", joints, this::joint);
@@ -121,6 +134,32 @@ public final class LightDocument {
         json.decibels("budget_db", check == null ? null : check.budget().max());
         json.decibels("left_db", check == null ? null : check.left());
         json.texts("unknown", lit.unknown());
+    }
+
+    private Set<String> spans(List<SpareWay> ways) {
+        Set<String> spans = new LinkedHashSet<>();
+        ways.forEach(way -> way.entered().forEach(end -> {
+            Block block = view.network().blockOf(end >> 1);
+            if (block.kind() == BlockKind.SECTION) {
+                spans.addAll(spans(block, (end & 1) == 0));
+            }
+        }));
+        return spans;
+    }
+
+    private List<String> spans(Block section, boolean ahead) {
+        RunRow from = view.records().runRows().get(section.fromRow());
+        RunRow to = view.records().runRows().get(section.toRow());
+        List<String> spans = new ArrayList<>();
+        for (RunRow row : view.records().runOf(section.owner())) {
+            Integer span = row.span();
+            if (row.seq() > from.seq() && row.seq() <= to.seq() && span != null) {
+                spans.add(
+                        ahead ? spans.size() : 0,
+                        view.records().spans().get(span).code());
+            }
+        }
+        return spans;
     }
 
     private List<String> fibers(SpareWay way) {
@@ -139,7 +178,8 @@ public final class LightDocument {
 
     private void joint(Json json, NewJoint joint) {
         json.text("kind", joint.kind().name().toLowerCase(Locale.ROOT));
-        json.text("enclosure", view.records().enclosures().get(joint.enclosure()).code());
+        json.text(
+                "enclosure", view.records().enclosures().get(joint.enclosure()).code());
         json.text("a", view.names().end(view.network().keyOf(joint.a())));
         json.text("b", view.names().end(view.network().keyOf(joint.b())));
     }

@@ -3,7 +3,6 @@ package spanwright.answers;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
-import spanwright.answers.Unanswerable.Kind;
 import spanwright.circuits.Circuit;
 import spanwright.outage.ClosedPlant;
 import spanwright.outage.DownCircuits;
@@ -41,8 +40,9 @@ public final class LightNames {
             Loss margin,
             int offers) {
         ClosedPlant closed = new ClosedPlant(view.snapshot());
-        cuts.forEach(place -> close(closed, place));
-        avoid.forEach(place -> close(closed, place));
+        CutReferences places = new CutReferences(view.records());
+        closed.cut(places.list(cuts));
+        closed.cut(places.list(avoid));
         Set<Circuit> circuits = new LinkedHashSet<>();
         down.forEach(code -> circuits.add(references.askedCircuit(code)));
         if (circuits.isEmpty()) {
@@ -54,21 +54,5 @@ public final class LightNames {
 
     private Panel panel(String text) {
         return view.records().panels().get(EndKey.owner(references.front(text + "/1")));
-    }
-
-    private void close(ClosedPlant closed, String place) {
-        int colon = place.indexOf(':');
-        String code = place.substring(colon + 1);
-        switch (colon < 0 ? "" : place.substring(0, colon)) {
-            case "span" -> closed.span(references.span(code).id());
-            case "structure" -> closed.structure(references.structure(code).id());
-            case "enclosure" -> closed.enclosure(references.enclosure(code));
-            case "cable" -> closed.cable(references.cable(code).id());
-            default ->
-                throw new Unanswerable(
-                        Kind.BAD_REQUEST,
-                        "'" + place + "' is no place; a place is written span:S-1, structure:H1, enclosure:E1 or"
-                                + " cable:F-1.");
-        }
     }
 }

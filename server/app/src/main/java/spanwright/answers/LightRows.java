@@ -43,10 +43,11 @@ final class LightRows {
         List<Change> undo = new ArrayList<>();
         List<Change> back = new ArrayList<>();
         Set<String> freed = new HashSet<>();
-        offer.ways().forEach(way -> way.joints().forEach(joint -> {
-            free(joint.a(), freed, changes, back);
-            free(joint.b(), freed, changes, back);
-        }));
+        offer.ways()
+                .forEach(way -> way.joints().forEach(joint -> {
+                    free(joint.a(), freed, changes, back);
+                    free(joint.b(), freed, changes, back);
+                }));
         List<Change> moved = new ArrayList<>();
         for (Circuit circuit : offer.moves()) {
             Circuit before = view.records().circuits().get(circuit.id());
@@ -54,11 +55,12 @@ final class LightRows {
             undo.add(move(before));
         }
         changes.addAll(moved);
-        offer.ways().forEach(way -> way.joints().forEach(joint -> {
-            Change added = added(joint);
-            changes.add(added);
-            undo.add(0, new Change("remove", added.table(), key(added), Map.of()));
-        }));
+        offer.ways()
+                .forEach(way -> way.joints().forEach(joint -> {
+                    Change added = added(joint);
+                    changes.add(added);
+                    undo.add(0, new Change("remove", added.table(), key(added), Map.of()));
+                }));
         undo.addAll(back);
         return new Posting(changes, undo);
     }
@@ -95,7 +97,13 @@ final class LightRows {
         while (joint.a().key(index) != key && joint.b().key(index) != key) {
             index++;
         }
-        return new Joint(joint.id(), joint.type(), joint.enclosure(), one(joint.a(), index), one(joint.b(), index), joint.facts());
+        return new Joint(
+                joint.id(),
+                joint.type(),
+                joint.enclosure(),
+                one(joint.a(), index),
+                one(joint.b(), index),
+                joint.facts());
     }
 
     private static EndRange one(EndRange ends, int index) {
@@ -141,8 +149,7 @@ final class LightRows {
     private String name(int end) {
         long key = view.network().keyOf(end);
         return view.names()
-                .ends(new EndRange(
-                        new Leg(EndKey.kind(key), EndKey.owner(key)), FiberRange.of(EndKey.number(key))));
+                .ends(new EndRange(new Leg(EndKey.kind(key), EndKey.owner(key)), FiberRange.of(EndKey.number(key))));
     }
 
     private static Map<String, String> key(Change added) {

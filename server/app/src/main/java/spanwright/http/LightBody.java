@@ -125,7 +125,7 @@ record LightBody(
     private static int offers(JsonNode root) {
         JsonNode node = root.path("offers");
         if (node.isMissingNode()) {
-            return 2;
+            return 1;
         }
         if (!node.isInt() || node.asInt() < 1 || node.asInt() > MOST_OFFERS) {
             throw bad("offers is a whole number from 1 to " + MOST_OFFERS + ".");

@@ -1,8 +1,6 @@
 package spanwright.http;
 
 import io.javalin.http.Context;
-import java.io.IOException;
-import java.io.InputStream;
 import spanwright.answers.Json;
 import spanwright.answers.LightDocument;
 import spanwright.answers.LightNames;
@@ -31,7 +29,8 @@ final class LightRoute {
     void light(Context ctx) {
         guard.checkPosting(ctx);
         Question question = new Question(ctx, Answering.AS_OF, Answering.AS_IF);
-        LightBody body = LightBody.read(body(ctx));
+        LightBody body = LightBody.read(
+                SentBody.read(ctx, LARGEST_BODY, "A question for light", "leave out circuits far from the outage"));
         View view = answering.view(question);
         LightQuestion asked = new LightNames(view)
                 .question(
@@ -44,17 +43,5 @@ final class LightRoute {
                         body.offers());
         LightAnswer answer = TemporaryPaths.find(view.snapshot(), asked);
         Answering.json(ctx, Json.bytes(json -> new LightDocument(view, rows, body.until()).write(json, answer)));
-    }
-
-    private static byte[] body(Context ctx) {
-        try (InputStream in = ctx.req().getInputStream()) {
-            byte[] body = in.readNBytes(LARGEST_BODY + 1);
-            if (body.length > LARGEST_BODY) {
-                throw new ProblemException(Problem.tooLarge("A question is " + LARGEST_BODY + " bytes long at most."));
-            }
-            return body;
-        } catch (IOException broken) {
-            throw new ProblemException(Problem.badRequest("The body ended before its end.", null));
-        }
     }
 }

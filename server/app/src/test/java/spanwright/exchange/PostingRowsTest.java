@@ -128,7 +128,7 @@ class PostingRowsTest {
     void a_part_of_a_range_is_removed_and_the_rest_stays() {
         Records records = posted("remove terminations enclosure=E1 panel=P ports=4-6");
         assertThat(rows(records, "terminations"))
-                .contains("E1|P|1-3|F-1 ahead 1-3|pigtail||posted||", "E1|P|7-12|F-1 ahead 7-12|pigtail||posted||")
+                .contains("E1|P|1-3|F-1 ahead 1-3|pigtail||posted|||", "E1|P|7-12|F-1 ahead 7-12|pigtail||posted|||")
                 .noneMatch(row -> row.startsWith("E1|P|1-12"));
     }
 
@@ -163,7 +163,17 @@ class PostingRowsTest {
     void a_jumper_is_found_by_either_side() {
         assertThat(rows(posted("remove jumpers a=E1/Q/1"), "jumpers")).isEmpty();
         assertThat(rows(posted("change jumpers b=E1/P/10 -> length_m=5"), "jumpers"))
-                .containsExactly("E1/P/10|E1/Q/1|5");
+                .containsExactly("E1/P/10|E1/Q/1|5|");
+    }
+
+    @Test
+    void jumpers_and_pigtails_too_may_be_temporary() {
+        assertThat(rows(posted("change jumpers a=E1/Q/1 -> temporary_until=2026-12-08"), "jumpers"))
+                .allMatch(row -> row.endsWith("|2026-12-08"));
+        assertThat(rows(
+                        posted("change terminations enclosure=E1 panel=P ports=4-6 -> temporary_until=2026-12-08"),
+                        "terminations"))
+                .contains("E1|P|4-6|F-1 ahead 4-6|pigtail||posted|||2026-12-08");
     }
 
     @Test

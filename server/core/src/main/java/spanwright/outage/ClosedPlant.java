@@ -1,14 +1,15 @@
 package spanwright.outage;
 
 import java.util.BitSet;
+import java.util.Collection;
 import java.util.HashSet;
 import java.util.Set;
 import java.util.function.IntUnaryOperator;
+import java.util.stream.Stream;
 import spanwright.network.Block;
 import spanwright.network.BlockKind;
 import spanwright.network.Network;
 import spanwright.network.Snapshot;
-import spanwright.plant.Enclosure;
 import spanwright.plant.RunRow;
 import spanwright.records.Records;
 import spanwright.records.Relation;
@@ -16,6 +17,7 @@ import spanwright.records.Relation;
 /** Plant that a temporary path keeps away from, gathered place by place. One thread's. */
 public final class ClosedPlant {
 
+    private final Snapshot snapshot;
     private final Records records;
     private final Network network;
     private final BitSet pieces = new BitSet();
@@ -23,64 +25,44 @@ public final class ClosedPlant {
 
     /** Nothing is closed yet. */
     public ClosedPlant(Snapshot snapshot) {
+        this.snapshot = snapshot;
         this.records = snapshot.records();
         this.network = snapshot.network();
     }
 
     /** A copy to add to. */
-    ClosedPlant copy(Snapshot snapshot) {
+    ClosedPlant copy() {
         ClosedPlant copy = new ClosedPlant(snapshot);
         copy.pieces.or(pieces);
         copy.enclosures.or(enclosures);
         return copy;
     }
 
-    /** Closes every section that lies on a span. */
-    public void span(int span) {
-        records.runRows().owned(Relation.SPAN_RUN_ROWS, span).forEach(row -> sections(row, false));
-    }
-
-    /** Closes every section that passes, begins or ends at a structure, and what is there. */
-    public void structure(int structure) {
-        records.runRows().owned(Relation.STRUCTURE_RUN_ROWS, structure).forEach(row -> sections(row, true));
-        records.enclosures().owned(Relation.STRUCTURE_ENCLOSURES, structure).forEach(this::enclosure);
+    /** Closes what cuts take: their glass, and the enclosures that they open. */
+    public void cut(Collection<Cut> cuts) {
+        CutGlass glass = new CutGlass(snapshot, cuts);
+        glass.sections()
+                .forEach(cut ->
+                        cut.fibers().forEach(fiber -> pieces.set(cut.section().piece(fiber))));
+        glass.enclosures().forEach(this::enclosure);
     }
 
     /** Closes an enclosure: nothing in it is crossed or joined, and no port of it used. */
-    public void enclosure(Enclosure enclosure) {
-        enclosures.set(enclosure.id());
+    private void enclosure(int enclosure) {
+        enclosures.set(enclosure);
         records.panels()
-                .owned(Relation.ENCLOSURE_PANELS, enclosure.id())
+                .owned(Relation.ENCLOSURE_PANELS, enclosure)
                 .flatMap(panel -> network.panelBlock(panel.id()).stream())
-                .forEach(this::block);
-    }
-
-    /** Closes a cable from end to end. */
-    public void cable(int cable) {
-        network.sectionsOf(cable).forEach(this::block);
+                .forEach(block -> pieces.set(block.firstPiece(), block.firstPiece() + block.count()));
     }
 
     /** Closes one piece of glass. */
-    public void piece(int piece) {
+    void piece(int piece) {
         pieces.set(piece);
-    }
-
-    private void sections(RunRow row, boolean touching) {
-        for (Block section : network.sectionsOf(row.cable())) {
-            int from = seq(section.fromRow());
-            int to = seq(section.toRow());
-            if (row.seq() <= to && (row.seq() > from || (touching && row.seq() == from))) {
-                block(section);
-            }
-        }
     }
 
     private int seq(int runRow) {
         return records.runRows().get(runRow).seq();
-    }
-
-    private void block(Block block) {
-        pieces.set(block.firstPiece(), block.firstPiece() + block.count());
     }
 
     /** Closes all that lies along a glass path: its spans, its structures but for some, its enclosures there. */
@@ -93,8 +75,10 @@ public final class ClosedPlant {
                 travelled(block, spans, structures);
             }
         }
-        spans.forEach(this::span);
-        structures.stream().filter(structure -> !but.contains(structure)).forEach(this::structure);
+        Stream<Cut> sites = structures.stream()
+                .filter(structure -> !but.contains(structure))
+                .map(Cut.OfStructure::new);
+        cut(Stream.concat(spans.stream().map(Cut.OfSpan::new), sites).toList());
     }
 
     private void travelled(Block section, Set<Integer> spans, Set<Integer> structures) {

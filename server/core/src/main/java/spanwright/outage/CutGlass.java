@@ -175,6 +175,11 @@ final class CutGlass {
         return cables.values().stream().mapToInt(BitSet::cardinality).sum();
     }
 
+    /** The enclosures that are cut open. */
+    Set<Integer> enclosures() {
+        return Set.copyOf(enclosures);
+    }
+
     /** The cut sections by cable and along it. */
     List<CutSection> sections() {
         return sections.entrySet().stream()

@@ -252,7 +252,7 @@ public final class TemporaryPaths {
                 ends.add(glass.structure(glass.enclosure(line.from() & ~1)));
                 ends.add(glass.structure(glass.enclosure(line.to() & ~1)));
             });
-            ClosedPlant apart = closed.copy(snapshot);
+            ClosedPlant apart = closed.copy();
             for (Circuit partner : partners) {
                 for (int fiber = 0; fiber < partner.fibers(); fiber++) {
                     DarkLine.of(network, partner, fiber).forEach(line -> apart.along(line, ends));

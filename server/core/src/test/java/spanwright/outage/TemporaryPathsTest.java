@@ -44,7 +44,8 @@ class TemporaryPathsTest {
 
     private static LightAnswer ask(Snapshot snapshot, String span, List<Panel> panels, boolean verified) {
         ClosedPlant cut = new ClosedPlant(snapshot);
-        cut.span(snapshot.records().spans().find(span).orElseThrow().id());
+        cut.cut(List.of(new Cut.OfSpan(
+                snapshot.records().spans().find(span).orElseThrow().id())));
         List<Circuit> down = snapshot.records().circuits().list().toList();
         return TemporaryPaths.find(snapshot, new LightQuestion(down, cut, panels, verified, Loss.ZERO, 3));
     }
