@@ -3,7 +3,7 @@
  * `#/circuit/RC-01?as_of=41&nm=1310,1550` opens the same thing wherever it is pasted.
  */
 
-/** @typedef {'start'|'structure'|'span'|'enclosure'|'cable'|'fiber'|'port'|'circuit'|'circuits'|'postings'|'posting'} View */
+/** @typedef {'start'|'structure'|'span'|'enclosure'|'cable'|'fiber'|'port'|'circuit'|'circuits'|'postings'|'posting'|'outage'} View */
 
 /**
  * @typedef {object} Address
@@ -14,16 +14,22 @@
  * @property {number[]} nm wavelengths drawn, nm; empty for the path's own
  * @property {string} asOf posting or time; empty for now
  * @property {string} asIf job; empty for none
+ * @property {Asked} asked what the view itself was asked, in order; a name may come several times
  */
 
+/** @typedef {ReadonlyArray<readonly [string, string]>} Asked names and values */
+
 /** @type {readonly View[]} */
-const VIEWS = ["start", "structure", "span", "enclosure", "cable", "fiber", "port", "circuit", "circuits", "postings", "posting"];
+const VIEWS = ["start", "structure", "span", "enclosure", "cable", "fiber", "port", "circuit", "circuits", "postings", "posting", "outage"];
 
 /** Views whose thing has a path of its own. */
 const TRACED = ["circuit", "port", "fiber"];
 
+/** Parameters that mean the same in every view. */
+const COMMON = ["trace", "path", "nm", "as_of", "as_if"];
+
 /** @type {Address} */
-const START = { view: "start", code: "", trace: "", path: 0, nm: [], asOf: "", asIf: "" };
+const START = { view: "start", code: "", trace: "", path: 0, nm: [], asOf: "", asIf: "", asked: [] };
 
 /**
  * Reads an address; what cannot be read opens the start.
@@ -45,6 +51,7 @@ export function parseAddress(hash) {
     nm: text("nm").split(",").map(Number).filter((each) => each > 0),
     asOf: text("as_of"),
     asIf: text("as_if"),
+    asked: [...params].filter(([name]) => !COMMON.includes(name)),
   };
 }
 
@@ -61,8 +68,9 @@ export function formatAddress(address) {
   if (address.nm.length > 0) params.set("nm", address.nm.join(","));
   if (address.asOf) params.set("as_of", address.asOf);
   if (address.asIf) params.set("as_if", address.asIf);
+  for (const [name, value] of address.asked) params.append(name, value);
   const code = address.code.split("/").map(encodeURIComponent).join("/").replaceAll("%3A", ":").replaceAll("%20", "+");
-  const query = params.toString().replaceAll("%2F", "/").replaceAll("%3A", ":").replaceAll("%2C", ",");
+  const query = params.toString().replaceAll("%2F", "/").replaceAll("%3A", ":").replaceAll("%2C", ",").replaceAll("%40", "@").replaceAll("%3D", "=");
   return `#/${address.view}${code ? `/${code}` : ""}${query ? `?${query}` : ""}`;
 }
 
@@ -70,14 +78,15 @@ export function formatAddress(address) {
  * The address of another view, the time, the job and the path at hand kept.
  * @param {View} view
  * @param {string} [code]
+ * @param {Asked} [asked] what the view is asked
  * @returns {string} with its #
  */
-export function hrefTo(view, code = "") {
+export function hrefTo(view, code = "", asked = []) {
   const here = currentAddress();
   const traced = TRACED.includes(view);
   const trace = traced ? `${view}:${code}` : here.trace;
   const same = trace === here.trace;
-  return formatAddress({ ...here, view, code, trace, path: same ? here.path : 0, nm: same ? here.nm : [] });
+  return formatAddress({ ...here, view, code, asked, trace, path: same ? here.path : 0, nm: same ? here.nm : [] });
 }
 
 /**

@@ -10,7 +10,10 @@
  * @property {string | null} [trust]
  * @property {string | null} [verifiedOn] date
  * @property {PostingRef | null} [changed] the posting that it was last changed by
+ * @property {Part[]} [parts] what it is made up of, each with its own length
  */
+
+/** @typedef {{ what: string, metres: number }} Part */
 
 /** @type {Readonly<Record<string, string>>} */
 const WORDS = Object.freeze({
@@ -25,6 +28,9 @@ const WORDS = Object.freeze({
   recorded: "as entered in the records",
   sum: "a sum over the path",
   counted: "counted from the records",
+  reading: "an instrument's reading, laid along the glass of the records",
+  window: "twice the root of the summed squares of what makes it unsure: the true place lies within it in about 95 of 100 shots",
+  alarms: "the lists of what is down and what is up, laid on the records",
   unknown: "not known",
 });
 

@@ -1,3 +1,3 @@
 /** How do you know? Every number opens its basis. */
-export { figure, openBasis } from "./figure.js";
+export { figure, openBasis, readingOf } from "./figure.js";
 export { BasisNote } from "./note.js";

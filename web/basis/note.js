@@ -1,5 +1,5 @@
 import { LitElement, html, nothing } from "lit";
-import { UnitController, dayInWords, timeInWords } from "../quantity/index.js";
+import { UnitController, dayInWords, length, timeInWords, units } from "../quantity/index.js";
 import { link } from "../address/index.js";
 import { basisInWords } from "./basis.js";
 import { readingOf } from "./figure.js";
@@ -61,9 +61,19 @@ export class BasisNote extends LitElement {
         <dt>Known from</dt><dd>${basisInWords(basis.how)}</dd>
         ${basis.source ? html`<dt>Source</dt><dd>${basis.source}</dd>` : nothing}
         ${basis.trust ? html`<dt>Trust</dt><dd>${basis.trust}${basis.verifiedOn ? `, verified ${dayInWords(basis.verifiedOn)}` : ""}</dd>` : nothing}
-        ${this.posting()}
+        ${this.parts()}${this.posting()}
       </dl>
     </section>`;
+  }
+
+  /** @returns {unknown} what the number is made up of, the largest first */
+  parts() {
+    const parts = [...(this.figure?.basis.parts ?? [])].sort((one, other) => other.metres - one.metres);
+    if (parts.length === 0) return nothing;
+    return html`<dt>Made up of</dt><dd><table class="basis-parts"><tbody>${parts.map(({ what, metres }) => {
+      const { number, unit } = length(metres, units.unit);
+      return html`<tr><th scope="row">${what}</th><td class="right"><span class="number">${number}</span> <span class="unit">${unit}</span></td></tr>`;
+    })}</tbody></table></dd>`;
   }
 
   /** @returns {unknown} */

@@ -42,6 +42,11 @@ export class FindBox extends LitElement {
     return this.querySelector("input");
   }
 
+  /** @returns {FindResult[]} what may be taken of the answer */
+  get results() {
+    return this.answer?.results ?? [];
+  }
+
   /** @returns {Promise<void>} */
   async typed() {
     const q = this.box()?.value.trim() ?? "";
@@ -54,7 +59,7 @@ export class FindBox extends LitElement {
     const abort = new AbortController();
     this.abort = abort;
     try {
-      this.answer = await ask("/find", { q, limit: LIMIT }, abort.signal);
+      this.answer = await ask("/find", { q, limit: this.limit }, abort.signal);
       this.problem = "";
       this.at = 0;
       this.open = true;
@@ -66,9 +71,14 @@ export class FindBox extends LitElement {
     }
   }
 
+  /** @returns {number} answers asked for */
+  get limit() {
+    return LIMIT;
+  }
+
   /** @param {KeyboardEvent} event */
   async pressed(event) {
-    const results = this.answer?.results ?? [];
+    const { results } = this;
     if (event.key === "ArrowDown" || event.key === "ArrowUp") {
       event.preventDefault();
       this.open = results.length > 0;
@@ -76,12 +86,17 @@ export class FindBox extends LitElement {
     } else if (event.key === "Enter") {
       event.preventDefault();
       await this.typedOut();
-      this.take(this.answer?.results[this.at]);
+      this.take(this.results[this.at]);
     } else if (event.key === "Escape") {
       event.stopPropagation();
       if (this.open) this.open = false;
       else this.box()?.blur();
     }
+  }
+
+  /** Takes the answers out of sight. */
+  shut() {
+    this.open = false;
   }
 
   /** Waits for the answer to what is typed, so that a fast Enter takes it and not the one before. */
@@ -104,22 +119,29 @@ export class FindBox extends LitElement {
 
   /** @override */
   render() {
-    const results = this.answer?.results ?? [];
-    const current = this.open && results.length > 0 ? `found-${this.at}` : nothing;
     return html`<div class="find" role="search" @focusout=${this.left}>
-      <label for="find">Find <kbd>/</kbd></label>
-      <input id="find" type="search" role="combobox" autocomplete="off" spellcheck="false" placeholder="code, fiber, port, place, circuit, mark"
-        aria-expanded=${this.open} aria-controls="found" aria-autocomplete="list" aria-activedescendant=${current}
-        @input=${this.typed} @keydown=${this.pressed} @focus=${() => (this.open = results.length > 0)}>
-      <div class="found" ?hidden=${!this.open}>
-        <ul id="found" role="listbox" aria-label="Found">${results.map((result, index) => this.option(result, index))}</ul>
-        ${this.note(results.length)}
-      </div></div>`;
+      <label for="find">Find <kbd>/</kbd></label>${this.input("find", "found", "code, fiber, port, place, circuit, mark")}${this.list("found")}</div>`;
   }
 
-  /** @param {FindResult} result @param {number} index @returns {unknown} */
-  option(result, index) {
-    return html`<li id=${`found-${index}`} role="option" aria-selected=${index === this.at}
+  /** @param {string} id @param {string} list id of the answers @param {string} placeholder @returns {unknown} */
+  input(id, list, placeholder) {
+    const current = this.open && this.results.length > 0 ? `${list}-${this.at}` : nothing;
+    return html`<input id=${id} type="search" role="combobox" autocomplete="off" spellcheck="false" placeholder=${placeholder}
+      aria-expanded=${this.open} aria-controls=${list} aria-autocomplete="list" aria-activedescendant=${current}
+      @input=${this.typed} @keydown=${this.pressed} @focus=${() => (this.open = this.results.length > 0)}>`;
+  }
+
+  /** @param {string} id @returns {unknown} */
+  list(id) {
+    const { results } = this;
+    return html`<div class="found" ?hidden=${!this.open}>
+      <ul id=${id} role="listbox" aria-label="Found">${results.map((result, index) => this.option(id, result, index))}</ul>
+      ${this.note(results.length)}</div>`;
+  }
+
+  /** @param {string} list @param {FindResult} result @param {number} index @returns {unknown} */
+  option(list, result, index) {
+    return html`<li id=${`${list}-${index}`} role="option" aria-selected=${index === this.at}
       @mousedown=${(/** @type {Event} */ event) => event.preventDefault()} @mousemove=${() => (this.at = index)} @click=${() => this.take(result)}>
       <span class="found-label">${result.label}</span> <span class="found-what">${result.what}</span> <span class="found-where">${result.where}</span></li>`;
   }

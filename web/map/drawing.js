@@ -5,9 +5,11 @@ import { paintBase, paintNames, paintPlaces } from "./paint-base.js";
 import { paintSpans, paintStructures } from "./paint-plant.js";
 import { SITE } from "./tags.js";
 import { paintHandLines, paintHandSigns } from "./paint-hand.js";
+import { paintMarkSigns, paintStretches } from "./paint-marks.js";
 
 /** @typedef {import("./stock.js").Stock} Stock */
 /** @typedef {import("./paint-hand.js").AtHand} AtHand */
+/** @typedef {import("./paint-marks.js").DrawnMarks} DrawnMarks */
 
 /**
  * The drawing on the map: two sheets of canvas over the screen, the plant and the lines at hand on the lower, the signs at
@@ -22,6 +24,8 @@ export class Drawing extends Layer {
     this.hand = sheetOfCanvas("map-hand");
     /** @type {AtHand} */
     this.atHand = { path: null, line: null, place: null, label: "", pointer: null, pointed: "" };
+    /** @type {DrawnMarks} */
+    this.marks = { stretches: [], faults: [] };
   }
 
   /**
@@ -71,6 +75,7 @@ export class Drawing extends Layer {
     paintBase(canvas, frame, inks, this.stock.base);
     paintSpans(canvas, frame, inks, this.stock.spans);
     paintHandLines(canvas, frame, inks, this.atHand);
+    paintStretches(canvas, frame, inks, this.marks);
     const sites = this.stock.structures.filter((each) => each.importance >= SITE);
     const others = this.stock.structures.filter((each) => each.importance < SITE);
     paintStructures(canvas, frame, inks, sites, room);
@@ -85,7 +90,10 @@ export class Drawing extends Layer {
     const frame = this.frame();
     if (!frame) return;
     const canvas = cleared(this.hand, frame);
-    if (canvas) paintHandSigns(canvas, frame, inksOf(this.hand), this.atHand);
+    if (!canvas) return;
+    const inks = inksOf(this.hand);
+    paintMarkSigns(canvas, frame, inks, this.marks);
+    paintHandSigns(canvas, frame, inks, this.atHand);
   }
 }
 

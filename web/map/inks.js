@@ -6,6 +6,9 @@
  * @property {string} hair
  * @property {string} faint
  * @property {string} accent
+ * @property {string} down
+ * @property {string} suspect
+ * @property {string} spare
  * @property {string} font
  */
 
@@ -24,6 +27,9 @@ export function inksOf(element) {
     hair: of("--hair-strong"),
     faint: of("--base"),
     accent: of("--accent"),
+    down: of("--down"),
+    suspect: of("--suspect"),
+    spare: of("--spare"),
     font: style.fontFamily,
   };
 }

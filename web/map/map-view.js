@@ -9,6 +9,7 @@ import { hitAt } from "./nearest.js";
 import { legend } from "./legend.js";
 import { scaleBar } from "./scale-bar.js";
 import { bringToView, fit, fitExtent, standpointOf } from "./camera.js";
+import { projectMarks } from "./paint-marks.js";
 import { worldLine, worldSpot } from "./projected.js";
 
 /** @typedef {import("../server/contract.d.ts").Status} Status */
@@ -22,7 +23,7 @@ const ON_PATH = 18;
 export class MapView extends LitElement {
   /** @override */
   static properties = {
-    status: { attribute: false }, path: { attribute: false }, shown: { attribute: false }, pointer: { attribute: false }, measure: { attribute: false },
+    status: { attribute: false }, path: { attribute: false }, shown: { attribute: false }, marks: { attribute: false }, pointer: { attribute: false }, measure: { attribute: false },
     standpoint: { attribute: false }, stamp: { attribute: false }, tilesOn: { state: true }, over: { state: true },
   };
 
@@ -34,6 +35,8 @@ export class MapView extends LitElement {
     this.path = null;
     /** @type {Shown | null} the thing that is open */
     this.shown = null;
+    /** @type {import("./paint-marks.js").Marks | null} what a desk draws upon the plant */
+    this.marks = null;
     /** @type {number | null} glass from the path's start */
     this.pointer = null;
     /** @type {import("../path/track.js").Measure} how far along the path is said */
@@ -85,6 +88,7 @@ export class MapView extends LitElement {
     }
     if (changed.has("path")) this.takePath(map);
     if (changed.has("shown")) this.takeShown(map);
+    if (changed.has("marks")) this.takeMarks(map, changed.get("marks"));
     if (changed.has("pointer") || changed.has("path") || this.pointer !== null) this.takePointer();
   }
 
@@ -137,6 +141,14 @@ export class MapView extends LitElement {
     hand.place = points.length === 1 ? worldSpot(lon, lat) : null;
     hand.label = this.shown?.label ?? "";
     if (points.length > 0) this.afterLayout(() => bringToView(map, points));
+    this.drawing.redraw();
+  }
+
+  /** @param {LeafletMap} map @param {import("./paint-marks.js").Marks | null | undefined} before */
+  takeMarks(map, before) {
+    this.drawing.marks = projectMarks(this.marks);
+    const focus = this.marks?.focus ?? [];
+    if (focus.length > 0 && String(focus) !== String(before?.focus)) this.afterLayout(() => bringToView(map, focus));
     this.drawing.redraw();
   }
 

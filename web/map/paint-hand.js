@@ -137,6 +137,7 @@ function pointer(canvas, frame, inks, spot, text) {
 }
 
 /**
+ * Words on the map, on a ground of paper.
  * @param {CanvasRenderingContext2D} canvas
  * @param {Inks} inks
  * @param {string} text
@@ -144,7 +145,7 @@ function pointer(canvas, frame, inks, spot, text) {
  * @param {number} y
  * @param {"left" | "center"} align
  */
-function said(canvas, inks, text, x, y, align) {
+export function said(canvas, inks, text, x, y, align) {
   if (!text) return;
   canvas.font = `600 12px ${inks.font}`;
   const width = canvas.measureText(text).width;

@@ -4,7 +4,7 @@ import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
 import { dayInWords } from "../quantity/index.js";
 import { RecordView } from "./record-view.js";
-import { fact, heading, marksRead } from "./parts.js";
+import { cutLink, fact, heading, listed, marksRead } from "./parts.js";
 import { tubeChart, tubeLegend } from "./tube-chart.js";
 
 /** @typedef {import("../server/contract.d.ts").Cable} Cable */
@@ -74,6 +74,7 @@ export class CableView extends RecordView {
       ${fact("Excess length", figure(`Excess length of ${it.code}'s glass over its sheath`, "percent", it.overlength_pct, { how: "recorded", source: it.overlength_source, changed: it.changed }))}
       ${fact("Reel", it.reel)}${fact("Laid", it.installed_on === null ? null : dayInWords(it.installed_on))}
       ${fact("Marks", `${it.marks_ink} set governs`)}${fact("Note", it.note)}
+      ${fact("Outage", cutLink("cable", it.code))}${fact("", html`<span class="lighter">or a tube alone:</span> ${listed(it.tubes.map(({ tube }) => cutLink("tube", `${it.code}/${tube}`, String(tube))))}`)}
       ${fact("Other counts", it.counts.length > 0 ? it.counts.map((each) => `${each.fibers} is ${each.name} ${each.numbers}`).join("; ") : null)}
     </dl>`;
   }

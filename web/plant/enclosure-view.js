@@ -4,7 +4,7 @@ import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
 import { wind } from "../quantity/index.js";
 import { RecordView } from "./record-view.js";
-import { fact, heading } from "./parts.js";
+import { cutLink, fact, heading } from "./parts.js";
 import { enclosureDiagram } from "./enclosure-diagram.js";
 import { joinedTable } from "./joined-table.js";
 import { panelsOf, splittersOf } from "./boxes.js";
@@ -52,6 +52,7 @@ export class EnclosureView extends RecordView {
       <dl class="facts">
         ${fact("Structure", link("structure", it.structure))}
         ${fact("Tray glass", html`${figure(`Glass between sheath and joint in ${it.code}`, "length", it.tray_glass_m, { how: "recorded", changed: it.changed })} <span class="lighter">each side of a joint</span>`)}
+        ${fact("Outage", cutLink("enclosure", it.code))}
         ${fact("Note", it.note)}
       </dl>
       ${joinedTable(it)}${this.legs(it)}${panelsOf(it, this.boxes)}${splittersOf(it, this.boxes)}

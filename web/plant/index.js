@@ -9,3 +9,4 @@ export { FiberView } from "./fiber-view.js";
 export { PortView } from "./port-view.js";
 export { PostingsView, PostingView } from "./postings-view.js";
 export { StartView } from "./start-view.js";
+export { useSign } from "./uses.js";

@@ -1,5 +1,5 @@
 import { html, nothing } from "lit";
-import { link } from "../address/index.js";
+import { hrefTo, link } from "../address/index.js";
 import { dayInWords, parseRange, rangeSize } from "../quantity/index.js";
 
 /** @typedef {import("../server/contract.d.ts").Mark} Mark */
@@ -24,6 +24,17 @@ export function heading(what, code, state = "in service") {
 export function fact(term, value) {
   if (value === null || value === undefined || value === "") return nothing;
   return html`<dt>${term}</dt><dd>${value}</dd>`;
+}
+
+/**
+ * The way to the outage desk: who is down if a thing is cut.
+ * @param {"span" | "structure" | "enclosure" | "cable" | "tube"} kind
+ * @param {string} code a tube's as F-1/3
+ * @param {string} [text]
+ * @returns {unknown}
+ */
+export function cutLink(kind, code, text = "Who is down if it is cut") {
+  return html`<a href=${hrefTo("outage", "down", [["cut", `${kind}:${code}`]])}>${text}</a>`;
 }
 
 /**

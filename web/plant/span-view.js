@@ -3,7 +3,7 @@ import { ask, pathTo } from "../server/index.js";
 import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
 import { RecordView } from "./record-view.js";
-import { fact, heading } from "./parts.js";
+import { cutLink, fact, heading } from "./parts.js";
 import { usesInWords } from "./uses.js";
 
 /** @typedef {import("../server/contract.d.ts").Span} Span */
@@ -30,6 +30,7 @@ export class SpanView extends RecordView {
         ${fact("Between", html`${link("structure", it.from)} and ${link("structure", it.to)}`)}
         ${fact("Route", figure(`Route of span ${it.code}`, "length", it.length_m, { how: it.length_basis, changed: it.changed }))}
         ${fact("Circuits on it", figure(`Working circuits on ${it.code}`, "count", it.circuits, { how: "counted", source: "Circuits whose path lies on this span" }))}
+        ${fact("Outage", cutLink("span", it.code))}
         ${fact("Shares", it.shared_risk.length > 0 ? it.shared_risk.join(", ") : null)}
         ${fact("Note", it.note)}
       </dl>

@@ -4,7 +4,7 @@ import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
 import { decimal, wind } from "../quantity/index.js";
 import { RecordView } from "./record-view.js";
-import { fact, heading, listed, marksRead } from "./parts.js";
+import { cutLink, fact, heading, listed, marksRead } from "./parts.js";
 
 /** @typedef {import("../server/contract.d.ts").Structure} Structure */
 /** @typedef {import("../server/contract.d.ts").RunRowHere} RunRowHere */
@@ -33,6 +33,7 @@ export class StructureView extends RecordView {
         ${fact("Position", html`<span class="number">${decimal(it.lat, 6)}, ${decimal(it.lon, 6)}</span>`)}
         ${fact("Within", figure(`Accuracy of ${it.code}'s position`, "length", it.accuracy_m, recorded))}
         ${fact("Shares", it.shared_risk.length > 0 ? it.shared_risk.join(", ") : null)}
+        ${fact("Outage", cutLink("structure", it.code))}
         ${fact("Note", it.note)}
       </dl>
       <h2>Enclosures</h2>

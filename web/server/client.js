@@ -3,7 +3,7 @@
 /** @typedef {import('./contract.d.ts').Problem} ProblemBody */
 
 /**
- * @typedef {string | number | boolean | null | undefined} Param
+ * @typedef {string | number | boolean | readonly string[] | null | undefined} Param several of a name as a list
  */
 
 /** A refusal that the server explained, or that it could not be reached. */
@@ -11,10 +11,12 @@ export class Problem extends Error {
   /**
    * @param {string} code stable name: `not_found`, `unreachable`, ...
    * @param {string} detail what is wrong and what would be right
+   * @param {string} [parameter] the parameter that is wrong, where there is one
    */
-  constructor(code, detail) {
+  constructor(code, detail, parameter = "") {
     super(detail);
     this.code = code;
+    this.parameter = parameter;
   }
 }
 
@@ -39,6 +41,20 @@ export function answerFrom(asOf, asIf) {
  */
 export function ask(path, params = {}, signal) {
   return askAnytime(path, { ...params, as_of: standing.asOf, as_if: standing.asIf }, signal);
+}
+
+/**
+ * Asks the server, from the records chosen, what is too long for an address, or has it note something.
+ * @param {string} path parts already encoded
+ * @param {unknown} body written as JSON
+ * @param {AbortSignal} [signal]
+ * @returns {Promise<any>} the answer, of the type that the contract names
+ */
+export async function send(path, body, signal) {
+  const address = addressOf(path, { as_of: standing.asOf, as_if: standing.asIf });
+  const response = await reach(address, signal, { method: "POST", headers: { "Content-Type": "application/json" }, body: JSON.stringify(body) });
+  if (response.ok) return response.json();
+  throw await problemOf(response);
 }
 
 /**
@@ -72,7 +88,8 @@ export function pathTo(kind, code) {
 function addressOf(path, params) {
   const query = new URLSearchParams();
   for (const [name, value] of Object.entries(params)) {
-    if (value !== null && value !== undefined && value !== "") query.set(name, String(value));
+    if (value instanceof Array) value.forEach((each) => query.append(name, each));
+    else if (value !== null && value !== undefined && value !== "") query.set(name, String(value));
   }
   const text = query.toString();
   return text ? `${path}?${text}` : path;
@@ -81,11 +98,12 @@ function addressOf(path, params) {
 /**
  * @param {string} address
  * @param {AbortSignal | undefined} signal
+ * @param {{ method?: string, headers?: Record<string, string>, body?: string }} [how]
  * @returns {Promise<Response>}
  */
-async function reach(address, signal) {
+async function reach(address, signal, how = {}) {
   try {
-    return await fetch(address, { signal: signal ?? null, headers: { Accept: "application/json" } });
+    return await fetch(address, { ...how, signal: signal ?? null, headers: { Accept: "application/json", ...how.headers } });
   } catch (cause) {
     if (cause instanceof DOMException && cause.name === "AbortError") throw cause;
     throw new Problem("unreachable", "The server does not answer. Check that it is running, then try again.");
@@ -99,7 +117,7 @@ async function reach(address, signal) {
 async function problemOf(response) {
   try {
     const body = /** @type {ProblemBody} */ (await response.json());
-    return new Problem(body.code, body.detail);
+    return new Problem(body.code, body.detail, body.parameter);
   } catch {
     return new Problem("internal", `The server answered ${response.status} and did not say why.`);
   }

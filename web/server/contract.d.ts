@@ -1559,6 +1559,13 @@ export type Structure = {
 
 export type StructureKind = "pole" | "handhole" | "manhole" | "vault" | "pedestal" | "cabinet" | "hut" | "building" | "point";
 
+export type StretchEnd = {
+  /** Structure */
+  structure: string;
+  /** An enclosure there; null where there is none */
+  enclosure: string | null;
+};
+
 export type Suspect = {
   /** The likeliest span, where there is any */
   span?: string;
@@ -1588,6 +1595,12 @@ export type Suspect = {
   contradicted: Array<string>;
   /** Joints of trust unknown or reported on the paths of the explained circuits, the first few */
   rests_on: Array<DoubtfulJoint>;
+  /** Of a stretch, the structures at which it begins and ends, with an enclosure there */
+  ends: Array<StretchEnd>;
+  /** Lines of the spans, in their order; a span that lies at one structure has none */
+  lines: Array<Line>;
+  /** Where the enclosures are, in their order */
+  places: Array<Position>;
 };
 
 export type SuspectsAnswer = {

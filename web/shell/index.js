@@ -2,6 +2,7 @@
 import "../basis/index.js";
 import "../find/index.js";
 import "../map/index.js";
+import "../outage/index.js";
 import "../plant/index.js";
 import "../strip/index.js";
 import "./as-of.js";

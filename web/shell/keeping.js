@@ -11,16 +11,17 @@
  * @property {string} hash the address that was open
  * @property {Standpoint | null} stand where the map stood
  * @property {Unit | null} unit null: the records' own
- * @property {"light" | "dark" | null} theme null: the system's
+ * @property {import("./theme.js").Theme | null} theme null: the system's
  * @property {Measure} measure
  * @property {boolean} folded whether the strip is folded
  * @property {boolean} keys whether single keys act
+ * @property {string} outage the address at which the outage desk was left; empty for none
  */
 
 const NAME = "spanwright";
 
 /** @type {Kept} */
-const FRESH = Object.freeze({ hash: "", stand: null, unit: null, theme: null, measure: "glass", folded: false, keys: true });
+const FRESH = Object.freeze({ hash: "", stand: null, unit: null, theme: null, measure: "glass", folded: false, keys: true, outage: "" });
 
 /**
  * What is kept; a browser that keeps nothing, or kept something else, gives what is fresh.

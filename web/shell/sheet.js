@@ -10,6 +10,7 @@ import { html } from "lit";
  * @property {Status | null} status
  * @property {Path[] | null} paths of the view's own trace; null while it is traced
  * @property {string} stamp from which records
+ * @property {Path[] | null} traced of the path at hand, whatever view it came from; null while it is traced
  */
 
 /**
@@ -29,6 +30,7 @@ const VIEWS = Object.freeze({
     html`<sw-port .code=${address.code} .stamp=${stamp} .zone=${zone} .paths=${paths} .chosen=${address.path}></sw-port>`,
   circuits: ({ stamp }) => html`<sw-circuits .code=${"circuits"} .stamp=${stamp}></sw-circuits>`,
   postings: ({ stamp }, zone) => html`<sw-postings .code=${"postings"} .stamp=${stamp} .zone=${zone}></sw-postings>`,
+  outage: ({ address, stamp, traced }) => html`<sw-outage .address=${address} .stamp=${stamp} .paths=${traced}></sw-outage>`,
   posting: ({ address, stamp }, zone) => html`<sw-posting .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-posting>`,
 });
 
@@ -49,7 +51,7 @@ export function sheetView(state) {
  * @returns {string}
  */
 export function titleOf({ view, code, asOf, asIf }, status) {
-  const thing = view === "start" ? (status?.owner ?? "") : [view, code].filter(Boolean).join(" ");
+  const thing = view === "start" ? (status?.owner ?? "") : view === "outage" ? "Outage" : [view, code].filter(Boolean).join(" ");
   const when = [asOf && `as of ${asOf}`, asIf && `as if ${asIf}`].filter(Boolean).join(", ");
   return [thing, when, "Spanwright"].filter(Boolean).join(" · ");
 }

@@ -1,9 +1,10 @@
 import { LitElement, html, nothing } from "lit";
 import { Asking, answerFrom, ask, waiting } from "../server/index.js";
-import { currentAddress, formatAddress, hrefTo } from "../address/index.js";
+import { currentAddress, formatAddress, hrefTo, parseAddress } from "../address/index.js";
+import { PARTS, hrefToPart } from "../outage/index.js";
 import { UnitController, units } from "../quantity/index.js";
 import { keep, kept } from "./keeping.js";
-import { applyTheme, flipTheme, themeNow } from "./theme.js";
+import { applyTheme, flipTheme, themeInWords } from "./theme.js";
 import { MOST_WAVELENGTHS, offeredWavelengths, pathAtHand, traced } from "./tracing.js";
 import { isTyped, keyList } from "./keys.js";
 import { sheetView, titleOf } from "./sheet.js";
@@ -21,7 +22,7 @@ const MEASURES = ["glass", "sheath", "route"];
 /** The page: Find, the map, the sheet and the strip, and what they have in common. */
 export class ShellView extends LitElement {
   /** @override */
-  static properties = { address: { state: true }, pointer: { state: true }, shown: { state: true }, measure: { state: true }, folded: { state: true }, keysOpen: { state: true } };
+  static properties = { address: { state: true }, pointer: { state: true }, shown: { state: true }, marks: { state: true }, measure: { state: true }, folded: { state: true }, keysOpen: { state: true } };
 
   constructor() {
     super();
@@ -35,6 +36,8 @@ export class ShellView extends LitElement {
     this.pointer = null;
     /** @type {Shown | null} */
     this.shown = null;
+    /** @type {{ map: import("../map/paint-marks.js").Marks, strip: import("../strip/fault-mark.js").FaultMark[] } | null} what the outage desk draws */
+    this.marks = null;
     /** @type {Measure} */
     this.measure = before.measure;
     this.folded = before.folded;
@@ -105,6 +108,8 @@ export class ShellView extends LitElement {
     this.address = address;
     this.standpoint = null;
     keep({ hash: location.hash });
+    if (address.view === "outage") keep({ outage: location.hash });
+    else if (before.view === "outage") this.marks = null;
     answerFrom(address.asOf, address.asIf);
     const elsewhen = before.asOf !== address.asOf || before.asIf !== address.asIf;
     if (elsewhen) void this.readStatus();
@@ -161,7 +166,21 @@ export class ShellView extends LitElement {
       t: () => this.flipTheme(),
       0: () => /** @type {import("../map/index.js").MapView | null} */ (this.querySelector("sw-map"))?.whole(),
       "?": () => this.showKeys(),
+      o: () => (location.hash = this.outage),
+      ...this.partKeys(),
     };
+  }
+
+  /** @returns {Record<string, () => void>} the parts of the outage desk, by number, while it is open */
+  partKeys() {
+    if (this.address.view !== "outage") return {};
+    return Object.fromEntries(PARTS.map(({ part }, index) => [String(index + 1), () => (location.hash = hrefToPart(part))]));
+  }
+
+  /** @returns {string} where the outage desk is found as it was left, from the records that are read now */
+  get outage() {
+    const { asOf, asIf } = this.address;
+    return formatAddress({ ...parseAddress(kept().outage || "#/outage"), asOf, asIf });
   }
 
   async showKeys() {
@@ -214,28 +233,34 @@ export class ShellView extends LitElement {
     return html`<div class="shell" @sw-basis=${this.openBasis} @sw-shown=${(/** @type {CustomEvent} */ event) => (this.shown = event.detail)}
       @sw-point=${this.pointed} @sw-path=${(/** @type {CustomEvent} */ event) => this.go({ path: event.detail })}
       @sw-wavelength=${(/** @type {CustomEvent} */ event) => this.flipWavelength(event.detail)} @sw-measure=${(/** @type {CustomEvent} */ event) => this.setMeasure(event.detail)}
-      @sw-fold=${() => this.fold()} @sw-stand=${(/** @type {CustomEvent} */ event) => keep({ stand: event.detail })}>
+      @sw-marks=${(/** @type {CustomEvent} */ event) => (this.marks = event.detail)} @sw-fold=${() => this.fold()} @sw-stand=${(/** @type {CustomEvent} */ event) => keep({ stand: event.detail })}>
       ${this.bar(status)}
       <main class="desk">
-        <sw-map .status=${status} .path=${paths[0] ?? null} .shown=${this.shown} .pointer=${this.pointer} .measure=${this.measure} .standpoint=${this.standpoint} .stamp=${this.stamp}></sw-map>
+        <sw-map .status=${status} .path=${paths[0] ?? null} .shown=${this.shown} .marks=${this.marks?.map ?? null} .pointer=${this.pointer} .measure=${this.measure} .standpoint=${this.standpoint} .stamp=${this.stamp}></sw-map>
         <article class="sheet" tabindex="-1" aria-label="Sheet">
           <div class="sheet-body">${waiting(this.status)}${this.sheet(status)}</div>
           <sw-basis-note .zone=${status?.time_zone ?? "UTC"}></sw-basis-note>
         </article>
       </main>
-      <sw-strip .paths=${paths} .offered=${offeredWavelengths(this.tracing.answer, status?.wavelengths_nm ?? [])} .chosen=${[...(this.tracing.answer?.byWavelength.keys() ?? [])]}
-        .pointer=${this.pointer} .measure=${this.measure} .folded=${this.folded}></sw-strip>
+      ${this.strip(status, paths)}
       ${this.keysOpen ? html`<aside class="keys-panel" tabindex="-1" aria-label="Keys">${keyList(kept().keys, (on) => keep({ keys: on }))}
         <button type="button" @click=${() => (this.keysOpen = false)}>Close <kbd>Esc</kbd></button></aside>` : nothing}
     </div>`;
   }
 
+  /** @param {Status | null} status @param {Path[]} paths @returns {unknown} */
+  strip(status, paths) {
+    const { answer } = this.tracing;
+    return html`<sw-strip .paths=${paths} .offered=${offeredWavelengths(answer, status?.wavelengths_nm ?? [])} .chosen=${[...(answer?.byWavelength.keys() ?? [])]}
+      .faults=${this.marks?.strip ?? []} .pointer=${this.pointer} .measure=${this.measure} .folded=${this.folded}></sw-strip>`;
+  }
+
   /** @param {Status | null} status @returns {unknown} */
   bar(status) {
-    return html`<header><div class="bar"><a class="mark" href=${hrefTo("start")}>Spanwright</a><span class="owner">${status?.owner ?? ""}</span><sw-find></sw-find>
+    return html`<header><div class="bar"><a class="mark" href=${hrefTo("start")}>Spanwright</a><nav class="desks" aria-label="Desks"><a href=${this.outage} aria-current=${this.address.view === "outage" ? "page" : nothing}>Outage <kbd>o</kbd></a></nav><span class="owner">${status?.owner ?? ""}</span><sw-find></sw-find>
       <sw-as-of .status=${status} .asOf=${this.address.asOf} .asIf=${this.address.asIf}></sw-as-of>
       <span class="bar-buttons"><button type="button" @click=${() => this.flipUnit()}>${units.unit === "ft" ? "feet" : "metres"} <kbd>u</kbd></button><button type="button"
-        @click=${() => this.flipTheme()}>${themeNow() === "dark" ? "night" : "day"} <kbd>t</kbd></button><button type="button" aria-expanded=${this.keysOpen} @click=${() => this.showKeys()}>Keys <kbd>?</kbd></button></span>
+        @click=${() => this.flipTheme()}>${themeInWords()} <kbd>t</kbd></button><button type="button" aria-expanded=${this.keysOpen} @click=${() => this.showKeys()}>Keys <kbd>?</kbd></button></span>
       </div>${status?.invented ? html`<p class="invented">${status.invented}</p>` : nothing}</header>`;
   }
 
@@ -250,7 +275,7 @@ export class ShellView extends LitElement {
     const own = ["circuit", "fiber", "port"].includes(address.view);
     const paths = own && tracing.answer ? [...tracing.answer.byWavelength.values()][0] ?? [] : null;
     const said = own && tracing.problem?.code === "not_found";
-    return html`${sheetView({ address, status, paths, stamp: this.stamp })}${said ? nothing : waiting(tracing)}`;
+    return html`${sheetView({ address, status, paths, stamp: this.stamp, traced: tracing.answer ? [...tracing.answer.byWavelength.values()][0] ?? [] : null })}${said ? nothing : waiting(tracing)}`;
   }
 }
 

@@ -8,6 +8,7 @@ import { curvesOf, fieldOf, yOf } from "./curve-field.js";
 import { drawnAxis } from "./axis.js";
 import { readout, spokenPlace } from "./readout.js";
 import { stripHead } from "./strip-head.js";
+import { drawnFaults } from "./fault-mark.js";
 import { Window, moved, showing, zoomed } from "./window.js";
 
 /** @typedef {import("../server/contract.d.ts").Path} Path */
@@ -21,7 +22,7 @@ const RIGHT = 84;
 export class StripView extends LitElement {
   /** @override */
   static properties = {
-    paths: { attribute: false }, offered: { attribute: false }, chosen: { attribute: false }, pointer: { attribute: false },
+    paths: { attribute: false }, offered: { attribute: false }, chosen: { attribute: false }, faults: { attribute: false }, pointer: { attribute: false },
     measure: { attribute: false }, folded: { attribute: false }, stretch: { state: true }, size: { state: true }, pinned: { state: true },
   };
 
@@ -33,6 +34,8 @@ export class StripView extends LitElement {
     this.offered = [];
     /** @type {number[]} wavelengths drawn, nm */
     this.chosen = [];
+    /** @type {import("./fault-mark.js").FaultMark[]} fault places on the path at hand */
+    this.faults = [];
     /** @type {number | null} glass from the path's start */
     this.pointer = null;
     /** @type {Measure} */
@@ -219,7 +222,7 @@ export class StripView extends LitElement {
       aria-valuemin="0" aria-valuemax=${Math.round(this.whole)} aria-valuenow=${Math.round(this.pointer ?? 0)} aria-valuetext=${spokenPlace(curves, this.pointer ?? 0, this.measure)}
       @pointermove=${this.hovered} @pointerleave=${() => (this.pinned ? undefined : this.point(null))} @click=${this.clicked} @keydown=${this.pressed}>
       <svg width=${size.width} height=${size.height} aria-hidden="true">
-        ${path.track.length > 0 ? svg`${drawnCurves(curves, field, window)}${drawnLine(path, window)}${drawnAxis(path.track, this.measure, window, axis)}${this.pointerMark(curves, field, window, axis)}` : nothing}
+        ${path.track.length > 0 ? svg`${drawnCurves(curves, field, window)}${drawnLine(path, window)}${drawnAxis(path.track, this.measure, window, axis)}${drawnFaults(this.faults, window, axis)}${this.pointerMark(curves, field, window, axis)}` : nothing}
       </svg></div>`;
   }
 

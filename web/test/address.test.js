@@ -11,6 +11,8 @@ test("an address that was written opens the same thing again", () => {
     "#/port/HE-1-F/FS/12",
     "#/fiber/FDR-S-1:25",
     "#/structure/HH-0044",
+    "#/outage/reading?trace=port:HE-1/FDR-S/72&port=HE-1/FDR-S/72&distance=7412&event=C-S03=6038&event=C-S04=8155",
+    "#/outage/down?as_of=41&cut=place:FDR-S-2@1352.2&cut=tube:FDR-S-1/2",
     "#/cable/Kabel-%C3%84%26B?as_of=2026-03-31T14:05",
   ]) {
     assert.equal(formatAddress(parseAddress(hash)), hash);
@@ -22,6 +24,12 @@ test("a circuit, a port and a fiber have a path of their own", () => {
   assert.equal(parseAddress("#/port/E1/P/1?trace=circuit:RC-01").trace, "port:E1/P/1");
   assert.equal(parseAddress("#/enclosure/E1?trace=circuit:RC-01").trace, "circuit:RC-01");
   assert.equal(parseAddress("#/enclosure/E1").trace, "");
+});
+
+test("what a view is asked stays in order, apart from what is common to all views", () => {
+  const { code, asked } = parseAddress("#/outage/down?cut=span:S-2&nm=1310&cut=span:S-1&as_of=3");
+  assert.equal(code, "down");
+  assert.deepEqual(asked, [["cut", "span:S-2"], ["cut", "span:S-1"]]);
 });
 
 test("what cannot be read opens the start", () => {

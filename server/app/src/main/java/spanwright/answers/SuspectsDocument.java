@@ -15,11 +15,13 @@ public final class SuspectsDocument {
 
     private final View view;
     private final Suspects suspects;
+    private final StretchDocument stretches;
 
     /** Of an answer. */
     public SuspectsDocument(View view, Suspects suspects) {
         this.view = view;
         this.suspects = suspects;
+        this.stretches = new StretchDocument(view.records());
     }
 
     /** Writes its members. */
@@ -52,6 +54,7 @@ public final class SuspectsDocument {
         json.texts("tubes", suspect.tubes()).texts("ports", suspect.ports());
         json.texts("explained", codes(suspect.explains())).texts("contradicted", codes(suspect.contradicts()));
         json.list("rests_on", suspect.restsOn(), this::joint);
+        stretches.write(json, suspect);
     }
 
     private static List<String> codes(List<Circuit> circuits) {

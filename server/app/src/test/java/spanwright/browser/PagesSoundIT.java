@@ -56,6 +56,10 @@ class PagesSoundIT {
                 "#/circuits",
                 "#/postings",
                 "#/posting/1",
+                "#/outage",
+                "#/outage/reading",
+                "#/outage/reading?trace=port:HE-1/FDR-S/72&port=HE-1/FDR-S/72&distance=7412&event=C-S03=6038",
+                "#/outage/down?cut=span:HH-S044_HH-S045",
                 NOT_THERE
             })
     void a_view_is_sound_by_day_and_by_night_on_a_laptop_and_on_a_tablet(String hash) {
@@ -83,7 +87,8 @@ class PagesSoundIT {
         return error.contains("status of 404");
     }
 
-    private static List<String> violations(OpenPage opened) {
+    /** What axe-core finds wrong with what is open. */
+    static List<String> violations(OpenPage opened) {
         return new AxeBuilder(opened.page())
                 .withTags(WCAG).analyze().getViolations().stream()
                         .map(PagesSoundIT::said)

@@ -121,6 +121,7 @@ class RoutesTest {
             JsonNode answer = OPEN_API.check(
                     "POST", "/suspects", post("{\"down\":[\"" + circuit.code() + "\"],\"by_path\":true}"));
             assertThat(answer.path("suspects").isArray()).isTrue();
+            answer.path("suspects").forEach(RoutesTest::liesOnTheMap);
         });
     }
 
@@ -144,6 +145,14 @@ class RoutesTest {
 
         assertThat(answer.statusCode()).isIn(400, 404);
         OPEN_API.check("POST", "/suspects", answer);
+    }
+
+    /** A suspect with spans has two ends, and no more lines than spans; each of its enclosures has a place. */
+    private static void liesOnTheMap(JsonNode suspect) {
+        int spans = suspect.path("spans").size();
+        assertThat(suspect.path("ends")).hasSize(spans == 0 ? 0 : 2);
+        assertThat(suspect.path("lines").size()).isLessThanOrEqualTo(spans);
+        assertThat(suspect.path("places")).hasSameSizeAs(suspect.path("enclosures"));
     }
 
     private HttpResponse<byte[]> post(String body) {

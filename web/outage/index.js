@@ -1,0 +1,6 @@
+/** The outage desk: alarms, a reading, who is down. */
+export { OutageDesk } from "./desk-view.js";
+export { AlarmLists } from "./alarms-part.js";
+export { ReadingForm } from "./reading-part.js";
+export { WhoIsDown } from "./down-part.js";
+export { PARTS, hrefToPart } from "./parts.js";
