@@ -1,5 +1,36 @@
 // Written from schema/openapi.json by test/contract-types.js: change the contract, not this file.
 
+export type SpareOption = {
+  /** A path each: its glass from the one structure to the other in order, such as F-1:229 */
+  fibers: Array<Array<string>>;
+  /** A path each: where it begins and ends, at a port if it has one, else at the end of a fiber */
+  ends: Array<Array<string>>;
+  /** Whether every path lies in one tube throughout each cable */
+  same_tube: boolean;
+  /** Of all paths together */
+  new_splices: number;
+  /** Of all paths together, between ports of one structure on the way */
+  new_jumpers: number;
+  /** Where a new splice must be made */
+  enclosures_opened: Array<string>;
+  /** The longest path's, from the port's rear to the port's rear */
+  glass_m: number;
+  /** The worst path's, expected at 1550 nm, the connectors at its two ends apart; null where a fiber on it has no loss at that wavelength */
+  loss_db: number | null;
+  /** Whether every joint that is there on the way is verified */
+  verified: boolean;
+  /** Of all paths together */
+  unverified_joints: number;
+  /** In order; all paths travel the same */
+  spans: Array<string>;
+};
+
+export type SparesAnswer = {
+  /** The last posting that this answer takes in; 0 where the records are empty */
+  posting: number;
+  options: Array<SpareOption>;
+};
+
 export type Alarms = {
   /** Circuits that are down */
   down: Array<string>;

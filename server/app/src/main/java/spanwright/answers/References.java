@@ -71,12 +71,27 @@ public final class References {
 
     /** The circuit with a code that a question names among others. */
     Circuit askedCircuit(String code) {
+        return namedCircuit(code, "circuit");
+    }
+
+    /** The circuit that a parameter names. */
+    Circuit namedCircuit(String code, String parameter) {
         return named(
                 records.circuits().find(code),
                 "circuit",
                 code,
-                "circuit",
+                parameter,
                 records.circuits().list().map(Circuit::code));
+    }
+
+    /** The structure that a parameter names. */
+    Structure namedStructure(String code, String parameter) {
+        return named(
+                records.structures().find(code),
+                "structure",
+                code,
+                parameter,
+                records.structures().list().map(Structure::code));
     }
 
     /** A span that is cut. */
@@ -91,12 +106,7 @@ public final class References {
 
     /** A structure that is cut. */
     Structure cutStructure(String code) {
-        return named(
-                records.structures().find(code),
-                "structure",
-                code,
-                CUT,
-                records.structures().list().map(Structure::code));
+        return namedStructure(code, CUT);
     }
 
     /** An enclosure that is cut. */

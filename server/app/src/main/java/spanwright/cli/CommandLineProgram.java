@@ -48,6 +48,7 @@ public final class CommandLineProgram implements Runnable {
         line.addSubcommand(new FaultCommand(program));
         line.addSubcommand(new ImpactCommand(program));
         line.addSubcommand(new SuspectsCommand(program));
+        line.addSubcommand(new SparesCommand(program));
         line.addSubcommand(new CheckCommand(program));
         line.addSubcommand(new ExportCommand(program));
         line.addSubcommand(new ServeCommand(program));

@@ -34,6 +34,7 @@ final class Routing {
         get("/circuits/{code}", plant::circuit);
         get("/trace", new TraceRoute(answering)::trace);
         get("/fault", new FaultRoute(answering)::fault);
+        get("/spares", new SparesRoute(answering)::spares);
         routes.post("/suspects", timed.apply(new SuspectsRoute(answering, guard)::suspects));
         get("/impact", new ImpactRoute(answering)::impact);
         routes.post("/light", timed.apply(new LightRoute(answering, api.rows(), guard)::light));

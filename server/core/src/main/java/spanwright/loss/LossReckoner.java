@@ -57,6 +57,11 @@ public final class LossReckoner {
         return reasons.isEmpty() ? new PathLoss(path, wavelength, losses, dispersion) : new LossUnknown(reasons);
     }
 
+    /** What one element is expected to lose; nothing where that is not known. */
+    public Optional<Loss> findExpected(Element element) {
+        return reckon(element, new ArrayList<>()).map(ElementLoss::expected);
+    }
+
     private Optional<ElementLoss> reckon(Element element, List<String> reasons) {
         return switch (element.kind()) {
             case FIBER -> fiber((Fiber) element, reasons);

@@ -123,6 +123,11 @@ public final class Tracer {
         return EndKey.of(LegKind.FRONT, ports.panel(), ports.ports().at(index));
     }
 
+    /** What light meets that enters these ends in order: their pieces, and what joins each to the one before. */
+    public List<Element> along(int... entered) {
+        return sketcher.elements(entered);
+    }
+
     /**
      * The paths of a circuit, one a fiber, from its a to its z. Where no path joins the two, it is the one from a as far
      * as it goes without a choice, not complete.
