@@ -37,26 +37,35 @@ public final class SqlNetwork implements AutoCloseable {
 
     /** Writes the network to a fresh file, everything cached. */
     public SqlNetwork(Path file, Snapshot snapshot) throws SQLException {
-        connection = DriverManager.getConnection("jdbc:sqlite:" + file);
+        connection = open(file);
         try (Statement statement = connection.createStatement()) {
-            statement.execute("PRAGMA journal_mode = OFF");
-            statement.execute("PRAGMA synchronous = OFF");
-            statement.execute("PRAGMA cache_size = -4000000");
-            statement.execute("PRAGMA mmap_size = 8000000000");
-            statement.execute("CREATE TABLE sym(a INTEGER PRIMARY KEY, b INTEGER NOT NULL)");
             statement.execute(
                     "CREATE TABLE circuit_end(e INTEGER, circuit INTEGER, PRIMARY KEY(e, circuit)) WITHOUT ROWID");
             statement.execute("CREATE TEMP TABLE start(piece INTEGER PRIMARY KEY)");
         }
         connection.setAutoCommit(false);
-        joins(snapshot.network());
+        joins(connection, snapshot.network());
         circuits(snapshot);
         connection.commit();
         ends = connection.prepareStatement(WALK + LAST);
         hops = connection.prepareStatement(WALK + EVERY);
     }
 
-    private void joins(Network network) throws SQLException {
+    /** A fresh file with room for the joins, everything cached. */
+    static Connection open(Path file) throws SQLException {
+        Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file);
+        try (Statement statement = connection.createStatement()) {
+            statement.execute("PRAGMA journal_mode = OFF");
+            statement.execute("PRAGMA synchronous = OFF");
+            statement.execute("PRAGMA cache_size = -4000000");
+            statement.execute("PRAGMA mmap_size = 8000000000");
+            statement.execute("CREATE TABLE sym(a INTEGER PRIMARY KEY, b INTEGER NOT NULL)");
+        }
+        return connection;
+    }
+
+    /** Writes every join twice. */
+    static void joins(Connection connection, Network network) throws SQLException {
         try (PreparedStatement insert = connection.prepareStatement("INSERT INTO sym VALUES (?, ?)")) {
             int batched = 0;
             for (int end = 0; end < 2 * network.pieces(); end++) {
@@ -97,6 +106,11 @@ public final class SqlNetwork implements AutoCloseable {
     }
 
     private void start(int firstPiece, int count) throws SQLException {
+        start(connection, firstPiece, count);
+    }
+
+    /** Lists the pieces from which the next query starts. */
+    static void start(Connection connection, int firstPiece, int count) throws SQLException {
         try (Statement statement = connection.createStatement()) {
             statement.execute("DELETE FROM start");
             statement.execute("INSERT INTO start WITH RECURSIVE n(i) AS (SELECT " + firstPiece
