@@ -94,7 +94,26 @@ final class CircuitTags {
                 first = first == null || circuit.code().compareTo(first.code()) < 0 ? circuit : first;
             }
         }
-        return first == null ? 0 : first.id() | shared;
+        if (first == null) {
+            return 0;
+        }
+        boolean beside = beginsBeside(atOne, one, other) || beginsBeside(atOther, other, one);
+        return first.id() | shared | (beside ? PathIndex.BESIDE : 0);
+    }
+
+    /** Whether a circuit begins at a front and is not on the path from there to the other front. */
+    private boolean beginsBeside(int[] circuits, long front, long other) {
+        for (int id : circuits) {
+            Circuit circuit = records.circuits().get(id);
+            if (circuit.status() != CircuitStatus.RETIRED
+                    && circuit.a().panel() == EndKey.owner(front)
+                    && circuit.a().ports().contains(EndKey.number(front))
+                    && !joins(circuit, front, other)
+                    && !joins(circuit, other, front)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static boolean joins(Circuit circuit, long a, long z) {
@@ -119,6 +138,11 @@ final class CircuitTags {
                 tagOne(index, paths, circuit, fiber);
             }
         }
+        for (Circuit circuit : byCode) {
+            for (int fiber = 0; fiber < circuit.fibers(); fiber++) {
+                markBeside(index, paths, circuit, fiber);
+            }
+        }
         return new PathIndex(index.pathOf, paths.build(), index.slices, index.unused, index.garbage);
     }
 
@@ -135,6 +159,21 @@ final class CircuitTags {
             int before = paths.get(at + PathIndex.CIRCUIT);
             boolean same = (before & ~PathIndex.SHARED) == circuit.id();
             paths.set(at + PathIndex.CIRCUIT, before == 0 || same ? circuit.id() : before | PathIndex.SHARED);
+        }
+    }
+
+    /** Marks the path on which a fiber begins where another circuit is on it and this one is not. */
+    private void markBeside(PathIndex index, PagedInts.Editor paths, Circuit circuit, int fiber) {
+        int a = blocks.endOf(key(circuit.a(), fiber));
+        if (a == NONE) {
+            return;
+        }
+        int at = index.pathOf(a >> 1) * PathIndex.STRIDE;
+        int tag = paths.get(at + PathIndex.CIRCUIT);
+        boolean marked = (tag & (PathIndex.SHARED | PathIndex.BESIDE)) != 0;
+        boolean atEnd = paths.get(at + PathIndex.FIRST) == a || paths.get(at + PathIndex.LAST) == a;
+        if (tag != 0 && !marked && tag != circuit.id() && atEnd) {
+            paths.set(at + PathIndex.CIRCUIT, tag | PathIndex.BESIDE);
         }
     }
 }

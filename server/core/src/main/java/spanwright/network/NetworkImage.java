@@ -17,7 +17,7 @@ import spanwright.records.Records;
 public final class NetworkImage {
 
     /** To be raised with each change of what the ints mean. */
-    private static final int FORM = 1;
+    private static final int FORM = 2;
 
     private NetworkImage() {}
 

@@ -25,6 +25,10 @@ public final class PathIndex {
     static final int UNUSED = -1;
     /** Set in a circuit's identity where the path has others beside it. */
     static final int SHARED = 1 << 31;
+    /** Set in a circuit's identity where another circuit begins at one of the path's ends and goes elsewhere. */
+    static final int BESIDE = 1 << 30;
+
+    private static final int IDENTITY = ~(SHARED | BESIDE);
 
     static final int NONE = -1;
 
@@ -106,12 +110,21 @@ public final class PathIndex {
      * the first by code; 0 for none. A circuit that crosses a splitter is on none of its glass paths.
      */
     public int circuit(int path) {
-        return paths.get(path * STRIDE + CIRCUIT) & ~SHARED;
+        return paths.get(path * STRIDE + CIRCUIT) & IDENTITY;
     }
 
     /** Whether a path has more circuits than the one that {@link #circuit} gives. */
     public boolean shared(int path) {
         return (paths.get(path * STRIDE + CIRCUIT) & SHARED) != 0;
+    }
+
+    /**
+     * The circuit of a path that is the only one on it, and the only one that begins at either of its ends; 0 where
+     * there is none, or where others have to be looked for.
+     */
+    public int circuitAlone(int path) {
+        int tag = paths.get(path * STRIDE + CIRCUIT);
+        return (tag & ~IDENTITY) == 0 ? tag : 0;
     }
 
     /**
@@ -129,7 +142,7 @@ public final class PathIndex {
         paths.copyRows(across, count, found);
         for (int index = 0, at = 0; index < count; index++, at += STRIDE) {
             found[at + PATH] = across[index];
-            found[at + CIRCUIT] &= ~SHARED;
+            found[at + CIRCUIT] &= IDENTITY;
         }
         return found;
     }

@@ -1,6 +1,5 @@
 package spanwright.outage;
 
-import java.util.Arrays;
 import java.util.BitSet;
 import java.util.Collection;
 import java.util.Comparator;
@@ -162,7 +161,7 @@ final class CutGlass {
 
     /** The glass paths that the cuts meet, each once, rising. */
     int[] paths() {
-        Growing met = new Growing();
+        IntGathering met = new IntGathering();
         IntConsumer meet = piece -> met.add(network.paths().pathOf(piece));
         glass.forEach(meet);
         atFirst.forEach(meet);
@@ -191,33 +190,5 @@ final class CutGlass {
                                 CodeOrder.BY_CODE_POINT)
                         .thenComparingInt(each -> from(each.section())))
                 .toList();
-    }
-
-    /** Ints that grow in number. */
-    private static final class Growing {
-
-        private int[] all = new int[1024];
-        private int count;
-
-        void add(int each) {
-            if (count > 0 && all[count - 1] == each) {
-                return;
-            }
-            if (count == all.length) {
-                all = Arrays.copyOf(all, 2 * count);
-            }
-            all[count++] = each;
-        }
-
-        int[] distinct() {
-            Arrays.sort(all, 0, count);
-            int kept = 0;
-            for (int index = 0; index < count; index++) {
-                if (kept == 0 || all[index] != all[kept - 1]) {
-                    all[kept++] = all[index];
-                }
-            }
-            return Arrays.copyOf(all, kept);
-        }
     }
 }

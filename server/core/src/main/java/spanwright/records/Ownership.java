@@ -20,6 +20,10 @@ import spanwright.splicing.Splitter;
 /** Says which records own a record, by which relation: the one place from which all relation indexes follow. */
 final class Ownership {
 
+    private static final int GROUP_BITS = 15;
+    /** The golden ratio's share of 2^32: neighbouring codes come to lie far apart. */
+    private static final int SPREAD = 0x9E3779B9;
+
     /** Hears of each owner of a record. */
     interface Hearer {
         /** The record belongs to that owner by that relation. */
@@ -43,7 +47,7 @@ final class Ownership {
             case END_STATE -> List.of(Relation.ENCLOSURE_END_STATES);
             case FIBER_FLAG -> List.of(Relation.CABLE_FLAGS);
             case FIBER_COUNT -> List.of(Relation.CABLE_COUNTS);
-            case CIRCUIT -> List.of(Relation.PANEL_CIRCUITS);
+            case CIRCUIT -> List.of(Relation.PANEL_CIRCUITS, Relation.GROUP_CIRCUITS);
             default -> List.of();
         };
     }
@@ -97,5 +101,15 @@ final class Ownership {
         if (circuit.z().panel() != circuit.a().panel()) {
             hearer.owned(Relation.PANEL_CIRCUITS, circuit.z().panel());
         }
+        String group = circuit.protectionGroup();
+        if (group != null) {
+            hearer.owned(Relation.GROUP_CIRCUITS, groupNumber(group));
+        }
+    }
+
+    /** The number by which a protection group, which is no record, is found; few share one. */
+    static int groupNumber(String group) {
+        int hash = group.hashCode() * SPREAD;
+        return hash >>> (Integer.SIZE - GROUP_BITS);
     }
 }

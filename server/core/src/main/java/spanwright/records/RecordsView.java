@@ -4,6 +4,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.Circuit;
 import spanwright.journal.RecordKind;
@@ -154,6 +155,13 @@ public abstract class RecordsView {
     /** The circuits. */
     public Register<Circuit> circuits() {
         return new Register<>(this, RecordKind.CIRCUIT, Circuit.class);
+    }
+
+    /** The circuits of a protection group, in the order in which they were entered. */
+    public Stream<Circuit> groupCircuits(String group) {
+        return circuits()
+                .owned(Relation.GROUP_CIRCUITS, Ownership.groupNumber(group))
+                .filter(circuit -> group.equals(circuit.protectionGroup()));
     }
 
     /** The planning values that replace built-in ones. */

@@ -35,5 +35,7 @@ public enum Relation {
     /** End states in an enclosure. */
     ENCLOSURE_END_STATES,
     /** Circuits that end on a panel's ports. */
-    PANEL_CIRCUITS
+    PANEL_CIRCUITS,
+    /** Circuits of a protection group, and of those that share a number with it; see {@link RecordsView#groupCircuits}. */
+    GROUP_CIRCUITS
 }

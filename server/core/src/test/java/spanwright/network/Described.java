@@ -40,7 +40,8 @@ final class Described {
         there.forEach(end -> back.add(0, end ^ 1));
         String text = min(words(network, there, paths.circle(path)), words(network, back, paths.circle(path)));
         return (paths.circle(path) ? "circle " : "path ") + text + " carries " + paths.circuit(path)
-                + (paths.shared(path) ? " and more" : "");
+                + (paths.shared(path) ? " and more" : "")
+                + (paths.circuitAlone(path) == 0 ? "" : " alone");
     }
 
     private static String min(String one, String other) {

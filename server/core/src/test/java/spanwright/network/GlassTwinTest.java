@@ -10,9 +10,12 @@ import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import spanwright.circuits.Circuit;
+import spanwright.circuits.CircuitStatus;
 import spanwright.plants.PlainGlass;
 import spanwright.plants.RandomPlant;
 import spanwright.records.Records;
+import spanwright.splicing.EndKey;
+import spanwright.splicing.LegKind;
 
 /** The network against its plain, slow twin, on random plants. */
 class GlassTwinTest {
@@ -162,5 +165,20 @@ class GlassTwinTest {
                 : records.circuits().find(codes.first()).map(Circuit::id).orElseThrow();
         assertThat(paths.circuit(path)).isEqualTo(first);
         assertThat(paths.shared(path)).isEqualTo(codes.size() > 1);
+        boolean alone = codes.size() == 1
+                && records.circuits()
+                        .list()
+                        .filter(circuit -> circuit.status() != CircuitStatus.RETIRED && circuit.id() != first)
+                        .noneMatch(circuit -> begins(network, circuit, path));
+        assertThat(paths.circuitAlone(path)).isEqualTo(alone ? first : 0);
+    }
+
+    private static boolean begins(Network network, Circuit circuit, int path) {
+        PathIndex paths = network.paths();
+        return IntStream.range(0, circuit.fibers())
+                .mapToLong(index -> EndKey.of(
+                        LegKind.FRONT, circuit.a().panel(), circuit.a().ports().at(index)))
+                .anyMatch(
+                        key -> key == network.keyOf(paths.firstEnd(path)) || key == network.keyOf(paths.lastEnd(path)));
     }
 }
