@@ -866,6 +866,97 @@ export type ReportingThreshold = {
   note: string | null;
 };
 
+export type Repair = {
+  /** Whether nothing was kept */
+  preview: boolean;
+  /** Its posting; null for a preview */
+  posting: number | null;
+  /** The part toward the start, the piece, the part toward the end */
+  parts: Array<string>;
+  /** The longer cable that they are part of */
+  part_of: string;
+  /** How many are joined at each end of the piece */
+  fibers: number;
+  /** How many joints it makes */
+  joints: number;
+  /** How many records it adds, changes and removes */
+  changes: number;
+  /** Sheath of the piece */
+  piece_m: number;
+  /** The route that it takes */
+  route_m: number;
+  /** Sheath that was coiled along that route, and is there no longer */
+  coils_removed_m: number;
+  joined: Array<{
+    /** Where */
+    enclosure: string;
+    /** Its structure */
+    structure: string;
+    /** Ends on one side */
+    a: string;
+    /** Ends on the other, joined in order */
+    b: string;
+    /** How many joints */
+    count: number;
+    /** The cut cable's coil there before */
+    slack_before_m: number;
+    /** What is left of it */
+    slack_after_m: number;
+  }>;
+  /** Working circuits whose glass the cut goes through, in the order to restore */
+  circuits: Array<string>;
+  /** Measurements of glass that is there no longer, as they were written */
+  left_in_journal: Array<string>;
+};
+
+export type RepairRequest = {
+  /** The reel that was cut */
+  cable: string;
+  /** Sheath position of the cut, from the cable's start; this or span */
+  at_m?: number;
+  /** The span on which it was cut; where the cable lies on it twice, the first time */
+  span?: string;
+  by: string;
+  reason: string;
+  /** Toward the cable's start, then toward its end */
+  enclosures: Array<{
+    /** One that is there, or the code of a new closure */
+    enclosure: string;
+    /** Where it is: a structure that the cable visits */
+    structure: string;
+    /** Tray glass of a new one; 0 where it is not said */
+    tray_glass_m?: number;
+  }>;
+  piece?: {
+    /** Its code; else the next that goes on from the old one */
+    cable?: string | null;
+    /** Its type, of as many fibers at least; else the cut cable's */
+    cable_type?: string | null;
+    /** Its reel */
+    reel?: string | null;
+    /** Its sheath; else as long as the route. What is over is coiled at the second structure */
+    length_m?: number;
+  };
+  /** Coils of the cut cable that were drawn from, at the two structures */
+  slack?: Array<{
+    /** Where it is coiled */
+    structure: string;
+    /** What is still coiled */
+    left_m: number;
+  }>;
+  method?: "fusion" | "mechanical";
+  /** Who made the joints */
+  spliced_by?: string | null;
+  /** When they were made */
+  spliced_on?: string | null;
+  /** Their last day, where they are temporary */
+  temporary_until?: string | null;
+  /** The job */
+  job?: string | null;
+  /** The same as preview=yes */
+  preview?: boolean;
+};
+
 export type TemporaryList = {
   /** The day from which days are counted, in the records' own zone */
   today: string;

@@ -49,6 +49,7 @@ final class Routing {
         get("/incidents/{id}", incidents::one);
         routes.post("/incidents/{id}/entries", incidents::write);
         routes.post("/incidents/{id}/close", incidents::close);
+        routes.post("/repairs", new RepairRoute(api, guard, options.largestBody())::post);
         get("/temporary", new TemporaryRoute(answering, api.incidents())::list);
         get("/openapi.json", Routing::openApi);
         get("/health", ctx -> {

@@ -12,6 +12,7 @@ import java.io.IOException;
 import java.math.BigDecimal;
 import java.time.DateTimeException;
 import java.time.Instant;
+import java.time.LocalDate;
 import java.time.OffsetDateTime;
 import java.util.ArrayList;
 import java.util.List;
@@ -64,6 +65,56 @@ final class Sent {
             throw bad("The body is not one JSON document: " + notJson.getOriginalMessage());
         } catch (IOException impossible) {
             throw bad("The body cannot be read.");
+        }
+    }
+
+    /** An object within, which has no members but those that are known. */
+    static Sent within(JsonNode node, String at, String... known) {
+        object(node, at, Set.of(known));
+        return new Sent(node);
+    }
+
+    /** A list of objects that may be sent; none where it is not. */
+    List<Sent> objects(String name, int most, String... known) {
+        JsonNode list = root.path(name);
+        List<Sent> objects = new ArrayList<>();
+        if (list.isMissingNode()) {
+            return objects;
+        }
+        if (!list.isArray() || list.size() > most) {
+            throw bad(name + " is a list of " + most + " at most.");
+        }
+        list.forEach(each -> objects.add(within(each, name + "[" + objects.size() + "]", known)));
+        return objects;
+    }
+
+    /** A code that must be sent. */
+    String code(String name) {
+        String code = findCode(name);
+        if (code == null) {
+            throw bad(name + " is a code: a text without white space.");
+        }
+        return code;
+    }
+
+    /** A code that may be sent, a text without white space; null where it is not, or is null. */
+    @Nullable
+    String findCode(String name) {
+        String code = findText(name, LONGEST_CODE);
+        if (code != null && !CODE.matcher(code).matches()) {
+            throw bad(name + " is a code: a text without white space.");
+        }
+        return code;
+    }
+
+    /** A date that may be sent; null where it is not, or is null. */
+    @Nullable
+    LocalDate findDate(String name) {
+        String text = findText(name, LONGEST_CODE);
+        try {
+            return text == null ? null : LocalDate.parse(text);
+        } catch (DateTimeException notADate) {
+            throw bad(name + " is a date such as 2026-03-31.");
         }
     }
 

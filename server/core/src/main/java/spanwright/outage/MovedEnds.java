@@ -46,8 +46,11 @@ final class MovedEnds {
 
     /** Joints and states follow; each keeps its identity. Then the old places are given up. */
     void finish() {
-        records.joints().list().filter(joint -> moves(joint.a()) || moves(joint.b())).toList().forEach(joint ->
-                apply.accept(Change.replace(
+        records.joints()
+                .list()
+                .filter(joint -> moves(joint.a()) || moves(joint.b()))
+                .toList()
+                .forEach(joint -> apply.accept(Change.replace(
                         joint,
                         new Joint(
                                 joint.id(),
@@ -56,8 +59,11 @@ final class MovedEnds {
                                 moved(joint.a()),
                                 moved(joint.b()),
                                 joint.facts()))));
-        records.endStates().list().filter(state -> moves(state.ends())).toList().forEach(state ->
-                apply.accept(Change.replace(
+        records.endStates()
+                .list()
+                .filter(state -> moves(state.ends()))
+                .toList()
+                .forEach(state -> apply.accept(Change.replace(
                         state,
                         new EndState(
                                 state.id(),

@@ -34,7 +34,8 @@ final class MovedMeasurements {
         this.end = Pattern.compile(Pattern.quote(code) + "( (back|ahead) .* @ (\\S+))");
         this.measurements = records.measurements()
                 .list()
-                .filter(each -> each.what().startsWith(code + " ") || each.what().startsWith(code + ":"))
+                .filter(each ->
+                        each.what().startsWith(code + " ") || each.what().startsWith(code + ":"))
                 .toList();
         this.passes = records.passesOf(lay.cable().id());
     }
@@ -42,6 +43,15 @@ final class MovedMeasurements {
     /** Takes them off, before the cable gives up its code. */
     void remove(Consumer<Change> apply) {
         measurements.forEach(each -> apply.accept(Change.remove(each)));
+    }
+
+    /** What is not entered again, as it was written. */
+    List<String> left() {
+        return measurements.stream()
+                .map(Measurement::what)
+                .filter(what -> !end.matcher(what).matches())
+                .distinct()
+                .toList();
     }
 
     /** Enters those of ends under the code of their side. */

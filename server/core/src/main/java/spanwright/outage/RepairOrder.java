@@ -53,11 +53,13 @@ public record RepairOrder(
     /**
      * The piece.
      *
+     * @param cable its code; null where the program names it
      * @param cableType the code of its type; null where it is of the cut cable's
      * @param reel its reel, or null
      * @param length its sheath; null where it is as long as the route
      */
     public record Piece(
+            @Nullable String cable,
             @Nullable String cableType,
             @Nullable String reel,
             @Nullable Length length) {}

@@ -2,6 +2,7 @@ package spanwright.outage;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Objects;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import spanwright.plant.Cable;
@@ -22,6 +23,7 @@ final class RepairSite {
     private final RepairOrder order;
     private final List<Refusal> refusals = new ArrayList<>();
     private @Nullable CableLay lay;
+    private Length cut = Length.ZERO;
     private int first;
     private int second;
 
@@ -56,6 +58,11 @@ final class RepairSite {
         return known;
     }
 
+    /** The sheath position of the cut; of a span that is named, its middle. */
+    Length cut() {
+        return cut;
+    }
+
     /** The row at which the part toward the start ends. */
     int first() {
         return first;
@@ -71,6 +78,7 @@ final class RepairSite {
         if (row < 1) {
             return;
         }
+        cut = order.at() == null ? middle(found, row) : order.at();
         first = nearest(found, order.first().structure(), row - 1, -1);
         second = nearest(found, order.second().structure(), row, 1);
         int last = found.rows().size() - 1;
@@ -83,6 +91,11 @@ final class RepairSite {
         }
     }
 
+    private static Length middle(CableLay found, int row) {
+        long out = found.positions().out(row - 1).micrometres();
+        return new Length((out + found.positions().in(row).micrometres()) / 2);
+    }
+
     /** The row to which the span leads on which the cable was cut; 0 where it is not known. */
     private int cutRow(CableLay found) {
         Length at = order.at();
@@ -91,8 +104,8 @@ final class RepairSite {
                 refuse(
                         "repair-off-cable",
                         "at_m",
-                        "The sheath of " + order.cable() + " is " + found.positions().length() + " long; " + at
-                                + " is not on it.");
+                        "The sheath of " + order.cable() + " is "
+                                + found.positions().length() + " long; " + at + " is not on it.");
                 return 0;
             }
             SheathPlace place = found.positions().place(at);
@@ -102,8 +115,8 @@ final class RepairSite {
             refuse(
                     "repair-in-structure",
                     "at_m",
-                    "At " + at + " the sheath lies at " + found.structure(place.row()).code()
-                            + "; give a position on a span, or the span.");
+                    "At " + at + " the sheath lies at "
+                            + found.structure(place.row()).code() + "; give a position on a span, or the span.");
             return 0;
         }
         for (int row = 1; row < found.rows().size(); row++) {
@@ -130,7 +143,8 @@ final class RepairSite {
             refuse(
                     "repair-not-visited",
                     column,
-                    order.cable() + " does not visit " + structure + " " + side + " the cut; name a structure that it does.");
+                    order.cable() + " does not visit " + structure + " " + side
+                            + " the cut; name a structure that it does.");
         } else if (!within) {
             refuse(
                     "repair-at-end",
@@ -143,12 +157,13 @@ final class RepairSite {
         for (int row = first; row <= second; row++) {
             int runRow = found.rows().get(row).id();
             String structure = found.structure(row).code();
-            records.findPassAt(runRow).ifPresent(pass -> refuse(
-                    "repair-over-enclosure",
-                    "first",
-                    order.cable() + " is in "
-                            + records.enclosures().get(pass.enclosure()).code() + " at " + structure
-                            + "; let the piece in between enclosures, beside it."));
+            records.findPassAt(runRow)
+                    .ifPresent(pass -> refuse(
+                            "repair-over-enclosure",
+                            "first",
+                            order.cable() + " is in "
+                                    + records.enclosures().get(pass.enclosure()).code() + " at " + structure
+                                    + "; let the piece in between enclosures, beside it."));
         }
     }
 
@@ -156,7 +171,10 @@ final class RepairSite {
         int fibers = found.type().fibers();
         Optional<CableType> type = pieceType();
         if (type.isEmpty()) {
-            refuse("repair-no-type", "piece", "There is no cable type " + order.piece().cableType() + ".");
+            refuse(
+                    "repair-no-type",
+                    "piece",
+                    "There is no cable type " + order.piece().cableType() + ".");
         } else if (type.get().fibers() < fibers) {
             refuse(
                     "repair-too-few-fibers",
@@ -174,6 +192,15 @@ final class RepairSite {
     }
 
     private void askCoils(CableLay found) {
+        boolean one = order.first().structure().equals(order.second().structure());
+        if (one && !order.slack().isEmpty()) {
+            refuse(
+                    "repair-slack",
+                    "slack",
+                    "Both enclosures are at " + order.first().structure()
+                            + ", so it is not said which coil is meant; correct the run's coils by themselves.");
+            return;
+        }
         for (RepairOrder.Coil coil : order.slack()) {
             int before = nearest(found, coil.structure(), first, -1);
             int row = before >= 0 ? before : nearest(found, coil.structure(), second, 1);
@@ -188,7 +215,8 @@ final class RepairSite {
                         "repair-slack",
                         "slack",
                         "Slack is drawn from the coils beside the piece: at "
-                                + order.first().structure() + " and " + order.second().structure() + ".");
+                                + order.first().structure() + " and "
+                                + order.second().structure() + ".");
             }
         }
     }
@@ -202,6 +230,16 @@ final class RepairSite {
     /** The route that the piece takes. */
     Length route() {
         return lay().routeTo(second).minus(lay().routeTo(first));
+    }
+
+    /** The sheath of the piece. */
+    Length pieceLength() {
+        return Objects.requireNonNullElse(order.piece().length(), route());
+    }
+
+    /** Whether sheath was drawn from the coil at a row. */
+    boolean drawn(int row) {
+        return !left(row).equals(lay().positions().coil(row));
     }
 
     /** What is left of the coil at a row, as the repair has it. */

@@ -8,7 +8,6 @@ import java.util.Map;
 import java.util.Random;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
-import spanwright.circuits.Circuit;
 import spanwright.circuits.CircuitStatus;
 import spanwright.network.RecordsText;
 import spanwright.network.Snapshot;
@@ -35,7 +34,7 @@ class RepairTest {
                 null,
                 new RepairOrder.Place("NEW-1", lay.structure(first).code(), TRAY),
                 new RepairOrder.Place("NEW-2", lay.structure(second).code(), TRAY),
-                new RepairOrder.Piece(null, "R-9", null),
+                new RepairOrder.Piece(null, null, "R-9", null),
                 List.of(),
                 SpliceMethod.FUSION,
                 "Crew 4",
@@ -48,7 +47,9 @@ class RepairTest {
     private static Map<String, List<Path>> paths(Snapshot snapshot) {
         Map<String, List<Path>> paths = new TreeMap<>();
         Tracer tracer = new Tracer(snapshot);
-        snapshot.records().circuits().list()
+        snapshot.records()
+                .circuits()
+                .list()
                 .filter(circuit -> circuit.status() == CircuitStatus.WORKING)
                 .forEach(circuit -> paths.put(circuit.code(), tracer.ofCircuit(circuit)));
         return paths;
@@ -83,7 +84,9 @@ class RepairTest {
         Repair repair = new Repair(editor, order(lay, first, second));
         List<Refusal> refusals = new ArrayList<>(repair.enter());
         refusals.addAll(refusals.isEmpty() ? editor.finish() : List.of());
-        assertThat(refusals).as("seed %d, cable %s, rows %d", seed, cable.code(), first).isEmpty();
+        assertThat(refusals)
+                .as("seed %d, cable %s, rows %d", seed, cable.code(), first)
+                .isEmpty();
         Snapshot after = editor.build(2);
         String at = "seed " + seed + ", cable " + cable.code();
         assertThat(RecordsText.of(after)).as(at).isEqualTo(RecordsText.of(Snapshot.of(after.records())));
@@ -94,10 +97,12 @@ class RepairTest {
     private static void compare(String at, Map<String, List<Path>> before, Map<String, List<Path>> after) {
         assertThat(after.keySet()).as(at).isEqualTo(before.keySet());
         before.forEach((code, paths) -> {
-            List<Path> now = after.get(code);
+            List<Path> now = after.getOrDefault(code, List.of());
             assertThat(now).as("%s, circuit %s", at, code).hasSameSizeAs(paths);
             for (int index = 0; index < paths.size(); index++) {
-                assertThat(now.get(index).complete()).as("%s, circuit %s", at, code).isEqualTo(paths.get(index).complete());
+                assertThat(now.get(index).complete())
+                        .as("%s, circuit %s", at, code)
+                        .isEqualTo(paths.get(index).complete());
             }
         });
     }
