@@ -27,7 +27,7 @@ class SparesRouteTest {
     @Test
     void every_pair_of_structures_is_answered_as_described() {
         int options = 0;
-        for (long seed = 41; seed <= 44; seed++) {
+        for (long seed : new long[] {3, 41, 42, 47}) {
             TestServer another = new TestServer();
             try {
                 options += askAll(another, seed);
