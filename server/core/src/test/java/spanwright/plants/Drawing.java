@@ -13,7 +13,7 @@ import spanwright.records.Refusal;
  * <pre>
  * structure H1 lon lat
  * span H1 H2 [length] [lon lat lon lat ...]      the bends between
- * cable F-1 fibers [type=G.652.D] [over=1.5] [own=1.4] [ink=yellow] [planned] : H1 [+slack] length H2 [+slack] length H3
+ * cable F-1 fibers [tube=12] [type=G.652.D] [over=1.5] [own=1.4] [ink=yellow] [planned] : H1 [+slack] length H2 [+slack] length H3
  * mark F-1 row [in] [out] [ft] [ink]             - for a mark not read
  * enclosure E1 H1 [tray=1.5] [planned] : F-1 [F-2/row] [F-1/row(1-3,5)] ...
  * splitter E1 S1 1x4 [loss] [5=7.5 ...]
@@ -21,6 +21,8 @@ import spanwright.records.Refusal;
  * splice E1 : F-1 back 1-3 = D-1 ahead 1-3 [mechanical] [loss=0.05] [tray=T1] [trust=verified] [job=J]
  * term E1/P/1-3 = F-1 ahead 1-3 [direct] [loss=0.05] [trust=verified]
  * jumper E1/P/1 = E1/Q/1 [length]
+ * state E1 : F-1 back 1-3 = stored [trust=verified]
+ * flag F-1 1-3 dead
  * circuit C-1 E1/P/1-2 E9/P/3-4 [nm=1550] [budget=B+] [retired]
  * planning item expected [limit [sd]]
  * reel F-1 nm loss [index]
@@ -78,6 +80,8 @@ public final class Drawing {
             case "splice" -> joints.splice(words);
             case "term" -> joints.termination(words);
             case "jumper" -> joints.jumper(words);
+            case "state" -> joints.state(words);
+            case "flag" -> joints.flag(words);
             case "circuit" -> services.circuit(words);
             case "planning" -> services.planning(words);
             case "reel" -> services.reel(words);

@@ -3,17 +3,23 @@ package spanwright.plants;
 import java.math.BigDecimal;
 import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.PortRange;
 import spanwright.journal.RecordKind;
 import spanwright.plant.Cable;
 import spanwright.plant.Enclosure;
+import spanwright.plant.FiberRange;
 import spanwright.plant.Pass;
 import spanwright.plant.Trust;
 import spanwright.quantity.Length;
 import spanwright.quantity.Loss;
+import spanwright.splicing.EndCondition;
 import spanwright.splicing.EndRange;
+import spanwright.splicing.EndState;
+import spanwright.splicing.FiberFlag;
+import spanwright.splicing.Flag;
 import spanwright.splicing.Joint;
 import spanwright.splicing.JointFacts;
 import spanwright.splicing.JointKind;
@@ -98,6 +104,26 @@ final class DrawnJoints {
                 new EndRange(new Leg(LegKind.FRONT, a.panel()), a.ports()),
                 new EndRange(new Leg(LegKind.FRONT, b.panel()), b.ports()),
                 facts(Map.of(), null, length));
+    }
+
+    void state(Words words) {
+        Enclosure enclosure = board.enclosureOf(words.next());
+        words.skip(":");
+        EndRange ends = end(enclosure, words);
+        words.skip("=");
+        EndCondition condition = EndCondition.find(words.next()).orElseThrow();
+        Trust trust =
+                Trust.find(words.options("").getOrDefault("trust", "posted")).orElseThrow();
+        board.add(new EndState(
+                board.next(RecordKind.END_STATE), enclosure.id(), ends, condition, trust, null));
+    }
+
+    void flag(Words words) {
+        Cable cable = board.cableOf(words.next());
+        FiberRange fibers = Words.range(words.next());
+        Flag flag = Flag.valueOf(words.next().toUpperCase(Locale.ROOT));
+        board.add(new FiberFlag(
+                board.next(RecordKind.FIBER_FLAG), cable.id(), fibers, flag, null, null, null, null, null));
     }
 
     private void join(JointKind type, int enclosure, EndRange a, EndRange b, JointFacts facts) {

@@ -106,7 +106,7 @@ final class DrawnRoutes {
                 board.next(RecordKind.CABLE_TYPE),
                 "T-" + code,
                 fibers,
-                12,
+                Integer.parseInt(options.getOrDefault("tube", "12")),
                 options.getOrDefault("type", "G.652.D"),
                 Double.parseDouble(options.getOrDefault("over", "0")),
                 false,
