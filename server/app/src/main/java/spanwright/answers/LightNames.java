@@ -52,6 +52,13 @@ public final class LightNames {
         return new LightQuestion(List.copyOf(circuits), closed, panels, verifiedOnly, margin, offers);
     }
 
+    /** A step of an answer: it goes on unless its time is up. */
+    public static void goOn() {
+        if (Thread.currentThread().isInterrupted()) {
+            throw new Unanswerable(Unanswerable.Kind.TOO_SLOW, "The search for light took too long and was stopped.");
+        }
+    }
+
     private Panel panel(String text) {
         return view.records().panels().get(EndKey.owner(references.front(text + "/1")));
     }

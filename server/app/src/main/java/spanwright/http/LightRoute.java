@@ -41,7 +41,7 @@ final class LightRoute {
                         body.verifiedOnly(),
                         TraceQuestion.margin(body.margin()),
                         body.offers());
-        LightAnswer answer = TemporaryPaths.find(view.snapshot(), asked);
+        LightAnswer answer = TemporaryPaths.find(view.snapshot(), asked, LightNames::goOn);
         Answering.json(ctx, Json.bytes(json -> new LightDocument(view, rows, body.until()).write(json, answer)));
     }
 }

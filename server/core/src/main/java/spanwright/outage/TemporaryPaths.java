@@ -38,20 +38,29 @@ public final class TemporaryPaths {
     private final LineBounds bounds;
     private final Set<Integer> down;
 
-    private TemporaryPaths(Snapshot snapshot, LightQuestion question) {
+    private TemporaryPaths(Snapshot snapshot, LightQuestion question, Runnable step) {
         this.snapshot = snapshot;
         this.network = snapshot.network();
         this.question = question;
         this.glass = new SpareGlass(snapshot);
-        this.search = new SpareSearch(glass);
+        this.search = new SpareSearch(glass, step);
         this.trial = new TrialLight(snapshot, question.margin());
         this.bounds = new LineBounds(snapshot, question.margin());
         this.down = question.down().stream().map(Circuit::id).collect(Collectors.toSet());
     }
 
-    /** Answers a question. */
+    /** Answers a question, however long it takes. */
     public static LightAnswer find(Snapshot snapshot, LightQuestion question) {
-        TemporaryPaths paths = new TemporaryPaths(snapshot, question);
+        return find(snapshot, question, () -> {});
+    }
+
+    /**
+     * Answers a question.
+     *
+     * @param step run every so often meanwhile; it stops the answer by what it throws
+     */
+    public static LightAnswer find(Snapshot snapshot, LightQuestion question, Runnable step) {
+        TemporaryPaths paths = new TemporaryPaths(snapshot, question, step);
         DarkGroups dark = DarkGroups.of(paths.glass, question.down(), question.closed());
         List<Seeking> seeking = dark.groups().stream().map(paths::seek).toList();
         List<GroupLight> groups = seeking.stream().map(Seeking::light).toList();

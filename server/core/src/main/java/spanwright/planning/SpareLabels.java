@@ -17,12 +17,15 @@ import spanwright.splicing.JointKind;
 final class SpareLabels {
 
     private static final int NONE = Network.NONE;
+    /** Labels set between two steps; a power of two. */
+    private static final int STEP = 1 << 10;
 
     private final SpareGlass glass;
     private final Network network;
     private final Records records;
     private final SearchLosses losses;
     private final SpareQuery query;
+    private final Runnable step;
     private final SpareStates states;
     private final LabelHeap labels = new LabelHeap();
     private final LeastLosses least = new LeastLosses();
@@ -35,12 +38,13 @@ final class SpareLabels {
     private final SpareMarks closed;
     private final SpareMarks single;
 
-    SpareLabels(SpareGlass glass, SearchLosses losses, SpareMarks closed, SpareQuery query) {
+    SpareLabels(SpareGlass glass, SearchLosses losses, SpareMarks closed, SpareQuery query, Runnable step) {
         this.glass = glass;
         this.network = glass.snapshot().network();
         this.records = glass.snapshot().records();
         this.losses = losses;
         this.query = query;
+        this.step = step;
         this.states = new SpareStates(network, records);
         for (int index = 0; index < query.goals().size(); index++) {
             SpareGoal goal = query.goals().get(index);
@@ -60,7 +64,11 @@ final class SpareLabels {
                 start(start);
             }
         }
-        while (!labels.isEmpty()) {
+        step.run();
+        for (int set = 1; !labels.isEmpty(); set++) {
+            if ((set & (STEP - 1)) == 0) {
+                step.run();
+            }
             int label = labels.poll();
             int state = labels.state(label);
             if (states.isGoal(state)) {

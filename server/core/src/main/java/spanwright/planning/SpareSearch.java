@@ -19,14 +19,25 @@ import spanwright.quantity.Wavelength;
 public final class SpareSearch {
 
     private final SpareGlass glass;
+    private final Runnable step;
     private final Map<Wavelength, SearchLosses> losses = new HashMap<>();
 
     private BitSet closed = new BitSet();
     private SpareMarks closedMarks;
 
-    /** A search of that glass. */
+    /** A search of that glass that runs to its end. */
     public SpareSearch(SpareGlass glass) {
+        this(glass, () -> {});
+    }
+
+    /**
+     * A search of that glass.
+     *
+     * @param step run every so often while it searches; it stops the search by what it throws
+     */
+    public SpareSearch(SpareGlass glass, Runnable step) {
         this.glass = glass;
+        this.step = step;
         this.closedMarks = new SpareMarks(network());
     }
 
@@ -41,7 +52,8 @@ public final class SpareSearch {
                         glass,
                         losses.computeIfAbsent(query.wavelength(), nm -> new SearchLosses(glass.snapshot(), nm)),
                         marks(query.closed()),
-                        query)
+                        query,
+                        step)
                 .find();
     }
 
