@@ -1,5 +1,6 @@
 package spanwright.exchange;
 
+import static java.util.Objects.requireNonNull;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
@@ -67,8 +68,8 @@ class DemoLightTest {
 
     private static GroupLight group(LightAnswer answer, String code) {
         return answer.groups().stream()
-                .filter(each ->
-                        each.group().circuits().stream().anyMatch(circuit -> circuit.code().equals(code)))
+                .filter(each -> each.group().circuits().stream()
+                        .anyMatch(circuit -> circuit.code().equals(code)))
                 .findFirst()
                 .orElseThrow();
     }
@@ -90,7 +91,7 @@ class DemoLightTest {
         LightAnswer answer = TemporaryPaths.find(demo, question(".*", List.of(olt())));
 
         LightOffer far = group(answer, "PON-09-129").offers().get(0);
-        assertThat(far.lit().loss().decibels()).isCloseTo(22.3625, within(0.01));
+        assertThat(requireNonNull(far.lit().loss()).decibels()).isCloseTo(22.3625, within(0.01));
         assertThat(cables(far)).contains("FDR-S").doesNotContain("FDR-N");
         LightOffer water = group(answer, "GOV-03").offers().get(0);
         assertThat(cables(water)).containsExactlyInAnyOrder("FDR-N", "RNG-E");
@@ -98,8 +99,7 @@ class DemoLightTest {
                 .filter(offer -> offer.group().circuits().get(0).code().startsWith("PON-"))
                 .toList();
         assertThat(fed).hasSize(8);
-        assertThat(fed.stream().map(offer -> offer.ways().get(0).start().end()))
-                .doesNotHaveDuplicates();
+        assertThat(fed.stream().map(offer -> offer.ways().get(0).start().end())).doesNotHaveDuplicates();
     }
 
     /** The story's number for the way round the ring is 35.6 dB, against 28 dB. */
@@ -111,7 +111,9 @@ class DemoLightTest {
         assertThat(group.offers()).isEmpty();
         assertThat(group.refused().stream()
                         .filter(refused -> refused.why() == Refused.Why.OVER_BUDGET)
-                        .map(refused -> refused.lit().loss().decibels()))
+                        .map(refused -> requireNonNull(
+                                        requireNonNull(refused.lit()).loss())
+                                .decibels()))
                 .singleElement()
                 .satisfies(loss -> assertThat(loss).isCloseTo(35.6, within(0.05)));
     }

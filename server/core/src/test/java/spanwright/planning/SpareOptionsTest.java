@@ -34,7 +34,8 @@ class SpareOptionsTest {
             term EC/P/13-24 = N-1 back 1-12
             """;
 
-    private static String options(Snapshot snapshot, String from, String to, int fibers, boolean sameTube, Avoided avoided) {
+    private static String options(
+            Snapshot snapshot, String from, String to, int fibers, boolean sameTube, Avoided avoided) {
         Records records = snapshot.records();
         SpareQuestion question = new SpareQuestion(
                 records.structures().find(from).orElseThrow().id(),
@@ -94,8 +95,9 @@ class SpareOptionsTest {
                 flag N-1 1-12 reserved
                 """;
 
-        assertThat(options(plant, 3)).isEqualTo("[F-1:1 G-1:1, F-1:2 G-1:2, F-1:3 G-1:3] opens [EB] splices 1 jumpers 0"
-                + " unverified 0 2000.0 m 0.74 dB one tube [A-B, B-C]");
+        assertThat(options(plant, 3))
+                .isEqualTo("[F-1:1 G-1:1, F-1:2 G-1:2, F-1:3 G-1:3] opens [EB] splices 1 jumpers 0"
+                        + " unverified 0 2000.0 m 0.74 dB one tube [A-B, B-C]");
         assertThat(options(plant, 13)).isEmpty();
     }
 
@@ -115,15 +117,17 @@ class SpareOptionsTest {
                 flag N-1 1-12 reserved
                 """;
 
-        assertThat(options(plant, 1)).isEqualTo("[F-1:9 G-1:9] opens [] splices 0 jumpers 0 unverified 1 2000.0 m"
-                + " 0.74 dB one tube [A-B, B-C]");
+        assertThat(options(plant, 1))
+                .isEqualTo("[F-1:9 G-1:9] opens [] splices 0 jumpers 0 unverified 1 2000.0 m"
+                        + " 0.74 dB one tube [A-B, B-C]");
         assertThat(options(plant, 2)).isEmpty();
     }
 
     @Test
     void one_tube_throughout_each_cable_where_it_is_wished() {
-        String plant = PLANT.replace("cable F-1 12", "cable F-1 12 tube=6").replace("cable G-1 12", "cable G-1 12 tube=6")
-                + """
+        String plant =
+                PLANT.replace("cable F-1 12", "cable F-1 12 tube=6").replace("cable G-1 12", "cable G-1 12 tube=6")
+                        + """
                 splice EB : F-1 back 1 = G-1 ahead 1 trust=verified
                 splice EB : F-1 back 2-6 = G-1 ahead 8-12 trust=verified
                 splice EB : F-1 back 7 = G-1 ahead 7
@@ -165,7 +169,8 @@ class SpareOptionsTest {
                 flag N-1 1-12 dead
                 """;
 
-        assertThat(options(plant, 2)).startsWith("[F-1:1 G-1:1, F-1:2 G-1:2] opens [] splices 0 jumpers 2 unverified 4 2003.0 m");
+        assertThat(options(plant, 2))
+                .startsWith("[F-1:1 G-1:1, F-1:2 G-1:2] opens [] splices 0 jumpers 2 unverified 4 2003.0 m");
     }
 
     @Test

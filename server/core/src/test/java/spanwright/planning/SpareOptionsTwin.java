@@ -25,7 +25,6 @@ final class SpareOptionsTwin {
     /** A path so far. */
     private record Trail(List<Integer> entered, List<Integer> spans, List<Integer> opened, int unverified) {}
 
-    private final Snapshot snapshot;
     private final Network network;
     private final Records records;
     private final FiberUses uses;
@@ -33,7 +32,6 @@ final class SpareOptionsTwin {
     private final List<Trail> whole = new ArrayList<>();
 
     SpareOptionsTwin(Snapshot snapshot, int from, int to) {
-        this.snapshot = snapshot;
         this.network = snapshot.network();
         this.records = snapshot.records();
         this.uses = new FiberUses(snapshot);
@@ -100,7 +98,8 @@ final class SpareOptionsTwin {
         Trail trail = new Trail(entered, spans, before.opened, before.unverified);
         int exit = end ^ 1;
         if (structure(exit) == to) {
-            whole.add(new Trail(entered, spans, before.opened, before.unverified + (rear(exit) ? unverified(exit) : 0)));
+            whole.add(
+                    new Trail(entered, spans, before.opened, before.unverified + (rear(exit) ? unverified(exit) : 0)));
             return;
         }
         for (int next = 0; next < 2 * network.pieces(); next++) {

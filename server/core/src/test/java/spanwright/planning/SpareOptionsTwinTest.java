@@ -107,8 +107,7 @@ class SpareOptionsTwinTest {
     }
 
     /** Ends of a cable joined to those that the one before it left over, in order; the rest is stored. */
-    private static void ends(
-            int at, String end, String[] tail, int[] tails, Random random, StringBuilder later) {
+    private static void ends(int at, String end, String[] tail, int[] tails, Random random, StringBuilder later) {
         int joined = tail[at] == null ? 0 : random.nextInt(FIBERS + 1);
         String before = tail[at];
         for (int fiber = 1; fiber <= FIBERS; fiber++) {

@@ -114,8 +114,7 @@ final class DrawnJoints {
         EndCondition condition = EndCondition.find(words.next()).orElseThrow();
         Trust trust =
                 Trust.find(words.options("").getOrDefault("trust", "posted")).orElseThrow();
-        board.add(new EndState(
-                board.next(RecordKind.END_STATE), enclosure.id(), ends, condition, trust, null));
+        board.add(new EndState(board.next(RecordKind.END_STATE), enclosure.id(), ends, condition, trust, null));
     }
 
     void flag(Words words) {
