@@ -28,7 +28,7 @@ const USUAL = 1550;
 /** The outage desk: from alarms, a place or a reading to where it is cut, who is down, and who is restored first. */
 export class OutageDesk extends LitElement {
   /** @override */
-  static properties = { address: { attribute: false }, stamp: { attribute: false }, paths: { attribute: false }, lists: { state: true }, place: { state: true } };
+  static properties = { address: { attribute: false }, stamp: { attribute: false }, zone: { attribute: false }, paths: { attribute: false }, lists: { state: true }, place: { state: true } };
 
   constructor() {
     super();
@@ -36,6 +36,8 @@ export class OutageDesk extends LitElement {
     this.address = null;
     /** @type {string} from which records; others are asked anew */
     this.stamp = "";
+    /** @type {string} time zone of the records */
+    this.zone = "UTC";
     /** @type {Path[] | null} of the port that was shot; null while they are traced */
     this.paths = null;
     this.lists = keptLists();
@@ -170,6 +172,7 @@ export class OutageDesk extends LitElement {
     return html`<header class="heading desk-heading"><h1>Outage</h1><nav aria-label="Parts of the desk">${PARTS.map(({ part, word }, index) => html`<a href=${hrefToPart(part)}
         aria-current=${part === this.opened ? "page" : nothing}>${word} <kbd>${index + 1}</kbd></a>`)}</nav></header>
       <div @sw-lists=${this.listed} @sw-shot=${this.shotTyped} @sw-place=${this.placeChosen} @sw-cuts=${this.cutsChosen}
+        @sw-incident=${(/** @type {CustomEvent<string>} */ event) => this.go({ code: "incident", asked: [...(this.address?.asked ?? []).filter(([name]) => name !== "incident"), ["incident", event.detail]] })}
         @sw-suspect=${(/** @type {CustomEvent<number>} */ event) => this.setLists({ ...this.lists, chosen: event.detail })}>${this.open()}</div>
       ${cautions()}`;
   }
@@ -178,6 +181,8 @@ export class OutageDesk extends LitElement {
   open() {
     if (this.opened === "reading") return this.reading();
     if (this.opened === "down") return this.whoIsDown();
+    if (this.opened === "light") return html`<sw-light .cuts=${cutsOf(this.address?.asked ?? []).map(writeCut)} .stamp=${this.stamp}></sw-light>`;
+    if (this.opened === "incident") return this.incident();
     return this.alarms();
   }
 
@@ -199,6 +204,15 @@ export class OutageDesk extends LitElement {
     return html`${beside}${fault.answer ? faultView(fault.answer, this.place, shot, this.address?.asked ?? []) : nothing}
       <details class="asked" ?open=${!closed}><summary>${closed ? html`Shot <span class="lighter">${shotInWords(shot)}: open to change it</span>` : "What the OTDR shows"}</summary>
         <sw-reading .shot=${shot} .problem=${fault.problem}></sw-reading></details>`;
+  }
+
+  /** @returns {unknown} */
+  incident() {
+    const { lists, shot } = this;
+    const asked = this.address?.asked ?? [];
+    const hand = { cuts: cutsOf(asked).map(writeCut), down: readList(lists.down).codes, up: readList(lists.up).codes, reading: shot.distance ? shotInWords(shot) : "" };
+    const number = asked.find(([name]) => name === "incident")?.[1] ?? "";
+    return html`<sw-incident .number=${number} .hand=${hand} .zone=${this.zone} .stamp=${this.stamp}></sw-incident>`;
   }
 
   /** @returns {unknown} */

@@ -7,6 +7,8 @@ export const PARTS = Object.freeze([
   { part: "alarms", word: "Alarms" },
   { part: "reading", word: "Reading" },
   { part: "down", word: "Who is down" },
+  { part: "light", word: "Temporary paths" },
+  { part: "incident", word: "Incident" },
 ]);
 
 /**

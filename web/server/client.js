@@ -117,7 +117,7 @@ async function reach(address, signal, how = {}) {
 async function problemOf(response) {
   try {
     const body = /** @type {ProblemBody} */ (await response.json());
-    return new Problem(body.code, body.detail, body.parameter);
+    return new Problem(body.code, [body.detail, ...(body.faults ?? []).map((fault) => fault.text)].join(" "), body.parameter);
   } catch {
     return new Problem("internal", `The server answered ${response.status} and did not say why.`);
   }

@@ -25,7 +25,7 @@ export const KEYS = Object.freeze([
 const PLACES = [
   ["On the map", [["arrows", "move"], ["+ −", "closer, farther"], ["Enter", "open what is nearest the middle"]]],
   ["On the strip", [["← →", "along the glass (with Shift, farther)"], ["↑ ↓", "next, last structure"], ["Home End", "the path's ends"], ["+ −", "closer, farther"], ["Enter", "open what is nearest"], ["Esc", "let the pointer go"]]],
-  ["On the outage desk", [["1 - 5", "its parts in turn"], ["↑ ↓", "in the list of suspects: the next, the one before; the map follows"], ["Enter", "in that list: who is down if it is cut"]]],
+  ["On the outage desk", [["1 to 5", "its parts in turn"], ["↑ ↓", "in the list of suspects: the next, the one before; the map follows"], ["Enter", "in that list: who is down if it is cut"]]],
   ["On a number", [["Enter", "How do you know?"], ["Esc", "back to the number"]]],
   ["In a tube chart", [["arrows", "from fiber to fiber"], ["Enter", "open the fiber"]]],
 ];

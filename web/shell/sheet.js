@@ -30,7 +30,7 @@ const VIEWS = Object.freeze({
     html`<sw-port .code=${address.code} .stamp=${stamp} .zone=${zone} .paths=${paths} .chosen=${address.path}></sw-port>`,
   circuits: ({ stamp }) => html`<sw-circuits .code=${"circuits"} .stamp=${stamp}></sw-circuits>`,
   postings: ({ stamp }, zone) => html`<sw-postings .code=${"postings"} .stamp=${stamp} .zone=${zone}></sw-postings>`,
-  outage: ({ address, stamp, traced }) => html`<sw-outage .address=${address} .stamp=${stamp} .paths=${traced}></sw-outage>`,
+  outage: ({ address, stamp, traced }, zone) => html`<sw-outage .address=${address} .stamp=${stamp} .zone=${zone} .paths=${traced}></sw-outage>`,
   posting: ({ address, stamp }, zone) => html`<sw-posting .code=${address.code} .stamp=${stamp} .zone=${zone}></sw-posting>`,
 });
 
