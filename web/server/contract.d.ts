@@ -819,6 +819,7 @@ export type IncidentRequest = {
   began_at: string;
   /** span:, structure:, cable:, enclosure:, tube: or place: before a code */
   cuts?: Array<string>;
+  /** Circuits that are down; left out or empty: all working ones that cuts take down by the records */
   down?: Array<string>;
   up?: Array<string>;
   reading?: string | null;

@@ -7,10 +7,15 @@ import java.time.OffsetDateTime;
 import java.util.List;
 import java.util.NoSuchElementException;
 import org.jspecify.annotations.Nullable;
+import spanwright.answers.CutReferences;
 import spanwright.answers.IncidentDocuments;
 import spanwright.answers.Json;
+import spanwright.answers.View;
+import spanwright.answers.Views;
 import spanwright.outage.EntryDraft;
 import spanwright.outage.EntryKind;
+import spanwright.outage.HitCircuit;
+import spanwright.outage.Impact;
 import spanwright.outage.Incident;
 import spanwright.outage.IncidentDesk;
 import spanwright.outage.IncidentDraft;
@@ -27,14 +32,16 @@ final class IncidentRoutes {
     private static final int MOST_CIRCUITS = 10_000;
     private static final int MOST_CUTS = 100;
 
+    private final Views views;
     private final IncidentDesk desk;
     private final IncidentDocuments documents;
     private final Guard guard;
     private final int largestBody;
 
     IncidentRoutes(Api api, Guard guard, int largestBody) {
+        this.views = api.views();
         this.desk = api.incidents();
-        this.documents = new IncidentDocuments(api.views(), desk);
+        this.documents = new IncidentDocuments(views, desk);
         this.guard = guard;
         this.largestBody = largestBody;
     }
@@ -74,9 +81,10 @@ final class IncidentRoutes {
         guard.checkPosting(ctx);
         new Question(ctx);
         Sent sent = Sent.read(ctx, largestBody, "title", "by", "began_at", "cuts", "down", "up", "reading");
+        List<String> cuts = sent.codes("cuts", MOST_CUTS);
         IncidentStart start = new IncidentStart(
-                sent.codes("cuts", MOST_CUTS),
-                sent.codes("down", MOST_CIRCUITS),
+                cuts,
+                down(cuts, sent.codes("down", MOST_CIRCUITS)),
                 sent.codes("up", MOST_CIRCUITS),
                 sent.findText("reading", LONGEST_TEXT));
         IncidentDraft draft = new IncidentDraft(
@@ -86,6 +94,18 @@ final class IncidentRoutes {
                 start);
         Incident incident = kept(desk.open(draft));
         answerKept(ctx, incident.id());
+    }
+
+    /** The circuits that are down: those named, else those that what is believed cut takes down by the records. */
+    private List<String> down(List<String> cuts, List<String> named) {
+        if (cuts.isEmpty() || !named.isEmpty()) {
+            return named;
+        }
+        View now = views.now();
+        return Impact.of(now.snapshot(), new CutReferences(now.records()).list(cuts)).circuits().stream()
+                .filter(HitCircuit::down)
+                .map(hit -> hit.circuit().code())
+                .toList();
     }
 
     void write(Context ctx) {

@@ -69,6 +69,33 @@ class OutageDeskIT {
     }
 
     @Test
+    void light_another_way_is_offered_and_what_is_over_budget_is_refused() {
+        try (OpenPage opened = opened("#/outage/light?cut=span:HH-S044_HH-S045")) {
+            opened.find("sw-light button.main").focus();
+            enter(opened);
+            assertThat(opened.find("sw-light .sum")).containsText("of 41 groups come back");
+            assertThat(opened.find(".groups li").first()).containsText("GOV-01");
+            assertThat(opened.find(".groups .refused", "over its budget").first())
+                    .isVisible();
+        }
+    }
+
+    @Test
+    void an_incident_counts_who_is_down_and_keeps_a_log() {
+        try (OpenPage opened = opened("#/outage/incident?cut=span:HH-S044_HH-S045")) {
+            opened.find("sw-incident input[name=title]").fill("Backhoe on FDR-S");
+            type(opened, "sw-incident input[name=by]", "Dana");
+            opened.press("Enter");
+            assertThat(opened.find("sw-incident .sum")).containsText("555");
+            opened.find("sw-incident select[name=kind]").selectOption("found");
+            opened.find("sw-incident input[name=by]").fill("Dana");
+            type(opened, "sw-incident input[name=text]", "136 ft past HH-S044");
+            opened.press("Enter");
+            assertThat(opened.find("sw-incident li", "136 ft past HH-S044")).containsText("Dana");
+        }
+    }
+
+    @Test
     void a_tube_joined_to_the_wrong_one_is_ranked_first() {
         try (OpenPage opened = opened("#/outage")) {
             type(opened, "#list-down", Stories.text("2-wrong-tube/down.txt"));

@@ -60,6 +60,8 @@ class PagesSoundIT {
                 "#/outage/reading",
                 "#/outage/reading?trace=port:HE-1/FDR-S/72&port=HE-1/FDR-S/72&distance=7412&event=C-S03=6038",
                 "#/outage/down?cut=span:HH-S044_HH-S045",
+                "#/outage/light?cut=span:HH-S044_HH-S045",
+                "#/outage/incident?cut=span:HH-S044_HH-S045",
                 NOT_THERE
             })
     void a_view_is_sound_by_day_and_by_night_on_a_laptop_and_on_a_tablet(String hash) {

@@ -7,6 +7,8 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.net.http.HttpResponse;
 import java.time.Instant;
 import java.time.OffsetDateTime;
+import java.util.ArrayList;
+import java.util.List;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -92,6 +94,40 @@ class IncidentRoutesTest {
         JsonNode list = OPEN_API.check("GET", "/incidents", server.asking().get("/incidents"));
         assertThat(list.at("/incidents/0/title").asText()).isEqualTo("Cut near Wendlecote");
         assertThat(list.at("/incidents/0/circuits_down").asInt()).isEqualTo(1);
+    }
+
+    @Test
+    void what_is_believed_cut_says_what_is_down_where_nobody_has() {
+        List<String> down = new ArrayList<>();
+        String cut = server.ledger()
+                .current()
+                .records()
+                .spans()
+                .list()
+                .map(span -> "span:" + span.code())
+                .filter(span -> {
+                    down.clear();
+                    OPEN_API.check("GET", "/impact", server.asking().get("/impact?cut=" + span))
+                            .path("circuits")
+                            .forEach(hit -> {
+                                if (hit.path("state").asText().equals("down")) {
+                                    down.add(hit.path("circuit").asText());
+                                }
+                            });
+                    return !down.isEmpty();
+                })
+                .findFirst()
+                .orElseThrow();
+
+        JsonNode opened = post(
+                "/incidents",
+                "/incidents",
+                "{'title': 'Cut', 'by': 'D. Reed', 'began_at': '" + BEGAN + "', 'cuts': ['" + cut + "']}",
+                201);
+
+        List<String> counted = new ArrayList<>();
+        opened.at("/counts/circuits_down").forEach(code -> counted.add(code.asText()));
+        assertThat(counted).containsExactlyInAnyOrderElementsOf(down);
     }
 
     @Test

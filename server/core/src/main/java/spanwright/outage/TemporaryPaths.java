@@ -1,5 +1,6 @@
 package spanwright.outage;
 
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.Comparator;
@@ -19,6 +20,7 @@ import spanwright.planning.SpareGlass;
 import spanwright.planning.SpareSearch;
 import spanwright.planning.SpareWay;
 import spanwright.planning.SpareWork;
+import spanwright.quantity.Loss;
 
 /**
  * Lights another way: temporary paths over spare glass for circuits that are down, keeping what is left of their own
@@ -198,7 +200,7 @@ public final class TemporaryPaths {
 
         private Refused overBudget(LightOffer offer) {
             BudgetCheck check = offer.lit().check();
-            String over = check == null ? "" : " by " + negated(check);
+            String over = check == null ? "" : " by " + excess(check);
             return new Refused(
                     Refused.Why.OVER_BUDGET,
                     offer.lit().worst().code() + " would be over its budget" + over,
@@ -206,11 +208,10 @@ public final class TemporaryPaths {
                     offer.lit());
         }
 
-        private String negated(BudgetCheck check) {
-            return check.expected()
-                    .minus(check.budget().max())
-                    .plus(check.margin())
-                    .toString();
+        /** By how much, to a hundredth of a dB: rounded up, since it is over however little. */
+        private String excess(BudgetCheck check) {
+            Loss over = check.expected().minus(check.budget().max()).plus(check.margin());
+            return over.exactDecibels().setScale(2, RoundingMode.UP).toPlainString() + " dB";
         }
 
         private String text(Refused.Why why, LightOffer offer) {

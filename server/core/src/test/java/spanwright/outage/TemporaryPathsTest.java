@@ -91,7 +91,7 @@ class TemporaryPathsTest {
         assertThat(light.offers()).hasSize(1);
         assertThat(joints(snapshot, light.offers().get(0))).isEqualTo("SPLICE N-1 back 1 = R-1 ahead 1");
         assertThat(light.refused().get(0).why()).isEqualTo(Refused.Why.OVER_BUDGET);
-        assertThat(light.refused().get(0).text()).startsWith("C-1 would be over its budget by 0.701");
+        assertThat(light.refused().get(0).text()).startsWith("C-1 would be over its budget by 0.71 dB");
     }
 
     @Test
