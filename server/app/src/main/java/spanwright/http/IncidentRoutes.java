@@ -21,8 +21,6 @@ import spanwright.outage.IncidentDesk;
 import spanwright.outage.IncidentDraft;
 import spanwright.outage.IncidentLog;
 import spanwright.outage.IncidentStart;
-import spanwright.outage.Written;
-import spanwright.records.Refusal;
 
 /** Incidents: what there is, and the ways to open, follow and close one. */
 final class IncidentRoutes {
@@ -92,7 +90,7 @@ final class IncidentRoutes {
                 sent.text("by", PostingBody.LONGEST_NAME),
                 sent.time("began_at"),
                 start);
-        Incident incident = kept(desk.open(draft));
+        Incident incident = ProblemException.unlessRefused(desk.open(draft));
         answerKept(ctx, incident.id());
     }
 
@@ -114,7 +112,7 @@ final class IncidentRoutes {
         Sent sent = Sent.read(ctx, largestBody, "kind", "at", "by", "text", "circuits", "users", "oc3", "corrects");
         EntryKind kind = EntryKind.find(sent.text("kind", PostingBody.LONGEST_NAME))
                 .orElseThrow(() -> Sent.bad("kind is one of " + String.join(", ", EntryKind.words()) + "."));
-        kept(desk.write(
+        ProblemException.unlessRefused(desk.write(
                 id,
                 new EntryDraft(
                         kind,
@@ -134,18 +132,8 @@ final class IncidentRoutes {
         Sent sent = Sent.read(ctx, largestBody, "at", "by", "text");
         EntryDraft closed = EntryDraft.of(EntryKind.CLOSED, sent.time("at"), sent.text("by", PostingBody.LONGEST_NAME));
         String text = sent.findText("text", LONGEST_TEXT);
-        kept(desk.write(id, text == null ? closed : closed.saying(text)));
+        ProblemException.unlessRefused(desk.write(id, text == null ? closed : closed.saying(text)));
         answerKept(ctx, id);
-    }
-
-    private static <T> T kept(Written<T> written) {
-        if (written instanceof Written.Refused<T> refused) {
-            List<Refusal> refusals = refused.refusals();
-            throw new ProblemException(Problem.refused(refusals.stream()
-                    .map(refusal -> new Problem.Fault(0, refusal.column(), refusal.sentence()))
-                    .toList()));
-        }
-        return ((Written.Kept<T>) written).kept();
     }
 
     private void answerKept(Context ctx, int id) {
