@@ -32,8 +32,8 @@ public final class PathIndex {
 
     static final int NONE = -1;
 
-    /** Pages of {@link #paths}: rows are read all over the place. */
-    static final PageSize PATHS_PAGE = PageSize.MIDDLE;
+    /** Pages of {@link #paths}: rows are read all over the place. Lost to this: pages of 2,048, a sixth slower. */
+    static final PageSize PATHS_PAGE = PageSize.LARGE;
     /** Pages of {@link #slices}: written once, at the end. */
     static final PageSize SLICES_PAGE = PageSize.LARGE;
 

@@ -7,9 +7,7 @@ package spanwright.paged;
 public enum PageSize {
     /** 512 ints: for what is changed here and there. */
     SMALL(9),
-    /** 2,048 ints: for rows that are read scattered and changed by neighbours. */
-    MIDDLE(11),
-    /** 8,192 ints: for what is only added to at the end. */
+    /** 8,192 ints: for what is read scattered, or only added to at the end. */
     LARGE(13);
 
     private final int shift;
