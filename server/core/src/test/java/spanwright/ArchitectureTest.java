@@ -20,7 +20,8 @@ class ArchitectureTest {
             .then("loss")
             .then("check")
             .then("planning")
-            .then("outage");
+            .then("outage")
+            .then("sheet");
 
     @Test
     void each_package_uses_only_those_before_it() {
