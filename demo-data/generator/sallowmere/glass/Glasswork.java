@@ -87,7 +87,17 @@ public final class Glasswork {
         splice(enclosure, tray, a, b, splicedOn, trust);
     }
 
+    /** Joins ends in a tray, tested since; the draws are those of any other row, so that no other row changes. */
+    public void spliceTested(String enclosure, int tray, Ends a, Ends b, String splicedOn, String testedOn) {
+        dealer.deal(a.count());
+        splice(enclosure, tray, a, b, splicedOn, Trust.VERIFIED, testedOn);
+    }
+
     private void splice(String enclosure, int tray, Ends a, Ends b, String splicedOn, Trust trust) {
+        splice(enclosure, tray, a, b, splicedOn, trust, verifiedOn(trust));
+    }
+
+    private void splice(String enclosure, int tray, Ends a, Ends b, String splicedOn, Trust trust, String verified) {
         boolean known = trust != Trust.UNKNOWN;
         splices.add(
                 enclosure,
@@ -97,7 +107,7 @@ public final class Glasswork {
                 "",
                 "",
                 trust.word(),
-                verifiedOn(trust),
+                verified,
                 known ? splicedOn : "",
                 known && trust != Trust.REPORTED ? "crew " + (1 + random.nextInt(6)) : "",
                 "",
@@ -115,9 +125,20 @@ public final class Glasswork {
         pigtails(enclosure, panel, firstPort, ends, trust);
     }
 
+    /** Brings ends to the rears of ports by pigtails, tested since; the draws are those of any other row. */
+    public void pigtailsTested(String enclosure, String panel, int firstPort, Ends ends, String testedOn) {
+        dealer.deal(ends.count());
+        pigtails(enclosure, panel, firstPort, ends, Trust.VERIFIED, testedOn);
+    }
+
     private void pigtails(String enclosure, String panel, int firstPort, Ends ends, Trust trust) {
+        pigtails(enclosure, panel, firstPort, ends, trust, verifiedOn(trust));
+    }
+
+    private void pigtails(
+            String enclosure, String panel, int firstPort, Ends ends, Trust trust, String verified) {
         String ports = Figures.range(firstPort, firstPort + ends.count() - 1);
-        terminations.add(enclosure, panel, ports, ends.text(), "pigtail", "", trust.word(), verifiedOn(trust), "");
+        terminations.add(enclosure, panel, ports, ends.text(), "pigtail", "", trust.word(), verified, "");
     }
 
     /** Brings a splitter's own leads to the rears of ports. */

@@ -10,6 +10,10 @@ import sallowmere.ring.Trunk;
 /** What lies in the headend, the huts, and the closures of the feeders and the ring. */
 public final class TrunkGlass {
     private static final double TRAY = 1.5;
+    /** Tube 20 of FDR-S, first fiber: the one that was tested end to end, which found 233 dead. */
+    private static final int TESTED = 229;
+
+    private static final String TESTED_ON = "2025-06-12";
 
     private final Plant plant;
     private final Ring ring;
@@ -41,6 +45,8 @@ public final class TrunkGlass {
                 Ends ends = Ends.ahead(reel, first, first + 11);
                 if (first <= 25) {
                     glass.pigtailsTrusted("HE-1", trunk.name(), first, ends, Trust.VERIFIED);
+                } else if (trunk == ring.south() && first == TESTED) {
+                    glass.pigtailsTested("HE-1", trunk.name(), first, ends, TESTED_ON);
                 } else {
                     glass.pigtails("HE-1", trunk.name(), first, ends);
                 }
@@ -72,6 +78,8 @@ public final class TrunkGlass {
             int tray = (first + 11) / 12;
             if (first == 1) {
                 glass.spliceTrusted(code, tray, back, ahead, on, Trust.VERIFIED);
+            } else if (from == ring.south().reel(1) && first == TESTED) {
+                glass.spliceTested(code, tray, back, ahead, on, TESTED_ON);
             } else {
                 glass.splice(code, tray, back, ahead, on);
             }

@@ -6,7 +6,7 @@ import sallowmere.folder.Table;
 public final class Markers {
     private Markers() {}
 
-    /** The flags: nine dead fibers, a lease, suspects, eleven lapsed reservations and three that still hold. */
+    /** The flags: nine dead fibers, a lease, suspects, eleven lapsed reservations and six that still hold. */
     public static Table flags() {
         Table flags = new Table("fiber_flags.csv", "cable", "fibers", "flag", "from", "to", "owner", "reason", "until");
         dead(flags);
@@ -36,27 +36,31 @@ public final class Markers {
     }
 
     private static void lapsed(Table flags) {
-        lapsed(flags, "FDR-S-1", "236", "planning", "quote Q-2025-044, Oxbarrow cold store", "2026-03-31");
-        lapsed(flags, "FDR-S-1", "157-160", "planning", "quote Q-2024-019, Upper Skarn quarry", "2025-01-31");
-        lapsed(flags, "FDR-S-2", "181-182", "planning", "quote Q-2025-007, ferry landing", "2025-09-30");
-        lapsed(flags, "FDR-S-2", "205-208", "engineering", "fourth lateral study", "2024-12-31");
-        lapsed(flags, "FDR-N-1", "145-148", "planning", "quote Q-2023-031, tower at Marl Hollow", "2024-06-30");
-        lapsed(flags, "FDR-N-1", "193-196", "engineering", "cut-over of 2024, never released", "2024-10-15");
-        lapsed(flags, "FDR-N-3", "217-220", "planning", "quote Q-2025-052, sawmill second pair", "2026-06-30");
-        lapsed(flags, "RNG-E-1", "37-40", "planning", "quote Q-2024-063, pump stations", "2025-04-30");
-        lapsed(flags, "RNG-E-2", "85-86", "engineering", "ring upgrade study", "2025-12-31");
-        lapsed(flags, "RNG-E-3", "121-124", "planning", "quote Q-2026-002, neighbor cooperative", "2026-08-31");
-        lapsed(flags, "LAT-09", "13-16", "planning", "quote Q-2025-038, Gantry Mills clinic", "2026-01-31");
+        reserved(flags, "FDR-S-1", "236", "planning", "quote Q-2025-044, Oxbarrow cold store", "2026-03-31");
+        reserved(flags, "FDR-S-1", "157-160", "planning", "quote Q-2024-019, Upper Skarn quarry", "2025-01-31");
+        reserved(flags, "FDR-S-2", "181-182", "planning", "quote Q-2025-007, ferry landing", "2025-09-30");
+        reserved(flags, "FDR-S-2", "205-208", "engineering", "fourth lateral study", "2024-12-31");
+        reserved(flags, "FDR-N-1", "145-148", "planning", "quote Q-2023-031, tower at Marl Hollow", "2024-06-30");
+        reserved(flags, "FDR-N-1", "193-196", "engineering", "cut-over of 2024, never released", "2024-10-15");
+        reserved(flags, "FDR-N-3", "217-220", "planning", "quote Q-2025-052, sawmill second pair", "2026-06-30");
+        reserved(flags, "RNG-E-1", "37-40", "planning", "quote Q-2024-063, pump stations", "2025-04-30");
+        reserved(flags, "RNG-E-2", "85-86", "engineering", "ring upgrade study", "2025-12-31");
+        reserved(flags, "RNG-E-3", "121-124", "planning", "quote Q-2026-002, neighbor cooperative", "2026-08-31");
+        reserved(flags, "LAT-09", "13-16", "planning", "quote Q-2025-038, Gantry Mills clinic", "2026-01-31");
     }
 
-    private static void lapsed(Table flags, String cable, String fibers, String owner, String reason, String until) {
+    private static void reserved(Table flags, String cable, String fibers, String owner, String reason, String until) {
         flags.add(cable, fibers, "reserved", "", "", owner, reason, until);
     }
 
     private static void held(Table flags) {
-        lapsed(flags, "FDR-N-1", "133-136", "planning", "quote Q-2026-057, Corbel Junction depot", "2027-01-15");
-        lapsed(flags, "FDR-N-2", "133-136", "planning", "quote Q-2026-057, Corbel Junction depot", "2027-01-15");
-        lapsed(flags, "RNG-E-1", "25-28", "engineering", "maintenance pair of the ring", "2027-06-30");
+        reserved(flags, "FDR-N-1", "133-136", "planning", "quote Q-2026-057, Corbel Junction depot", "2027-01-15");
+        reserved(flags, "FDR-N-2", "133-136", "planning", "quote Q-2026-057, Corbel Junction depot", "2027-01-15");
+        reserved(flags, "RNG-E-1", "25-28", "engineering", "maintenance pair of the ring", "2027-06-30");
+        String growth = "further splitters of CAB-11";
+        reserved(flags, "FDR-S-1", "92-96", "engineering", growth, "2028-12-31");
+        reserved(flags, "FDR-S-2", "92-96", "engineering", growth, "2028-12-31");
+        reserved(flags, "LAT-11", "8-12", "engineering", growth, "2028-12-31");
     }
 
     /** The laterals' fibers by the feeder's count. */
