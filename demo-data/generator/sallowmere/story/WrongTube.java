@@ -1,7 +1,11 @@
 package sallowmere.story;
 
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Map;
+import java.util.StringJoiner;
 import sallowmere.check.CircuitPaths;
 import sallowmere.check.Journey;
 import sallowmere.check.Network;
@@ -37,6 +41,28 @@ final class WrongTube {
         facts.add("joined in the records", "FDR-N-1 back 217-228 = FDR-N-2 ahead 217-228");
         facts.add("subscribers down", alarms.downCount(), "");
         facts.write(folder);
+        sheet(folder);
+    }
+
+    /**
+     * The crew's sheet as the clerk posts it in the morning: every tube to its own, as the crew believes. It bears no day,
+     * as sheets do, so that the posting's own time tells when the closure was opened.
+     */
+    private static void sheet(Path folder) {
+        StringJoiner changes = new StringJoiner(",\n  ", "[\n  ", "\n ]");
+        for (int first = 1; first <= 288; first += 12) {
+            String a = "FDR-N-1 back " + Figures.range(first, first + 11);
+            changes.add("{\"action\": \"change\", \"table\": \"splices\", \"key\": {\"enclosure\": \"C-N02\", \"a\": \"" + a
+                    + "\"}, \"row\": {\"spliced_on\": null, \"spliced_by\": \"crew 7\", \"trust\": \"posted\","
+                    + " \"verified_on\": null}}");
+        }
+        String sheet = "{\"by\": \"N. Ashby\", \"reason\": \"Pole transfer at P-N080, night of the 3rd: C-N02 made anew\",\n"
+                + " \"changes\": " + changes + "}\n";
+        try {
+            Files.writeString(folder.resolve("sheet.json"), sheet);
+        } catch (IOException unwritable) {
+            throw new UncheckedIOException(unwritable);
+        }
     }
 
     /** A shot on one fiber, which beyond C-N02 is the other; the far end is what the other's records say. */

@@ -9,6 +9,7 @@ import java.util.stream.Collectors;
 import spanwright.answers.Unanswerable.Kind;
 import spanwright.circuits.Circuit;
 import spanwright.outage.Alarms;
+import spanwright.outage.PostedLately;
 
 /** Reads which circuits are down and which are up. */
 public final class AlarmReferences {
@@ -18,11 +19,17 @@ public final class AlarmReferences {
     /**
      * The alarms that codes tell.
      *
+     * @param views where the view is from: its postings tell where splices were made lately
      * @param byPath whether alarms are by path, so that a protected circuit that is up proves its own path
      * @param opened codes of enclosures that a crew is known to have opened lately
      */
     public static Alarms read(
-            View view, Collection<String> down, Collection<String> up, boolean byPath, Collection<String> opened) {
+            Views views,
+            View view,
+            Collection<String> down,
+            Collection<String> up,
+            boolean byPath,
+            Collection<String> opened) {
         References references = new References(view.records());
         if (down.isEmpty()) {
             throw new Unanswerable(Kind.BAD_REQUEST, "Name at least one circuit that is down.", "down");
@@ -42,6 +49,7 @@ public final class AlarmReferences {
                 opened.stream()
                         .map(code -> references.openedEnclosure(code).id())
                         .collect(Collectors.toSet()),
+                PostedLately.of(views.ledger(), view.posting(), view.day(), view.zone()),
                 view.day());
     }
 

@@ -68,8 +68,8 @@ final class SuspectsCommand implements Callable<Integer> {
         List<String> dark = codes(down);
         List<String> light = codes(up);
         List<String> opens = codes(opened);
-        return view.answer(program, of -> {
-            Suspects suspects = Suspects.of(of.snapshot(), AlarmReferences.read(of, dark, light, byPath, opens));
+        return view.answerWithin(program, (views, of) -> {
+            Suspects suspects = Suspects.of(of.snapshot(), AlarmReferences.read(views, of, dark, light, byPath, opens));
             if (json) {
                 Output.document(out, Json.lines(new SuspectsDocument(of, suspects)::write));
             } else {

@@ -1,6 +1,7 @@
 package spanwright.cli;
 
 import java.nio.file.Path;
+import java.util.function.BiFunction;
 import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Option;
@@ -39,6 +40,14 @@ final class ViewOptions {
         try (Ledger ledger = program.open(records)) {
             View view = new Views(ledger).of(asOf, asIf);
             return answer.of(view, ledger.findPosting(view.posting()).orElse(null));
+        }
+    }
+
+    /** Answers from the view that is asked for, and from where it is. */
+    <T> T answerWithin(Program program, BiFunction<Views, View, T> answer) {
+        try (Ledger ledger = program.open(records)) {
+            Views views = new Views(ledger);
+            return answer.apply(views, views.of(asOf, asIf));
         }
     }
 

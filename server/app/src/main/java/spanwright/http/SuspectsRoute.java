@@ -27,7 +27,9 @@ final class SuspectsRoute {
                 SentBody.read(ctx, LARGEST_BODY, "A list of alarms", "leave out circuits far from the outage"));
         View view = answering.view(question);
         Suspects suspects = Suspects.of(
-                view.snapshot(), AlarmReferences.read(view, body.down(), body.up(), body.byPath(), body.opened()));
+                view.snapshot(),
+                AlarmReferences.read(
+                        answering.views(), view, body.down(), body.up(), body.byPath(), body.opened()));
         Answering.json(ctx, Json.bytes(new SuspectsDocument(view, suspects)::write));
     }
 }

@@ -108,6 +108,20 @@ class OutageDeskIT {
     }
 
     @Test
+    void the_sheet_of_that_night_once_posted_tells_by_itself_where_a_closure_was_opened() {
+        try (OpenPage opened = opened("#/outage")) {
+            Object status = opened.page()
+                    .evaluate(
+                            "(body) => fetch('/postings', { method: 'POST', body,"
+                                    + " headers: { 'Content-Type': 'application/json' } }).then((answer) => answer.status)",
+                            Stories.text("2-wrong-tube/sheet.json"));
+            assertThat(status).isEqualTo(201);
+            rank(opened, "2-wrong-tube");
+            assertThat(opened.find(".ranking li").first()).containsText("tubes 7 and 19 crossed at C-N02");
+        }
+    }
+
+    @Test
     void codes_that_the_records_do_not_hold_are_told_with_the_nearest_and_mended_by_a_key() {
         try (OpenPage opened = opened("#/outage")) {
             type(opened, "#list-down", "GOV-1, GOV-02 NO-SUCH-CIRCUIT-ANYWHERE");

@@ -11,6 +11,7 @@ import com.microsoft.playwright.options.ColorScheme;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.TreeSet;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
@@ -204,8 +205,7 @@ class SeedWorksIT {
 
     private static String fact(String name) {
         Map<String, String> facts = Stories.facts("3-seed-works/facts.csv");
-        assertThat(facts).containsKey(name);
-        return facts.get(name);
+        return Objects.requireNonNull(facts.get(name), name);
     }
 
     private static OpenPage opened(String hash) {

@@ -5,7 +5,6 @@ import java.util.BitSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Objects;
 import spanwright.circuits.Circuit;
 import spanwright.network.Network;
 import spanwright.network.Snapshot;
@@ -76,16 +75,16 @@ final class Crossings {
 
     private void pairs(int enclosure, Leg leg, BitSet tubes, int down, List<Candidate> found) {
         CableType type = opened.type(leg);
-        double days = Objects.requireNonNullElse(opened.days(enclosure), 0L);
+        double lately = opened.fresh(enclosure);
         for (int tube = tubes.nextSetBit(0); tube >= 0; tube = tubes.nextSetBit(tube + 1)) {
             if (darkIn(leg, tube, down) == 0) {
                 continue;
             }
-            found.add(candidate(enclosure, leg, tube, 0, down, Likelihood.crossed(days, type.tubes(), tube, 0)));
+            found.add(candidate(enclosure, leg, tube, 0, down, Likelihood.crossed(lately, type.tubes(), tube, 0)));
             for (int other = tubes.nextSetBit(0); other >= 0; other = tubes.nextSetBit(other + 1)) {
                 boolean fresh = other > tube || (other < tube && darkIn(leg, other, down) == 0);
                 if (fresh && (through.containsKey(new Place(leg, other)) || Likelihood.alike(tube, other))) {
-                    double prior = Likelihood.crossed(days, type.tubes(), tube, other);
+                    double prior = Likelihood.crossed(lately, type.tubes(), tube, other);
                     found.add(candidate(enclosure, leg, tube, other, down, prior));
                 }
             }

@@ -37,6 +37,8 @@ final class Likelihood {
     private static final double ALONE = 0.1;
     /** Days after which a crossing made then is half as likely to come to light only now. */
     private static final double HALF_LIFE = 3;
+    /** Of postings that bear no day of splicing: that the work was done shortly before. */
+    static final double POSTED_AFTER = 0.5;
     /** How many days an opening is looked back to. */
     static final int LATELY = 14;
 
@@ -72,15 +74,20 @@ final class Likelihood {
         return sheath * ONE_TUBE;
     }
 
+    /** Of a crossing that it comes to light only so many days after it was made, against the night it was made. */
+    static double fresh(double days) {
+        return Math.pow(0.5, days / HALF_LIFE);
+    }
+
     /**
      * Of two tubes crossed at an enclosure.
      *
-     * @param days since it was opened
+     * @param fresh how likely a crossing there comes to light only now, at most 1
      * @param tubes how many tubes the cable has
      * @param other the other tube; 0 where only one shows
      */
-    static double crossed(double days, int tubes, int tube, int other) {
-        double lately = CROSSED * Math.pow(0.5, days / HALF_LIFE);
+    static double crossed(double fresh, int tubes, int tube, int other) {
+        double lately = CROSSED * fresh;
         int apart = Math.abs(tube - other);
         if (other == 0) {
             return lately * ALONE / tubes;

@@ -6,7 +6,6 @@ import java.util.BitSet;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.TreeMap;
-import org.jspecify.annotations.Nullable;
 import spanwright.plant.CableType;
 import spanwright.records.Records;
 import spanwright.splicing.EndRange;
@@ -19,21 +18,23 @@ import spanwright.splicing.LegKind;
 final class OpenedLately {
 
     private final Records records;
-    private final Map<Integer, Long> days = new TreeMap<>();
+    /** How likely a crossing made there comes to light only now: 1 tonight, less for every day since. */
+    private final Map<Integer, Double> fresh = new TreeMap<>();
     /** Of each leg that is the a side of splices there, the tubes, bit t for tube t. */
     private final Map<Integer, Map<Leg, BitSet>> tubes = new HashMap<>();
 
     OpenedLately(Records records, Alarms alarms) {
         this.records = records;
-        alarms.opened().forEach(enclosure -> days.put(enclosure, 0L));
+        alarms.opened().forEach(enclosure -> fresh.put(enclosure, Likelihood.fresh(0)));
         if (alarms.today() != null) {
             splices(alarms.today());
+            alarms.posted().forEach((enclosure, day) -> opened(enclosure, day, alarms.today(), Likelihood.POSTED_AFTER));
         }
-        if (!days.isEmpty()) {
+        if (!fresh.isEmpty()) {
             records.joints()
                     .list()
                     .filter(joint -> joint.type() == JointKind.SPLICE && !joint.planned())
-                    .filter(joint -> days.containsKey(joint.enclosure())
+                    .filter(joint -> fresh.containsKey(joint.enclosure())
                             && glass(joint.a().leg()))
                     .forEach(joint -> tubes.computeIfAbsent(joint.enclosure(), key -> new HashMap<>())
                             .computeIfAbsent(joint.a().leg(), key -> new BitSet())
@@ -45,11 +46,16 @@ final class OpenedLately {
         for (Joint joint : (Iterable<Joint>) records.joints().list()::iterator) {
             LocalDate made = joint.facts().splicedOn();
             if (made != null && joint.type() == JointKind.SPLICE && !joint.planned()) {
-                long before = ChronoUnit.DAYS.between(made, today);
-                if (before >= 0 && before <= Likelihood.LATELY) {
-                    days.merge(joint.enclosure(), before, Math::min);
-                }
+                opened(joint.enclosure(), made, today, 1);
             }
+        }
+    }
+
+    /** Of several signs of one enclosure the likeliest counts. */
+    private void opened(int enclosure, LocalDate day, LocalDate today, double share) {
+        long before = ChronoUnit.DAYS.between(day, today);
+        if (before >= 0 && before <= Likelihood.LATELY) {
+            fresh.merge(enclosure, share * Likelihood.fresh((double) before), Math::max);
         }
     }
 
@@ -73,13 +79,12 @@ final class OpenedLately {
     }
 
     boolean none() {
-        return days.isEmpty();
+        return fresh.isEmpty();
     }
 
-    /** How many days ago an enclosure was opened; null where it was not, lately. */
-    @Nullable
-    Long days(int enclosure) {
-        return days.get(enclosure);
+    /** How likely a crossing made in one of the enclosures comes to light only now; at most 1. */
+    double fresh(int enclosure) {
+        return fresh.getOrDefault(enclosure, 0.0);
     }
 
     Map<Leg, BitSet> tubes(int enclosure) {
@@ -87,6 +92,6 @@ final class OpenedLately {
     }
 
     Iterable<Integer> enclosures() {
-        return days.keySet();
+        return fresh.keySet();
     }
 }
