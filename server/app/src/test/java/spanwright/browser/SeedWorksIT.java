@@ -54,7 +54,7 @@ class SeedWorksIT {
             List<String[]> truth = Stories.rows("3-seed-works/tube-20.csv");
             assertThat(truth).hasSize(12);
             for (String[] row : truth) {
-                String word = row[1].split("[, ]")[0];
+                String word = row[1].split("[, ]", -1)[0];
                 String said = opened.find(".fiber-cell[title^='fiber " + row[0] + ",']")
                         .first()
                         .getAttribute("title");

@@ -38,7 +38,7 @@ final class Stories {
     static Map<String, String> facts(String file) {
         Map<String, String> facts = new LinkedHashMap<>();
         text(file).lines().skip(1).forEach(line -> {
-            String[] cells = line.split(",(?=(?:[^\"]*\"[^\"]*\")*[^\"]*$)");
+            String[] cells = line.split(",(?=(?:[^\"]*\"[^\"]*\")*[^\"]*$)", -1);
             facts.put(cells[0].replace("\"", ""), cells[1].replace("\"", ""));
         });
         return facts;
@@ -46,8 +46,8 @@ final class Stories {
 
     /** Numbers and ranges parted by spaces, such as {@code 234-235 237}. */
     static List<Integer> numbers(String ranges) {
-        return Stream.of(ranges.split(" "))
-                .map(range -> range.split("-"))
+        return Stream.of(ranges.split(" ", -1))
+                .map(range -> range.split("-", -1))
                 .flatMap(range -> IntStream.rangeClosed(
                                 Integer.parseInt(range[0]), Integer.parseInt(range[range.length - 1]))
                         .boxed())

@@ -142,7 +142,7 @@ class OpenedLatelyTest {
     }
 
     private static List<Circuit> circuits(Snapshot snapshot, String file) throws IOException {
-        return Arrays.stream(Files.readString(STORY.resolve(file)).strip().split(","))
+        return Arrays.stream(Files.readString(STORY.resolve(file)).strip().split(",", -1))
                 .map(code -> snapshot.records().circuits().find(code).orElseThrow())
                 .toList();
     }
