@@ -28,8 +28,7 @@ final class SuspectsRoute {
         View view = answering.view(question);
         Suspects suspects = Suspects.of(
                 view.snapshot(),
-                AlarmReferences.read(
-                        answering.views(), view, body.down(), body.up(), body.byPath(), body.opened()));
+                AlarmReferences.read(answering.views(), view, body.down(), body.up(), body.byPath(), body.opened()));
         Answering.json(ctx, Json.bytes(new SuspectsDocument(view, suspects)::write));
     }
 }

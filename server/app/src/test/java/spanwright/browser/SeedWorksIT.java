@@ -152,9 +152,8 @@ class SeedWorksIT {
             JsonNode posted = ask(opened, "/postings", body.replace('\'', '"'));
             assertThat(posted.path("posting").asInt()).as(posted.toString()).isGreaterThan(1);
 
-            JsonNode next = ask(opened, WAY + "&fibers=4&same_tube=yes")
-                    .path("options")
-                    .get(0);
+            JsonNode next =
+                    ask(opened, WAY + "&fibers=4&same_tube=yes").path("options").get(0);
             assertThat(fibersOf(next, "FDR-S-1")).doesNotContain(229, 230, 231, 232);
             assertThat(fibersOf(next, "LAT-11")).containsExactly(17, 18, 19, 20);
         }
@@ -183,17 +182,18 @@ class SeedWorksIT {
     /** The fibers of a cable that an option takes, in order. */
     private static List<Integer> fibersOf(JsonNode option, String cable) {
         List<Integer> found = new ArrayList<>();
-        option.path("fibers").forEach(path -> texts(path).stream()
-                .filter(fiber -> fiber.startsWith(cable + ":"))
-                .forEach(fiber -> found.add(Integer.valueOf(fiber.substring(cable.length() + 1)))));
+        option.path("fibers")
+                .forEach(path -> texts(path).stream()
+                        .filter(fiber -> fiber.startsWith(cable + ":"))
+                        .forEach(fiber -> found.add(Integer.valueOf(fiber.substring(cable.length() + 1)))));
         found.sort(null);
         return found;
     }
 
     private static double length(OpenPage opened, List<String> spans) {
         return spans.stream()
-                .mapToDouble(span ->
-                        ask(opened, "/spans/" + span).path("length_m").asDouble())
+                .mapToDouble(
+                        span -> ask(opened, "/spans/" + span).path("length_m").asDouble())
                 .sum();
     }
 

@@ -28,7 +28,8 @@ final class Stories {
 
     /** The rows of a story's table, its header apart; a comma stands only between two cells, or in the last of two. */
     static List<String[]> rows(String file) {
-        return text(file).lines()
+        return text(file)
+                .lines()
                 .skip(1)
                 .map(line -> line.replace("\"", "").split(",", 2))
                 .toList();

@@ -89,9 +89,12 @@ class OpenedLatelyTest {
     }
 
     private static void post(List<RowChange> changes) {
-        posted(ledger.post("N. Ashby", "C-N02", editor -> PostingRows.enter(editor, changes).stream()
-                .map(fault -> new Refusal("row", fault.text(), null, null, null))
-                .toList()));
+        posted(ledger.post(
+                "N. Ashby",
+                "C-N02",
+                editor -> PostingRows.enter(editor, changes).stream()
+                        .map(fault -> new Refusal("row", fault.text(), null, null, null))
+                        .toList()));
     }
 
     /** The sheet of that night, its columns changed as told. */
@@ -197,8 +200,8 @@ class OpenedLatelyTest {
                 .distinct()
                 .map(id -> ledger.current().records().enclosures().get(id).code())
                 .filter(code -> code.matches("C-[NS]0[1-7]"))
-                .map(code -> new RowChange(
-                        RowChange.Action.CHANGE, "splices", key(code), new LinkedHashMap<>(redone())))
+                .map(code ->
+                        new RowChange(RowChange.Action.CHANGE, "splices", key(code), new LinkedHashMap<>(redone())))
                 .toList();
         assertThat(many).hasSize(14);
         post(many.subList(0, 13));
@@ -218,11 +221,7 @@ class OpenedLatelyTest {
                 .filter(joint -> joint.enclosure() == id)
                 .findFirst()
                 .orElseThrow();
-        return Map.of(
-                "enclosure",
-                code,
-                "a",
-                new spanwright.records.EndNames(snapshot.records()).ends(first.a()));
+        return Map.of("enclosure", code, "a", new spanwright.records.EndNames(snapshot.records()).ends(first.a()));
     }
 
     private static Map<String, String> redone() {

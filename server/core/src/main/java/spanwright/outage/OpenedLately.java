@@ -28,7 +28,8 @@ final class OpenedLately {
         alarms.opened().forEach(enclosure -> fresh.put(enclosure, Likelihood.fresh(0)));
         if (alarms.today() != null) {
             splices(alarms.today());
-            alarms.posted().forEach((enclosure, day) -> opened(enclosure, day, alarms.today(), Likelihood.POSTED_AFTER));
+            alarms.posted()
+                    .forEach((enclosure, day) -> opened(enclosure, day, alarms.today(), Likelihood.POSTED_AFTER));
         }
         if (!fresh.isEmpty()) {
             records.joints()
