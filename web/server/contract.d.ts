@@ -963,6 +963,7 @@ export type TemporaryList = {
   today: string;
   /** The one longest past its day first; each is listed until it is undone */
   temporary: Array<{
+    changed: PostingRef | null;
     /** Where it is */
     enclosure: string;
     /** Ends on one side */
@@ -1431,7 +1432,16 @@ export type PostingRequest = {
   by: string;
   /** Why */
   reason: string;
+  /** The posting that the changes rest on, such as that of an answer: refused where a later one came meanwhile; null for any */
+  unchanged_since?: number | null;
   changes: Array<RowChange>;
+};
+
+export type UndoRequest = {
+  /** Who posts it */
+  by: string;
+  /** Why */
+  reason: string;
 };
 
 export type PostingSummary = {

@@ -5,6 +5,7 @@ import java.time.temporal.ChronoUnit;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Objects;
+import spanwright.journal.RecordKind;
 import spanwright.splicing.Joint;
 import spanwright.splicing.JointFacts;
 import spanwright.splicing.SpliceMethod;
@@ -13,15 +14,18 @@ import spanwright.splicing.SpliceMethod;
 public final class TemporaryDocument {
 
     private final View view;
+    private final Changes changes;
     private final LocalDate today;
 
     /**
      * Of a view.
      *
+     * @param changes by which postings its records were changed
      * @param today from when days are counted
      */
-    public TemporaryDocument(View view, LocalDate today) {
+    public TemporaryDocument(View view, Changes changes, LocalDate today) {
         this.view = view;
+        this.changes = changes;
         this.today = today;
     }
 
@@ -52,5 +56,6 @@ public final class TemporaryDocument {
         json.date("until", until(joint)).whole("days_left", days).flag("lapsed", days < 0);
         json.text("job", facts.job());
         json.date("spliced_on", facts.splicedOn()).text("spliced_by", facts.splicedBy());
+        changes.write(json, "changed", RecordKind.JOINT, joint.id());
     }
 }

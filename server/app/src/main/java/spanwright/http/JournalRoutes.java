@@ -7,13 +7,14 @@ import spanwright.answers.View;
 import spanwright.http.PostingDesk.Result;
 import spanwright.journal.Posting;
 
-/** Postings: what was posted, and the one way to post. */
+/** Postings: what was posted, the one way to post, and the way to take a posting back. */
 final class JournalRoutes {
 
     private static final int MOST_POSTINGS = 200;
     private static final int MOST_CHANGES = 1_000;
     private static final int FIRST_CHANGES = 200;
     private static final int LARGEST_NUMBER = 999_999_999;
+    private static final int LARGEST_UNDO = 1 << 16;
 
     private final Answering answering;
     private final PostingDocuments documents;
@@ -42,19 +43,40 @@ final class JournalRoutes {
         int number = question.wholeStep("id", 1, LARGEST_NUMBER);
         int from = question.whole("from_change", 0, LARGEST_NUMBER, 0);
         int limit = question.whole("limit", 1, MOST_CHANGES, FIRST_CHANGES);
-        Posting posting = answering
+        Posting posting = find(number);
+        Answering.json(ctx, Json.bytes(json -> documents.one(json, posting, from, limit)));
+    }
+
+    private Posting find(int number) {
+        return answering
                 .views()
                 .ledger()
                 .findPosting(number)
                 .orElseThrow(() -> new ProblemException(Problem.notFound("There is no posting " + number + ".")));
-        Answering.json(ctx, Json.bytes(json -> documents.one(json, posting, from, limit)));
     }
 
     void post(Context ctx) {
         guard.checkPosting(ctx);
         new Question(ctx);
         PostingBody body = PostingBody.read(SentBody.read(ctx, largestBody, "A posting", "post it in parts"));
-        Result result = desk.post(body.by(), body.reason(), body.changes());
+        answer(ctx, desk.post(body.by(), body.reason(), body.unchangedSince(), body.changes()));
+    }
+
+    /** Takes a posting back by another. */
+    void undo(Context ctx) {
+        guard.checkPosting(ctx);
+        int number = new Question(ctx).wholeStep("id", 1, LARGEST_NUMBER);
+        Sent sent = Sent.read(ctx, LARGEST_UNDO, "by", "reason");
+        find(number);
+        answer(
+                ctx,
+                desk.takeBack(
+                        number,
+                        sent.text("by", PostingBody.LONGEST_NAME),
+                        sent.text("reason", PostingBody.LONGEST_REASON)));
+    }
+
+    private void answer(Context ctx, Result result) {
         if (result instanceof Result.Refused refused) {
             throw new ProblemException(Problem.refused(refused.faults().stream()
                     .map(fault -> new Problem.Fault(fault.change(), fault.column(), fault.text()))

@@ -18,20 +18,23 @@ import spanwright.http.PostingDesk.RowChange;
  *
  * @param by the person
  * @param reason why
+ * @param unchangedSince the posting that it rests on, or null
  * @param changes at least one
  */
-record PostingBody(String by, String reason, List<RowChange> changes) {
+record PostingBody(String by, String reason, @Nullable Integer unchangedSince, List<RowChange> changes) {
 
     static final int LONGEST_NAME = 200;
-    private static final int LONGEST_REASON = 2_000;
+    static final int LONGEST_REASON = 2_000;
     private static final int MOST_CHANGES = 100_000;
+    private static final int LARGEST_NUMBER = 999_999_999;
     private static final Pattern COLUMN = Pattern.compile("[a-z0-9_]+");
 
     /** Reads a body; whatever is wrong is a problem of the request. */
     static PostingBody read(byte[] body) {
-        Sent sent = Sent.of(body, "by", "reason", "changes");
+        Sent sent = Sent.of(body, "by", "reason", "unchanged_since", "changes");
         String by = sent.text("by", LONGEST_NAME);
         String reason = sent.text("reason", LONGEST_REASON);
+        Integer unchangedSince = sent.findWhole("unchanged_since", 0, LARGEST_NUMBER);
         JsonNode list = sent.member("changes");
         if (!list.isArray() || list.isEmpty() || list.size() > MOST_CHANGES) {
             throw Sent.bad("changes is a list of 1 to " + MOST_CHANGES + " changes.");
@@ -40,7 +43,7 @@ record PostingBody(String by, String reason, List<RowChange> changes) {
         for (JsonNode each : list) {
             changes.add(change(each, "changes[" + changes.size() + "]"));
         }
-        return new PostingBody(by, reason, List.copyOf(changes));
+        return new PostingBody(by, reason, unchangedSince, List.copyOf(changes));
     }
 
     private static RowChange change(JsonNode node, String at) {

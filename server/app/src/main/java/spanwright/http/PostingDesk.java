@@ -13,9 +13,19 @@ public interface PostingDesk {
      *
      * @param by the person, not blank
      * @param reason why, not blank
+     * @param unchangedSince the posting that the changes rest on: refused where there is a later one; null for any
      * @param changes at least one
      */
-    Result post(String by, String reason, List<RowChange> changes);
+    Result post(String by, String reason, @Nullable Integer unchangedSince, List<RowChange> changes);
+
+    /**
+     * Takes a posting back by another, which is the inverse of it; nothing is erased.
+     *
+     * @param posting its number
+     * @param by the person, not blank
+     * @param reason why, not blank
+     */
+    Result takeBack(int posting, String by, String reason);
 
     /** What is done to a row. */
     enum Action {

@@ -43,6 +43,7 @@ final class Routing {
         // A posting is never stopped half way: who sent it would not know whether it was kept.
         routes.post("/postings", journal::post);
         get("/postings/{id}", journal::one);
+        routes.post("/postings/{id}/undo", journal::undo);
         IncidentRoutes incidents = new IncidentRoutes(api, guard, options.largestBody());
         get("/incidents", incidents::list);
         routes.post("/incidents", incidents::open);

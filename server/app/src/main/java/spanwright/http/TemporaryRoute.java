@@ -21,6 +21,6 @@ final class TemporaryRoute {
     void list(Context ctx) {
         View view = answering.view(new Question(ctx, Answering.AS_OF, Answering.AS_IF));
         LocalDate today = LocalDate.ofInstant(desk.now(), view.zone());
-        Answering.json(ctx, Json.bytes(new TemporaryDocument(view, today)::write));
+        Answering.json(ctx, Json.bytes(new TemporaryDocument(view, answering.changes(view), today)::write));
     }
 }

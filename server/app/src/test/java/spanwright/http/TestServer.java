@@ -6,16 +6,19 @@ import java.time.Clock;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 import spanwright.answers.LastChanges;
 import spanwright.answers.RowTexts;
 import spanwright.answers.Views;
+import spanwright.boot.RecordsRows;
 import spanwright.journal.Change;
 import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
 import spanwright.network.Ledger;
 import spanwright.network.MemoryLedger;
 import spanwright.network.Outcome;
+import spanwright.network.Snapshot;
 import spanwright.network.SnapshotEditor;
 import spanwright.outage.IncidentDesk;
 import spanwright.outage.MemoryIncidents;
@@ -29,6 +32,8 @@ final class TestServer implements AutoCloseable {
 
     private final Ledger ledger = new MemoryLedger(Clock.systemUTC());
     private final ServerOptions options;
+    private final RowTexts rows;
+    private final PostingDesk desk;
     private @Nullable WebServer server;
 
     TestServer() {
@@ -37,6 +42,19 @@ final class TestServer implements AutoCloseable {
 
     TestServer(ServerOptions options) {
         this.options = options;
+        this.rows = new PlainRows();
+        this.desk = new SettingsDesk(ledger);
+    }
+
+    private TestServer(RowTexts rows, Function<Ledger, PostingDesk> desk) {
+        this.options = ServerOptions.at("127.0.0.1", 0);
+        this.rows = rows;
+        this.desk = desk.apply(ledger);
+    }
+
+    /** One that writes and takes every row of a records folder, as the program does. */
+    static TestServer ofAllRows() {
+        return new TestServer(RecordsRows.texts(), RecordsRows::desk);
     }
 
     /** Posts a random plant, as if read from a trusted store. */
@@ -47,6 +65,21 @@ final class TestServer implements AutoCloseable {
             return List.of();
         });
         return ledger;
+    }
+
+    /** Posts all records of a state, as if read from a trusted store. */
+    void plant(Snapshot snapshot) {
+        post(editor -> {
+            for (RecordKind kind : RecordKind.values()) {
+                for (int id = 0; id < snapshot.records().limit(kind); id++) {
+                    Recorded record = snapshot.records().record(kind, id);
+                    if (record != null) {
+                        editor.replay(Change.add(record));
+                    }
+                }
+            }
+            return List.of();
+        });
     }
 
     void rename(Ledger ledger, String owner) {
@@ -67,8 +100,7 @@ final class TestServer implements AutoCloseable {
     }
 
     WebServer server() {
-        WebServer running =
-                server == null ? WebServer.prepare(options, api(ledger)).listen() : server;
+        WebServer running = server == null ? WebServer.prepare(options, api()).listen() : server;
         server = running;
         return running;
     }
@@ -77,12 +109,12 @@ final class TestServer implements AutoCloseable {
         return new Asking(server().address());
     }
 
-    private static Api api(Ledger ledger) {
+    private Api api() {
         return new Api(
                 new Views(ledger),
                 new LastChanges(ledger),
-                new PlainRows(),
-                new SettingsDesk(ledger),
+                rows,
+                desk,
                 new IncidentDesk(ledger, new MemoryIncidents(Clock.systemUTC()), Clock.systemUTC()),
                 "0.1.0",
                 false);
@@ -111,8 +143,16 @@ final class TestServer implements AutoCloseable {
     private record SettingsDesk(Ledger ledger) implements PostingDesk {
 
         @Override
-        public Result post(String by, String reason, List<RowChange> changes) {
-            Outcome outcome = ledger.post(by, reason, editor -> enter(editor, changes));
+        public Result post(String by, String reason, @Nullable Integer unchangedSince, List<RowChange> changes) {
+            return result(ledger.post(by, reason, editor -> enter(editor, changes)));
+        }
+
+        @Override
+        public Result takeBack(int posting, String by, String reason) {
+            return result(ledger.post(by, reason, editor -> editor.takeBack(ledger.changesOf(posting))));
+        }
+
+        private static Result result(Outcome outcome) {
             return outcome instanceof Outcome.Posted posted
                     ? new Result.Posted(posted.posting())
                     : new Result.Refused(((Outcome.Refused) outcome)

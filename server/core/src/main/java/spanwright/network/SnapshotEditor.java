@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import spanwright.journal.Change;
 import spanwright.records.EntryRules;
+import spanwright.records.LaterChanges;
 import spanwright.records.RecordsEditor;
 import spanwright.records.Refusal;
 import spanwright.splicing.Leg;
@@ -16,9 +17,11 @@ public final class SnapshotEditor {
     private final EntryRules entryRules;
     private final EndRules endRules;
     private final List<Change> changes = new ArrayList<>();
+    private final int base;
     private boolean asIf;
 
     SnapshotEditor(Snapshot base) {
+        this.base = base.records().posting();
         this.records = base.records().edit();
         this.network = new NetworkEditor(base.network(), records);
         this.entryRules = new EntryRules(records);
@@ -42,6 +45,25 @@ public final class SnapshotEditor {
             replay(change);
             entryRules.applied(change);
             endRules.applied(change);
+        }
+        return refusals;
+    }
+
+    /** The number of the posting that this goes on from. */
+    public int base() {
+        return base;
+    }
+
+    /**
+     * Takes a posting back: applies the inverse of its changes, the last first, by the same rules as any change.
+     *
+     * @param posted its changes, in the order in which they were entered
+     * @return why it cannot be taken back: what was changed again since, or a rule that breaks; nothing where it is
+     */
+    public List<Refusal> takeBack(List<Change> posted) {
+        List<Refusal> refusals = new ArrayList<>(LaterChanges.ask(records, posted));
+        for (int index = posted.size() - 1; index >= 0 && refusals.isEmpty(); index--) {
+            refusals.addAll(apply(posted.get(index).inverse()));
         }
         return refusals;
     }

@@ -76,7 +76,7 @@ final class SpareEnds {
             return false;
         }
         if (network.joint(end) != 0) {
-            return network.peer(end) != Network.NONE;
+            return network.peer(end) != Network.NONE && !glass.isHeldJoint(end);
         }
         return network.peer(end) == Network.NONE || glass.tubes().cutting(end) != OpenTubes.Cutting.FORBIDDEN;
     }

@@ -26,6 +26,9 @@ public final class SpareGlass {
 
     private static final byte UNJUDGED = -1;
 
+    /** Beside the qualities of spare glass, 0 to 2. */
+    private static final int HELD = 3;
+
     private final Snapshot snapshot;
     private final Network network;
     private final Records records;
@@ -39,6 +42,7 @@ public final class SpareGlass {
     private final long[] likeness;
 
     private final byte[] frontFree;
+    private final byte[] held;
 
     /** The spare glass of a snapshot. */
     public SpareGlass(Snapshot snapshot) {
@@ -52,7 +56,9 @@ public final class SpareGlass {
         this.likeness = new long[network.paths().limit()];
         this.frontFree = new byte[network.pieces()];
         Arrays.fill(quality, UNJUDGED);
+        this.held = new byte[network.pieces()];
         Arrays.fill(frontFree, UNJUDGED);
+        Arrays.fill(held, UNJUDGED);
         network.blocks().forEach(this::place);
     }
 
@@ -154,6 +160,26 @@ public final class SpareGlass {
             quality[piece] = (byte) judge(piece);
         }
         return quality[piece];
+    }
+
+    /**
+     * Whether the joint at an end leads to a fiber that is reserved or leased: then it is somebody else's, and is left as
+     * it is.
+     */
+    boolean isHeldJoint(int end) {
+        int peer = network.peer(end);
+        return peer != Network.NONE && network.joint(end) != 0 && isHeld(peer >> 1);
+    }
+
+    private boolean isHeld(int piece) {
+        if (held[piece] == UNJUDGED) {
+            Block block = network.blockOf(piece);
+            FiberUse use = block.kind() == BlockKind.SECTION
+                    ? uses.of(block, block.number(piece)).use()
+                    : FiberUse.SPARE;
+            held[piece] = (byte) (use == FiberUse.RESERVED || use == FiberUse.LEASED ? 1 : 0);
+        }
+        return held[piece] == 1;
     }
 
     private int judge(int piece) {
@@ -262,7 +288,7 @@ public final class SpareGlass {
         if (block.kind() == BlockKind.SECTION) {
             mark = mark * 1009 + tubes.tube(block, block.number(piece));
         }
-        mark = mark * 4 + quality(piece);
+        mark = mark * 4 + (isHeld(piece) ? HELD : quality(piece));
         return (mark * 1_000_003 + network.joint(entered)) * 1_000_003 + network.joint(entered ^ 1);
     }
 }

@@ -183,7 +183,7 @@ final class SpareLabels {
     private long freeing(int end) {
         boolean joined = network.peer(end) != NONE;
         if (network.joint(end) != 0) {
-            return joined ? 0 : -1;
+            return joined && !glass.isHeldJoint(end) ? 0 : -1;
         }
         if (!joined) {
             return 0;

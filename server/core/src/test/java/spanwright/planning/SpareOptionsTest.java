@@ -5,6 +5,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.List;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 import spanwright.network.Block;
 import spanwright.network.Network;
 import spanwright.network.Snapshot;
@@ -99,6 +101,37 @@ class SpareOptionsTest {
                 .isEqualTo("[F-1:1 G-1:1, F-1:2 G-1:2, F-1:3 G-1:3] opens [EB] splices 1 jumpers 0"
                         + " unverified 0 2000.0 m 0.74 dB one tube [A-B, B-C]");
         assertThat(options(plant, 13)).isEmpty();
+    }
+
+    /** F-1 is spliced on to R-1, which is another's; G-1 is spare, and would need that splice undone. */
+    @ParameterizedTest
+    @ValueSource(strings = {"reserved", "leased"})
+    void a_joint_to_a_fiber_that_is_somebody_else_s_is_not_undone(String flag) {
+        String plant = """
+                structure A 0 0
+                structure B 0.01 0
+                structure C 0.02 0
+                structure D 0.01 0.01
+                cable F-1 2 : A 1000 B
+                cable G-1 2 : B 1000 C
+                cable R-1 2 : B 1000 D
+                enclosure EA A : F-1
+                enclosure EB B : F-1 G-1 R-1
+                enclosure EC C : G-1
+                enclosure ED D : R-1
+                panel EA P 2
+                panel EC P 2
+                term EA/P/1-2 = F-1 ahead 1-2 trust=verified
+                term EC/P/1-2 = G-1 back 1-2 trust=verified
+                splice EB : F-1 back 1-2 = R-1 ahead 1-2 trust=verified
+                state EB : G-1 ahead 1-2 = stored trust=verified
+                state ED : R-1 back 1-2 = stored trust=verified
+                """;
+
+        assertThat(options(plant + "flag R-1 1-2 dead", 1)).contains("splices 1");
+        assertThat(options(plant + "flag R-1 1-2 " + flag, 1)).isEmpty();
+        assertThat(options(plant + "flag R-1 1 " + flag + "\nflag R-1 2 dead", 1))
+                .contains("F-1:2");
     }
 
     @Test

@@ -37,7 +37,7 @@ final class SpareOptionsTwin {
         this.uses = new FiberUses(snapshot);
         this.to = to;
         for (int end = 0; end < 2 * network.pieces(); end++) {
-            if (isSpare(end) && structure(end) == from) {
+            if (isSpare(end) && structure(end) == from && !held(end)) {
                 go(new Trail(List.of(), List.of(), List.of(), rear(end) ? unverified(end) : 0), end);
             }
         }
@@ -98,6 +98,9 @@ final class SpareOptionsTwin {
         Trail trail = new Trail(entered, spans, before.opened, before.unverified);
         int exit = end ^ 1;
         if (structure(exit) == to) {
+            if (held(exit)) {
+                return;
+            }
             whole.add(
                     new Trail(entered, spans, before.opened, before.unverified + (rear(exit) ? unverified(exit) : 0)));
             return;
@@ -106,7 +109,7 @@ final class SpareOptionsTwin {
             if (isSpare(next) && enclosure(next) == enclosure(exit) && isFresh(trail, next)) {
                 if (network.peer(exit) == next) {
                     go(new Trail(entered, spans, before.opened, before.unverified + unverified(next)), next);
-                } else {
+                } else if (!held(exit) && !held(next)) {
                     List<Integer> opened = new ArrayList<>(before.opened);
                     opened.add(enclosure(exit));
                     go(new Trail(entered, spans, opened, before.unverified), next);
@@ -129,6 +132,20 @@ final class SpareOptionsTwin {
         }
         FiberUse use = uses.of(block, block.number(end >> 1)).use();
         return use == FiberUse.SPARE || use == FiberUse.SPARE_VERIFIED;
+    }
+
+    /** Whether an end is joined to a fiber that is reserved or leased; such a joint is not undone. */
+    private boolean held(int end) {
+        int peer = network.peer(end);
+        if (peer == Network.NONE || network.joint(end) == 0) {
+            return false;
+        }
+        Block block = network.blockOf(peer >> 1);
+        if (block.kind() != BlockKind.SECTION) {
+            return false;
+        }
+        FiberUse use = uses.of(block, block.number(peer >> 1)).use();
+        return use == FiberUse.RESERVED || use == FiberUse.LEASED;
     }
 
     private boolean rear(int end) {

@@ -101,7 +101,8 @@ class SpareOptionsTwinTest {
     private static void flag(String cable, Random random, StringBuilder later) {
         for (int fiber = 1; fiber <= FIBERS; fiber++) {
             if (random.nextInt(4) == 0) {
-                later.append("flag " + cable + " " + fiber + " dead\n");
+                String flag = List.of("dead", "reserved", "leased").get(random.nextInt(3));
+                later.append("flag " + cable + " " + fiber + " " + flag + "\n");
             }
         }
     }

@@ -166,9 +166,19 @@ final class SpareTwin {
 
     private boolean freeable(int end) {
         if (network.joint(end) != 0) {
-            return network.peer(end) != Network.NONE;
+            return network.peer(end) != Network.NONE && !held(network.peer(end));
         }
         return network.peer(end) == Network.NONE || !tube(end) || !worksInTube(end);
+    }
+
+    /** Whether somebody else has the fiber to which an end is joined. */
+    private boolean held(int peer) {
+        Block block = network.blockOf(peer >> 1);
+        if (block.kind() != BlockKind.SECTION) {
+            return false;
+        }
+        FiberUse use = glass.uses().of(block, block.number(peer >> 1)).use();
+        return use == FiberUse.RESERVED || use == FiberUse.LEASED;
     }
 
     /** Whether freeing an end opens a closed tube. */
