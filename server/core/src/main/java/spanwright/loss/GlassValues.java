@@ -30,6 +30,7 @@ public final class GlassValues {
     private final Catalogue catalogue;
     private final Map<String, TypeCurves> types = new HashMap<>();
     private final Map<Integer, ReelCurves> reels = new HashMap<>();
+    private final Map<LitCable, Optional<TableValue>> losses = new HashMap<>();
 
     /** The values of glass in these records. */
     public GlassValues(RecordsView records) {
@@ -68,8 +69,15 @@ public final class GlassValues {
         }
     }
 
+    /** A cable at a wavelength. */
+    private record LitCable(int cable, Wavelength wavelength) {}
+
     /** Expected loss of a cable's glass in dB/km; none outside of its tables. */
     public Optional<TableValue> findLoss(Cable cable, Wavelength wavelength) {
+        return losses.computeIfAbsent(new LitCable(cable.id(), wavelength), key -> reckonLoss(cable, wavelength));
+    }
+
+    private Optional<TableValue> reckonLoss(Cable cable, Wavelength wavelength) {
         return ofReel(cable, reel(cable).loss().at(wavelength)).or(() -> findLoss(typeOf(cable), wavelength));
     }
 

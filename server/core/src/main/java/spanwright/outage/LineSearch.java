@@ -80,6 +80,11 @@ final class LineSearch {
         }
     }
 
+    /** Whether a budget bounds any of the lines. */
+    boolean isBounded() {
+        return bounds.stream().anyMatch(bound -> bound != SpareQuery.UNBOUNDED);
+    }
+
     /** Pieces of the group's own glass that are left. */
     BitSet own() {
         return own;

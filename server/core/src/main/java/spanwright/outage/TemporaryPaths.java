@@ -149,7 +149,9 @@ public final class TemporaryPaths {
         }
 
         private void seekRefused() {
-            refuse(Refused.Why.OVER_BUDGET, () -> lines.find(terms.unbounded()));
+            if (lines.isBounded()) {
+                refuse(Refused.Why.OVER_BUDGET, () -> lines.find(terms.unbounded()));
+            }
             if (question.verifiedOnly()) {
                 refuse(Refused.Why.UNVERIFIED, () -> lines.find(terms.unverified()));
                 if (offers.isEmpty() && refused.isEmpty()) {

@@ -39,6 +39,8 @@ final class SearchLosses {
 
     private final Map<Integer, CableLay> lays = new HashMap<>();
     private final Map<Integer, Long> joints = new HashMap<>();
+    private final Map<Integer, Long> trays = new HashMap<>();
+    private final long splice;
     private final long connector;
     private final long jumperPerMetre;
 
@@ -51,6 +53,7 @@ final class SearchLosses {
         this.glass = new GlassValues(records);
         this.planning = new PlanningLosses(records);
         this.connector = planned("connector");
+        this.splice = planned("splice.fusion");
         this.jumperPerMetre = Math.round(
                 1e6 * glass.findJumperLoss(wavelength).map(TableValue::value).orElse(0.0) / 1000);
     }
@@ -98,9 +101,12 @@ final class SearchLosses {
         if (block.kind() != BlockKind.SECTION) {
             return 0;
         }
-        CableLay lay = lay(block.owner());
-        int row = lay.index((end & 1) == 0 ? block.fromRow() : block.toRow());
-        return lay.findEnclosure(row)
+        return trays.computeIfAbsent(2 * block.firstPiece() + (end & 1), side -> tray(block, (end & 1) == 0));
+    }
+
+    private long tray(Block section, boolean start) {
+        CableLay lay = lay(section.owner());
+        return lay.findEnclosure(lay.index(start ? section.fromRow() : section.toRow()))
                 .map(enclosure -> over(lay.cable(), enclosure.trayGlass()))
                 .orElse(0L);
     }
@@ -138,7 +144,7 @@ final class SearchLosses {
 
     /** A new fusion splice. */
     long splice() {
-        return planned("splice.fusion");
+        return splice;
     }
 
     /** A new jumper of the usual length. */

@@ -72,13 +72,7 @@ final class SpareEnds {
 
     /** Whether an end may be joined anew, or a path begin there: cut, or to be cut without harm to what works. */
     boolean isFreeable(int end) {
-        if (glass.enclosure(end) == 0) {
-            return false;
-        }
-        if (network.joint(end) != 0) {
-            return network.peer(end) != Network.NONE && !glass.isHeldJoint(end);
-        }
-        return network.peer(end) == Network.NONE || glass.tubes().cutting(end) != OpenTubes.Cutting.FORBIDDEN;
+        return glass.enclosure(end) != 0 && glass.freeable().freeing(end) != OpenTubes.Cutting.FORBIDDEN;
     }
 
     /** The rear of the port on which an end of a fiber is terminated, if it is. */

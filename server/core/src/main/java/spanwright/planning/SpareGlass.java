@@ -2,9 +2,11 @@ package spanwright.planning;
 
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import spanwright.journal.RecordKind;
 import spanwright.network.Block;
 import spanwright.network.BlockKind;
 import spanwright.network.Network;
@@ -43,6 +45,10 @@ public final class SpareGlass {
 
     private final byte[] frontFree;
     private final byte[] held;
+    private final FreeableEnds freeable;
+    private final BitSet ports = new BitSet();
+    /** By enclosure, 0 where it was not asked yet. */
+    private final int[] structureOf;
 
     /** The spare glass of a snapshot. */
     public SpareGlass(Snapshot snapshot) {
@@ -59,6 +65,8 @@ public final class SpareGlass {
         this.held = new byte[network.pieces()];
         Arrays.fill(frontFree, UNJUDGED);
         Arrays.fill(held, UNJUDGED);
+        this.freeable = new FreeableEnds(this);
+        this.structureOf = new int[records.limit(RecordKind.ENCLOSURE)];
         network.blocks().forEach(this::place);
     }
 
@@ -80,6 +88,7 @@ public final class SpareGlass {
             case PANEL -> {
                 int enclosure = records.panels().get(block.owner()).enclosure();
                 place(block, 0, enclosure, true);
+                ports.set(block.firstPiece(), block.firstPiece() + block.count());
                 for (int piece = block.firstPiece(); piece < block.firstPiece() + block.count(); piece++) {
                     enclosureOf[2 * piece + 1] = enclosure;
                 }
@@ -132,7 +141,20 @@ public final class SpareGlass {
 
     /** The structure of an enclosure. */
     public int structure(int enclosure) {
-        return records.enclosures().get(enclosure).structure();
+        if (structureOf[enclosure] == 0) {
+            structureOf[enclosure] = records.enclosures().get(enclosure).structure();
+        }
+        return structureOf[enclosure];
+    }
+
+    /** Whether a piece is a port. */
+    boolean isPort(int piece) {
+        return ports.get(piece);
+    }
+
+    /** The ends that may be joined anew. */
+    FreeableEnds freeable() {
+        return freeable;
     }
 
     /** The ends that can be spliced or terminated in an enclosure. */
@@ -259,11 +281,10 @@ public final class SpareGlass {
     }
 
     /**
-     * A number that is alike for pieces whose glass paths run alike: through the same sections and ports in the same
+     * A number that is alike for glass paths that run alike: through the same sections and ports in the same
      * tubes, by the same rows of joints, as spare. Which of them a search takes makes no odds.
      */
-    long likeness(int piece) {
-        int path = network.paths().pathOf(piece);
+    long likenessOf(int path) {
         if (likeness[path] == 0) {
             likeness[path] = reckonLikeness(path);
         }

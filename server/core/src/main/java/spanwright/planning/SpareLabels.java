@@ -1,12 +1,13 @@
 package spanwright.planning;
 
 import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
-import spanwright.network.BlockKind;
+import spanwright.network.Block;
 import spanwright.network.Network;
 import spanwright.plant.Trust;
 import spanwright.records.Records;
@@ -37,6 +38,11 @@ final class SpareLabels {
     private final Map<Integer, int[]> candidates = new HashMap<>();
     private final SpareMarks closed;
     private final SpareMarks single;
+    /** Pieces that may not be used whatever they are. */
+    private final BitSet barred;
+
+    private final BitSet goalEnds = new BitSet();
+    private final BitSet shunnedVisits = new BitSet();
 
     SpareLabels(SpareGlass glass, SearchLosses losses, SpareMarks closed, SpareQuery query, Runnable step) {
         this.glass = glass;
@@ -51,13 +57,26 @@ final class SpareLabels {
             (goal.entering() ? enteringGoals : standingGoals)
                     .computeIfAbsent(goal.end(), end -> new ArrayList<>())
                     .add(index);
+            goalEnds.set(goal.end());
         }
         this.closed = closed;
         this.single = new SpareMarks(network).single(query.own(), query.taken()).goals(query.goals());
+        this.barred = (BitSet) query.closed().clone();
+        query.taken().forEach(barred::set);
+        query.shunned().forEach(this::shun);
+    }
+
+    private void shun(SpareStretch stretch) {
+        if (stretch.visit()) {
+            shunnedVisits.set(stretch.id());
+        } else {
+            Block section = network.blockOf(stretch.id());
+            barred.set(section.firstPiece(), section.firstPiece() + section.count());
+        }
     }
 
     Optional<SpareWay> find() {
-        Map<Long, Integer> tried = new HashMap<>();
+        Likenesses tried = new Likenesses();
         for (SpareStart start : query.starts()) {
             // Plugs of one panel whose glass runs alike are tried once.
             if (!start.plugged() || (usable(start.end() >> 1) && !isTried(start.end() >> 1, tried))) {
@@ -124,7 +143,7 @@ final class SpareLabels {
 
     /** Light stands at an end: it is where it is to be, or goes on by what is joined, or changes over. */
     private void stand(int label, int end, boolean working) {
-        for (int goal : standingGoals.getOrDefault(end, List.of())) {
+        for (int goal : goalEnds.get(end) ? standingGoals.getOrDefault(end, List.of()) : List.<Integer>of()) {
             boolean plugged = query.goals().get(goal).plugged();
             if (!plugged || !shunned(structure(end))) {
                 long more = plugged ? SpareWork.PATCH + visit(structure(end), working) : 0;
@@ -181,14 +200,7 @@ final class SpareLabels {
 
     /** The work that freeing an end takes, below 0 where it must not be freed. */
     private long freeing(int end) {
-        boolean joined = network.peer(end) != NONE;
-        if (network.joint(end) != 0) {
-            return joined && !glass.isHeldJoint(end) ? 0 : -1;
-        }
-        if (!joined) {
-            return 0;
-        }
-        return switch (glass.tubes().cutting(end)) {
+        return switch (glass.freeable().freeing(end)) {
             case FORBIDDEN -> -1;
             case IN_OPEN_TUBE -> 0;
             case OPENS_TUBE -> SpareWork.TUBE;
@@ -208,9 +220,9 @@ final class SpareLabels {
     }
 
     private void spliceTo(int label, SpareGlass.EndRow row) {
-        Map<Long, Integer> tried = new HashMap<>();
+        Likenesses tried = new Likenesses();
         for (int end : candidates(row)) {
-            if (end != cameBy(label) && (enteringGoals.containsKey(end) || !isTried(end >> 1, tried))) {
+            if (end != cameBy(label) && (isEnteringGoal(end) || !isTried(end >> 1, tried))) {
                 spliceTo(label, end);
             }
         }
@@ -219,12 +231,12 @@ final class SpareLabels {
     /** Ends of a row that may be tried: of those that run alike two paths, as one may be that by which light comes. */
     private int[] candidates(SpareGlass.EndRow row) {
         return candidates.computeIfAbsent(row.first(), first -> {
-            Map<Long, Integer> once = new HashMap<>();
-            Map<Long, Integer> twice = new HashMap<>();
+            Likenesses once = new Likenesses();
+            Likenesses twice = new Likenesses();
             boolean falling = (row.first() & 1) == 1 && !isPort(row.first());
             return IntStream.range(0, row.count())
                     .map(index -> row.first() + 2 * (falling ? row.count() - 1 - index : index))
-                    .filter(end -> enteringGoals.containsKey(end)
+                    .filter(end -> isEnteringGoal(end)
                             || (usable(end >> 1) && (!isTried(end >> 1, once) || !isTried(end >> 1, twice))))
                     .toArray();
         });
@@ -241,11 +253,13 @@ final class SpareLabels {
     }
 
     /** Whether a piece of another path that runs alike was tried; one path may pass a section by several fibers. */
-    private boolean isTried(int piece, Map<Long, Integer> tried) {
+    private boolean isTried(int piece, Likenesses tried) {
         int path = network.paths().pathOf(piece);
-        long likeness = glass.likeness(piece) + closed.of(piece) + 3 * single.of(piece);
-        Integer before = tried.putIfAbsent(likeness, path);
-        return before != null && before != path;
+        return tried.isTried(glass.likenessOf(path) + closed.ofPath(path) + 3 * single.ofPath(path), path);
+    }
+
+    private boolean isEnteringGoal(int end) {
+        return goalEnds.get(end) && enteringGoals.containsKey(end);
     }
 
     private int cameBy(int label) {
@@ -253,7 +267,7 @@ final class SpareLabels {
     }
 
     private void patch(int label, int structure) {
-        Map<Long, Integer> tried = new HashMap<>();
+        Likenesses tried = new Likenesses();
         for (SpareGlass.EndRow row : glass.fronts(structure)) {
             for (int front : candidates(row)) {
                 if (front != cameBy(label) && glass.isFrontFree(front) && !isTried(front >> 1, tried)) {
@@ -269,7 +283,7 @@ final class SpareLabels {
 
     /** Light comes to an end from outside: it is where it is to be, or enters the piece. */
     private void arrive(int end, int parent, boolean working, long work, long loss) {
-        List<Integer> goals = enteringGoals.getOrDefault(end, List.of());
+        List<Integer> goals = goalEnds.get(end) ? enteringGoals.getOrDefault(end, List.of()) : List.of();
         goals.forEach(goal -> push(states.goal(goal), parent, work, loss));
         if (goals.isEmpty()) {
             enter(end, parent, working, work, loss);
@@ -296,28 +310,20 @@ final class SpareLabels {
     }
 
     private boolean isPort(int end) {
-        return network.blockOf(end >> 1).kind() == BlockKind.PANEL;
+        return glass.isPort(end >> 1);
     }
 
     private boolean usable(int piece) {
-        if (query.closed().get(piece) || query.taken().contains(piece)) {
-            return false;
-        }
-        boolean mine =
-                query.own().get(piece) || (query.verifiedOnly() ? glass.isVerified(piece) : glass.isSpare(piece));
-        return mine
-                && (query.shunned().isEmpty()
-                        || !query.shunned()
-                                .contains(SpareStretch.section(
-                                        network.blockOf(piece).firstPiece())));
+        return !barred.get(piece)
+                && (query.own().get(piece) || (query.verifiedOnly() ? glass.isVerified(piece) : glass.isSpare(piece)));
     }
 
     private boolean shunned(int structure) {
-        return !query.shunned().isEmpty() && query.shunned().contains(SpareStretch.visit(structure));
+        return shunnedVisits.get(structure);
     }
 
     private long visit(int structure, boolean working) {
-        return working || query.visited().contains(structure) ? 0 : SpareWork.VISIT;
+        return working || (!query.visited().isEmpty() && query.visited().contains(structure)) ? 0 : SpareWork.VISIT;
     }
 
     private int structure(int end) {

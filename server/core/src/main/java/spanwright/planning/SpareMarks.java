@@ -17,6 +17,8 @@ final class SpareMarks {
 
     private final Network network;
     private final Map<Integer, Long> ofPath = new HashMap<>();
+    /** Paths that have a mark: few, so that most are told by one bit. */
+    private final BitSet marked = new BitSet();
 
     SpareMarks(Network network) {
         this.network = network;
@@ -47,11 +49,12 @@ final class SpareMarks {
     }
 
     private void mark(int piece, long value) {
+        marked.set(network.paths().pathOf(piece));
         ofPath.merge(network.paths().pathOf(piece), ((value + 1) * MIX) ^ ((value * MIX) >>> 29), Long::sum);
     }
 
-    /** The mark of a piece's path, 0 where it has none. */
-    long of(int piece) {
-        return ofPath.getOrDefault(network.paths().pathOf(piece), 0L);
+    /** The mark of a path, 0 where it has none. */
+    long ofPath(int path) {
+        return marked.get(path) ? ofPath.getOrDefault(path, 0L) : 0;
     }
 }
