@@ -9,7 +9,7 @@ import { keepLists, keptLists } from "./keeping.js";
 import { readList } from "./lists.js";
 import { marksOf } from "./marks.js";
 import { PARTS, hrefToPart, partOf } from "./parts.js";
-import { fallen, placed, rankedSuspects } from "./questions.js";
+import { drawnWay, fallen, placed, rankedSuspects } from "./questions.js";
 import { SHOT_NAMES, askedOf, faultsOf, shotOf } from "./reading.js";
 import { suspectsList } from "./suspects-list.js";
 
@@ -49,6 +49,8 @@ export class OutageDesk extends LitElement {
     this.fault = new Asking(this);
     /** @type {Asking<Fallen>} */
     this.impact = new Asking(this);
+    /** @type {Asking<import("./questions.js").Shape>} the temporary path that is open */
+    this.way = new Asking(this);
     /** @type {Record<string, string>} what each was asked last */
     this.known = {};
     /** @type {string} what the map and the strip were told last */
@@ -65,7 +67,7 @@ export class OutageDesk extends LitElement {
 
   /** @returns {{ pending: boolean }} whether any question is under way */
   get asking() {
-    return { pending: this.suspects.pending || this.fault.pending || this.impact.pending };
+    return { pending: this.suspects.pending || this.fault.pending || this.impact.pending || this.way.pending };
   }
 
   /** @returns {string} the part that is open */
@@ -116,7 +118,7 @@ export class OutageDesk extends LitElement {
   updated() {
     const { opened: part, lists, place } = this;
     const fault = this.fault.answer;
-    const map = marksOf({ part, suspects: this.suspects.answer?.answer ?? null, chosen: lists.chosen, fault, place, cut: this.impact.answer?.shape ?? null });
+    const map = marksOf({ part, suspects: this.suspects.answer?.answer ?? null, chosen: lists.chosen, fault, place, cut: this.impact.answer?.shape ?? null, way: this.way.answer });
     const at = fault?.places[place];
     const shown = at && !at.past_end && this.address?.trace === `port:${this.shot.port}`;
     const detail = { map, strip: shown ? [{ glass: at.glass_m, within: at.within_m }] : [] };
@@ -161,6 +163,20 @@ export class OutageDesk extends LitElement {
     if (path >= 0) this.go({ path });
   }
 
+  /** @param {CustomEvent<{ spans: string[], structures: string[] } | null>} event */
+  wayShown({ detail }) {
+    const key = JSON.stringify(detail);
+    if (this.known["way"] === key) return;
+    this.known["way"] = key;
+    if (detail) void this.way.run((signal) => drawnWay(detail, signal));
+    else this.way.forget();
+  }
+
+  /** What was posted changes who is down and what is suspect: they are asked anew when they are looked at. */
+  posted() {
+    this.known = { way: this.known["way"] ?? "" };
+  }
+
   /** @param {CustomEvent<Cut[]>} event */
   cutsChosen({ detail }) {
     this.go({ code: "down", asked: withCuts(this.address?.asked ?? [], detail) });
@@ -171,7 +187,7 @@ export class OutageDesk extends LitElement {
     if (this.address === null) return nothing;
     return html`<header class="heading desk-heading"><h1>Outage</h1><nav aria-label="Parts of the desk">${PARTS.map(({ part, word }, index) => html`<a href=${hrefToPart(part)}
         aria-current=${part === this.opened ? "page" : nothing}>${word} <kbd>${index + 1}</kbd></a>`)}</nav></header>
-      <div @sw-lists=${this.listed} @sw-shot=${this.shotTyped} @sw-place=${this.placeChosen} @sw-cuts=${this.cutsChosen}
+      <div @sw-lists=${this.listed} @sw-shot=${this.shotTyped} @sw-place=${this.placeChosen} @sw-cuts=${this.cutsChosen} @sw-way=${this.wayShown} @sw-posted=${this.posted}
         @sw-incident=${(/** @type {CustomEvent<string>} */ event) => this.go({ code: "incident", asked: [...(this.address?.asked ?? []).filter(([name]) => name !== "incident"), ["incident", event.detail]] })}
         @sw-suspect=${(/** @type {CustomEvent<number>} */ event) => this.setLists({ ...this.lists, chosen: event.detail })}>${this.open()}</div>
       ${cautions()}`;

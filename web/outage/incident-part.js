@@ -2,7 +2,8 @@ import { LitElement, html, nothing } from "lit";
 import { Asking, Problem, ask, askAnytime, send, waiting } from "../server/index.js";
 import { timeInWords } from "../quantity/index.js";
 import { beginForm, entryForm } from "./incident-forms.js";
-import { incidentSheet, temporaryList } from "./incident-view.js";
+import { incidentSheet } from "./incident-view.js";
+import "./temporary-part.js";
 
 /** @typedef {import("../server/contract.d.ts").Incident} Incident */
 /** @typedef {import("../server/contract.d.ts").IncidentList} IncidentList */
@@ -65,7 +66,10 @@ export class IncidentPart extends LitElement {
   read() {
     const { number } = this;
     return this.asking.run(async (signal) => {
-      if (number) return { incident: await askAnytime(`/incidents/${number}`, {}, signal), list: null, temporary: null };
+      if (number) {
+        const [incident, temporary] = await Promise.all([askAnytime(`/incidents/${number}`, {}, signal), ask("/temporary", {}, signal)]);
+        return { incident, list: null, temporary };
+      }
       const [list, temporary] = await Promise.all([askAnytime("/incidents", {}, signal), ask("/temporary", {}, signal)]);
       return { incident: null, list, temporary };
     });
@@ -107,9 +111,14 @@ export class IncidentPart extends LitElement {
   render() {
     const known = this.asking.answer;
     const said = this.problem ? html`<p class="problem" role="alert">${this.problem.message}</p>` : nothing;
-    if (known?.incident && this.number) return html`${said}${waiting(this.asking)}${incidentSheet(known.incident, this.zone)}${entryForm(this, known.incident)}`;
-    if (known?.list && !this.number) return html`${said}${this.incidents(known.list)}${beginForm(this)}${temporaryList(known.temporary)}`;
+    if (known?.incident && this.number) return html`${said}${waiting(this.asking)}${incidentSheet(known.incident, this.zone)}${entryForm(this, known.incident)}${this.temporary(known.temporary)}`;
+    if (known?.list && !this.number) return html`${said}${this.incidents(known.list)}${beginForm(this)}${this.temporary(known.temporary)}`;
     return html`${said}${waiting(this.asking)}`;
+  }
+
+  /** @param {TemporaryList | null} list @returns {unknown} */
+  temporary(list) {
+    return html`<sw-temporary .list=${list} @sw-posted=${() => this.read()}></sw-temporary>`;
   }
 
   /** @param {IncidentList} list @returns {unknown} */

@@ -1,12 +1,11 @@
 import { html, nothing } from "lit";
 import { currentAddress, formatAddress, link } from "../address/index.js";
 import { figure } from "../basis/index.js";
-import { dayInWords, decimal, timeInWords } from "../quantity/index.js";
+import { decimal, timeInWords } from "../quantity/index.js";
 import { KINDS } from "./incident-forms.js";
 import { minutesInWords } from "./times.js";
 
 /** @typedef {import("../server/contract.d.ts").Incident} Incident */
-/** @typedef {import("../server/contract.d.ts").TemporaryList} TemporaryList */
 
 /** The steps of the clock. @type {ReadonlyArray<readonly [Exclude<keyof Incident["clock"], "began">, string]>} */
 const STEPS = Object.freeze([["called", "called"], ["on_site", "on site"], ["found", "found"], ["first_light", "first light"], ["all_light", "all light"], ["closed", "closed"]]);
@@ -72,16 +71,4 @@ function log({ log: entries }, zone) {
     ${each.circuits.length > 0 ? html`<span class="lighter">${each.circuits.length} circuits: ${each.circuits.slice(0, 6).join(", ")}${each.circuits.length > 6 ? " ..." : ""}</span>` : nothing}
     ${each.users === null ? nothing : html`${each.users} users`} ${each.oc3 === null ? nothing : html`${each.oc3} OC3`}
     <span class="lighter">${each.by}${each.corrects ? `, in place of ${each.corrects}` : ""}${each.corrected_by ? `, replaced by ${each.corrected_by}` : ""}</span></li>`)}</ol>`}`;
-}
-
-/**
- * Temporary joints that wait to be undone.
- * @param {TemporaryList | null} list
- * @returns {unknown}
- */
-export function temporaryList(list) {
-  if (!list || list.temporary.length === 0) return nothing;
-  return html`<h2>Temporary joints</h2><table><thead><tr><th>At</th><th>Joint</th><th>Until</th></tr></thead><tbody>${list.temporary.map((each) => html`<tr><td>${link("enclosure", each.enclosure)}</td>
-    <td class="ends">${each.a} = ${each.b}${each.spliced_by ? html`<br><span class="lighter">${each.spliced_by}</span>` : nothing}</td>
-    <td>${dayInWords(each.until)} ${each.lapsed ? html`<strong class="state-down">past</strong>` : html`<span class="lighter">${each.days_left} days</span>`}</td></tr>`)}</tbody></table>`;
 }

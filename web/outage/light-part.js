@@ -2,6 +2,7 @@ import { LitElement, html, nothing } from "lit";
 import { Asking, send, waiting } from "../server/index.js";
 import { hrefToPart } from "./parts.js";
 import { lightView } from "./light-view.js";
+import "./post-light.js";
 import { readList } from "./lists.js";
 import { unlike } from "./unlike.js";
 
@@ -10,7 +11,7 @@ import { unlike } from "./unlike.js";
 /** Temporary paths round what is cut: what may be used is asked here, what is offered and refused is listed. */
 export class TemporaryPaths extends LitElement {
   /** @override */
-  static properties = { cuts: { attribute: false, hasChanged: unlike }, stamp: { attribute: false } };
+  static properties = { cuts: { attribute: false, hasChanged: unlike }, stamp: { attribute: false }, since: { state: true } };
 
   constructor() {
     super();
@@ -20,6 +21,8 @@ export class TemporaryPaths extends LitElement {
     this.stamp = "";
     /** @type {Asking<LightAnswer>} */
     this.asking = new Asking(this);
+    /** @type {number} the posting that the shares rest on, 0 where none is asked for */
+    this.since = 0;
   }
 
   /** @override */
@@ -38,7 +41,16 @@ export class TemporaryPaths extends LitElement {
     const data = new FormData(/** @type {HTMLFormElement} */ (event.target));
     const margin = Number(String(data.get("margin") ?? "").trim() || 0);
     const asked = { cuts: this.cuts, from_panels: readList(String(data.get("panels") ?? "")).codes, verified_only: data.get("verified") === "on", margin_db: margin, offers: 2 };
-    void this.asking.run((signal) => send("/light", asked, signal));
+    this.dispatchEvent(new CustomEvent("sw-way", { bubbles: true, detail: null }));
+    void this.asking.run((signal) => send("/light", asked, signal)).then(() => (this.since = this.asking.answer?.posting ?? 0));
+  }
+
+  /**
+   * Shares take no glass from each other, so one that was posted straight after the answer does not spoil the rest.
+   * @param {CustomEvent<number>} event
+   */
+  posted({ detail }) {
+    if (detail === this.since + 1) this.since = detail;
   }
 
   /** @override */
@@ -50,7 +62,7 @@ export class TemporaryPaths extends LitElement {
       <p><label><input type="checkbox" name="verified" checked> Only glass that was seen and verified</label></p>
       <p class="act"><button type="submit" class="main">Find temporary paths</button></p></form>
       <p class="cautions">Glass that is dark by the records may carry light: meter it at both ends before it is touched. A live tube is left alone.</p>
-      ${waiting(this.asking)}${this.asking.answer ? lightView(this.asking.answer) : nothing}`;
+      ${waiting(this.asking)}${this.asking.answer ? html`<div @sw-posted=${this.posted}>${lightView(this.asking.answer, this.since)}</div>` : nothing}`;
   }
 }
 

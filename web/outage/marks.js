@@ -19,6 +19,7 @@ const DRAWN = 12;
  * @property {FaultAnswer | null} fault
  * @property {number} place which of its places
  * @property {Shape | null} cut
+ * @property {Shape | null} way a temporary path
  */
 
 /**
@@ -26,13 +27,15 @@ const DRAWN = 12;
  * @param {AtHand} hand
  * @returns {Marks}
  */
-export function marksOf({ part, suspects, chosen, fault, place, cut }) {
+export function marksOf({ part, suspects, chosen, fault, place, cut, way }) {
   const stretches = suspectStretches(suspects, chosen);
   /** @type {Stretch[]} */
   const cuts = cut === null ? [] : [{ kind: "down", sign: "CUT", chosen: part === "down", ...cut }];
+  /** @type {Stretch[]} */
+  const ways = way === null || part !== "light" ? [] : [{ kind: "spare", sign: "LIGHT", chosen: true, ...way }];
   const at = fault?.places[place] ?? null;
-  const focus = part === "reading" ? pointsOfPlace(at) : part === "down" ? [...pointsOf(cuts[0]), ...(cuts.length > 0 && pointsOf(cuts[0]).length === 0 ? pointsOfPlace(at) : [])] : pointsOf(stretches.at(-1));
-  return { stretches: [...stretches, ...cuts], faults: faultSigns(fault, at), focus };
+  const focus = part === "reading" ? pointsOfPlace(at) : part === "down" ? [...pointsOf(cuts[0]), ...(cuts.length > 0 && pointsOf(cuts[0]).length === 0 ? pointsOfPlace(at) : [])] : part === "light" ? pointsOf(ways[0] ?? cuts[0]) : pointsOf(stretches.at(-1));
+  return { stretches: [...stretches, ...cuts, ...ways], faults: faultSigns(fault, at), focus };
 }
 
 /**

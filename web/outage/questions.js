@@ -58,6 +58,18 @@ export async function fallen(cuts, signal) {
 }
 
 /**
+ * Where a temporary path runs on the map, and where hands work for it.
+ * @param {{ spans: string[], structures: string[] }} way codes
+ * @param {AbortSignal} signal
+ * @returns {Promise<Shape>}
+ */
+export async function drawnWay({ spans, structures }, signal) {
+  const cuts = [...spans.map((code) => ({ kind: /** @type {const} */ ("span"), code })), ...structures.map((code) => ({ kind: /** @type {const} */ ("structure"), code }))];
+  const shapes = await Promise.all(cuts.map((cut) => shapeOf(cut, signal)));
+  return { lines: shapes.flatMap((each) => each.lines), places: shapes.flatMap((each) => each.places) };
+}
+
+/**
  * @param {Cut} cut
  * @param {AbortSignal} signal
  * @returns {Promise<Shape>} empty for a place: the reading that found it has it

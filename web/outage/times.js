@@ -41,6 +41,18 @@ export function localTime(at, zone) {
 }
 
 /**
+ * A day from now, by the clock of this browser.
+ * @param {number} at milliseconds
+ * @param {number} days
+ * @returns {string} 2026-12-08
+ */
+export function daysOn(at, days) {
+  const day = new Date(at);
+  day.setDate(day.getDate() + days);
+  return new Date(Date.UTC(day.getFullYear(), day.getMonth(), day.getDate())).toISOString().slice(0, 10);
+}
+
+/**
  * A stretch of time as people say it.
  * @param {number} minutes
  * @returns {string} e.g. 42 min, 3 h 05 min, 4 days 2 h

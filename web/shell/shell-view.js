@@ -233,7 +233,7 @@ export class ShellView extends LitElement {
     return html`<div class="shell" @sw-basis=${this.openBasis} @sw-shown=${(/** @type {CustomEvent} */ event) => (this.shown = event.detail)}
       @sw-point=${this.pointed} @sw-path=${(/** @type {CustomEvent} */ event) => this.go({ path: event.detail })}
       @sw-wavelength=${(/** @type {CustomEvent} */ event) => this.flipWavelength(event.detail)} @sw-measure=${(/** @type {CustomEvent} */ event) => this.setMeasure(event.detail)}
-      @sw-marks=${(/** @type {CustomEvent} */ event) => (this.marks = event.detail)} @sw-fold=${() => this.fold()} @sw-stand=${(/** @type {CustomEvent} */ event) => keep({ stand: event.detail })}>
+      @sw-marks=${(/** @type {CustomEvent} */ event) => (this.marks = event.detail)} @sw-fold=${() => this.fold()} @sw-posted=${() => this.readStatus()} @sw-stand=${(/** @type {CustomEvent} */ event) => keep({ stand: event.detail })}>
       ${this.bar(status)}
       <main class="desk">
         <sw-map .status=${status} .path=${paths[0] ?? null} .shown=${this.shown} .marks=${this.marks?.map ?? null} .pointer=${this.pointer} .measure=${this.measure} .standpoint=${this.standpoint} .stamp=${this.stamp}></sw-map>

@@ -7,6 +7,8 @@ import { askedOf, faultsOf, questionOf, shotOf } from "../outage/reading.js";
 import { cutInWords, cutsOf, readCut, withCuts, writeCut } from "../outage/cuts.js";
 import { tubesOf } from "../outage/sheath.js";
 import { cautionsOf, placeLines, textOf } from "../outage/fault-words.js";
+import { daysOn } from "../outage/times.js";
+import { marksOf } from "../outage/marks.js";
 import { units } from "../quantity/index.js";
 import { formatAddress, parseAddress } from "../address/address.js";
 
@@ -122,4 +124,19 @@ test("a coil that the window touches is warned of, and light that goes too far i
   assert.deepEqual(cautionsOf(PLACE), []);
   assert.match(cautionsOf({ ...PLACE, may_be_in_slack_at: "HH-S044" })[0] ?? "", /inside the coil at HH-S044/);
   assert.match(cautionsOf({ ...PLACE, past_end: true, over_m: 5020.2 })[0] ?? "", /a cut does not/);
+});
+
+test("a day from now is a day of the calendar, over months and leap days", () => {
+  const noon = (/** @type {number} */ year, /** @type {number} */ month, /** @type {number} */ day) => new Date(year, month - 1, day, 12).getTime();
+  assert.equal(daysOn(noon(2026, 12, 28), 7), "2027-01-04");
+  assert.equal(daysOn(noon(2028, 2, 28), 1), "2028-02-29");
+});
+
+test("a temporary path is drawn while that part of the desk is open, and what is cut stays drawn beside it", () => {
+  const way = { lines: [[[0, 0], [1, 1]]], places: [[1, 1]] };
+  const hand = { suspects: null, chosen: 0, fault: null, place: 0, cut: { lines: [[[0, 0], [0, 1]]], places: [] }, way };
+  const drawn = marksOf({ ...hand, part: "light" });
+  assert.deepEqual(drawn.stretches.map(({ kind, sign }) => [kind, sign]), [["down", "CUT"], ["spare", "LIGHT"]]);
+  assert.deepEqual(drawn.focus, [[0, 0], [1, 1], [1, 1]]);
+  assert.deepEqual(marksOf({ ...hand, part: "down" }).stretches.map(({ kind }) => kind), ["down"]);
 });
