@@ -11,6 +11,7 @@ import net.sf.geographiclib.Geodesic;
 import net.sf.geographiclib.GeodesicData;
 import org.jspecify.annotations.Nullable;
 import spanwright.plant.Cable;
+import spanwright.plant.CableValue;
 import spanwright.plant.Enclosure;
 import spanwright.plant.PlantState;
 import spanwright.plant.Position;
@@ -34,6 +35,7 @@ import spanwright.trace.Through;
 final class FaultTwin {
 
     private static final MathContext EXACT = new MathContext(34);
+    private static final BigDecimal TWIN_INDEX = new BigDecimal("1.4682");
 
     private final RecordsView records;
     private final Path path;
@@ -88,6 +90,30 @@ final class FaultTwin {
             return lies + " " + before + ">" + after + " +" + beyond + " -" + shortOf + " " + span + " " + fiber + "@"
                     + sheath + " mark " + mark + " glass " + glass + " over " + over + " at " + lon + "," + lat;
         }
+    }
+
+    /**
+     * The group index at 1550 nm: the reel's own, else that of G.652.D and G.657.A1 by the table of the records folder, else
+     * that of the drawn type, on the line between 1.471 at 1310 nm and 1.472 at 1625 nm.
+     */
+    private BigDecimal index(Bead bead) {
+        Fiber fiber = bead.fiber;
+        if (fiber == null) {
+            return TWIN_INDEX;
+        }
+        Cable cable = fiber.cable();
+        for (CableValue value : records.cableValues().list().toList()) {
+            if (value.cable() == cable.id() && value.groupIndex() != null) {
+                return BigDecimal.valueOf(value.groupIndex());
+            }
+        }
+        String type = records.cableTypes().get(cable.cableType()).fiberType();
+        return type.startsWith("G.65")
+                ? TWIN_INDEX
+                : new BigDecimal("1.471")
+                        .add(new BigDecimal("0.001")
+                                .multiply(BigDecimal.valueOf(1550 - 1310))
+                                .divide(BigDecimal.valueOf(1625 - 1310), EXACT));
     }
 
     /** A stretch of glass that lies in one place. */
@@ -222,14 +248,32 @@ final class FaultTwin {
 
     /** The place of so many meters of glass. */
     Found find(BigDecimal reading) {
-        BigDecimal left = reading;
+        return find(reading, BigDecimal.ZERO, null);
+    }
+
+    /**
+     * The place of a reading at 1550 nm.
+     *
+     * @param launch meters of launch fiber, of the glass that the path begins with
+     * @param set the index set on the instrument; null: the reading is meters of glass
+     */
+    Found find(BigDecimal reading, BigDecimal launch, @Nullable BigDecimal set) {
+        BigDecimal first = beads.isEmpty() ? TWIN_INDEX : index(beads.get(0));
+        BigDecimal left = set == null
+                ? reading.subtract(launch)
+                : reading.multiply(set).subtract(launch.multiply(first));
         BigDecimal walked = BigDecimal.ZERO;
         for (Bead bead : beads) {
-            if (left.compareTo(bead.glass) <= 0) {
-                return in(bead, left, walked.add(left));
+            BigDecimal used = set == null ? bead.glass : bead.glass.multiply(index(bead));
+            if (left.compareTo(used) <= 0) {
+                BigDecimal within = set == null ? left : left.divide(index(bead), EXACT);
+                return in(bead, within, walked.add(within));
             }
-            left = left.subtract(bead.glass);
+            left = left.subtract(used);
             walked = walked.add(bead.glass);
+        }
+        if (set != null && !beads.isEmpty()) {
+            left = left.divide(index(beads.get(beads.size() - 1)), EXACT);
         }
         Found end;
         if (beads.isEmpty()) {

@@ -12,11 +12,14 @@ import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import spanwright.journal.Change;
 import spanwright.network.Snapshot;
+import spanwright.plant.RunRow;
 import spanwright.plants.RandomPlant;
 import spanwright.quantity.Length;
 import spanwright.quantity.Wavelength;
 import spanwright.records.Records;
+import spanwright.records.RecordsEditor;
 import spanwright.splicing.EndKey;
 import spanwright.splicing.Joint;
 import spanwright.splicing.JointKind;
@@ -52,10 +55,95 @@ class FaultTwinTest {
             List<Path> paths = tracer.fromEnd(start);
             if (!paths.isEmpty() && paths.stream().noneMatch(Path::loop)) {
                 for (int reading = 0; reading < READINGS; reading++) {
-                    compare(records, paths, finder, start, reading(paths, chance));
+                    compare(records, paths, finder, start, reading(paths, chance), BigDecimal.ZERO, null);
                 }
             }
         }
+    }
+
+    /** Reels with an index of their own beside types of two indexes, behind a launch fiber. */
+    @ParameterizedTest(name = "seed {0}")
+    @MethodSource("seeds")
+    void places_by_the_index_of_each_glass_as_the_twin_does(int seed) {
+        Records records = RandomPlant.of(seed).entered();
+        Snapshot snapshot = Snapshot.of(records);
+        Tracer tracer = new Tracer(snapshot);
+        FaultFinder finder = new FaultFinder(snapshot);
+        Random chance = new Random(1000 + seed);
+        for (long start : starts(records)) {
+            List<Path> paths = tracer.fromEnd(start);
+            if (!paths.isEmpty() && paths.stream().noneMatch(Path::loop)) {
+                BigDecimal launch = BigDecimal.valueOf(chance.nextInt(0, 600));
+                BigDecimal set = BigDecimal.valueOf(1.4640 + chance.nextInt(8) * 0.001);
+                // By half a per cent more than the launch fiber reads at most, so that no reading lies within it.
+                BigDecimal reading = reading(paths, chance).add(launch.multiply(new BigDecimal("1.006")));
+                compare(records, paths, finder, start, reading, launch, set);
+            }
+        }
+    }
+
+    /** A coil that is drawn on or added to moves each place behind it by as much sheath. */
+    @Test
+    void a_coil_that_changes_moves_the_place_as_the_twin_says() {
+        int moved = 0;
+        for (int seed = 0; seed < 220; seed++) {
+            Records records = RandomPlant.of(seed).entered();
+            RunRow coil = records.runRows()
+                    .list()
+                    .filter(row -> row.slack().micrometres() > 0)
+                    .findFirst()
+                    .orElse(null);
+            if (coil != null) {
+                RecordsEditor editor = records.edit();
+                editor.apply(Change.replace(
+                        coil,
+                        new RunRow(
+                                coil.id(),
+                                coil.cable(),
+                                coil.seq(),
+                                coil.structure(),
+                                coil.span(),
+                                coil.slack().plus(Length.ofMetres(7.5)),
+                                coil.slackTrust(),
+                                coil.slackOn(),
+                                coil.duct())));
+                moved += moved(records, editor.build(records.posting() + 1), seed);
+            }
+        }
+        assertThat(moved).as("places that moved").isGreaterThan(100);
+    }
+
+    private static int moved(Records before, Records after, int seed) {
+        Snapshot was = Snapshot.of(before);
+        Snapshot is = Snapshot.of(after);
+        Random chance = new Random(seed);
+        int moved = 0;
+        for (long start : starts(before)) {
+            List<Path> paths = new Tracer(is).fromEnd(start);
+            if (!paths.isEmpty() && paths.stream().noneMatch(Path::loop)) {
+                BigDecimal reading = reading(paths, chance);
+                compare(after, paths, new FaultFinder(is), start, reading, BigDecimal.ZERO, null);
+                moved += lines(was, start, reading).equals(lines(is, start, reading)) ? 0 : 1;
+            }
+        }
+        return moved;
+    }
+
+    private static List<String> lines(Snapshot snapshot, long start, BigDecimal reading) {
+        return places(new FaultFinder(snapshot), start, reading, BigDecimal.ZERO, null).stream()
+                .map(FaultText::line)
+                .toList();
+    }
+
+    private static List<FaultPlace> places(
+            FaultFinder finder, long start, BigDecimal reading, BigDecimal launch, @Nullable BigDecimal set) {
+        Reading read = new Reading(
+                Length.ofMetres(reading),
+                Length.ofMetres(launch),
+                set == null ? null : set.doubleValue(),
+                Wavelength.ofNanometres(1550),
+                List.of());
+        return ((FaultPlaces) finder.find(start, null, read)).places();
     }
 
     private static List<Long> starts(Records records) {
@@ -81,21 +169,23 @@ class FaultTwinTest {
         return BigDecimal.valueOf(millimetres, 3).add(new BigDecimal("0.00037"));
     }
 
-    private static void compare(Records records, List<Path> paths, FaultFinder finder, long start, BigDecimal reading) {
+    private static void compare(
+            Records records,
+            List<Path> paths,
+            FaultFinder finder,
+            long start,
+            BigDecimal reading,
+            BigDecimal launch,
+            @Nullable BigDecimal set) {
         List<Path> leading = paths.stream()
                 .filter(path -> path.elements().isEmpty()
                         || !(path.elements().get(path.elements().size() - 1) instanceof SplitterCrossing))
                 .toList();
         List<FaultTwin.Found> expected = (leading.isEmpty() ? paths.subList(0, 1) : leading)
                 .stream()
-                        .map(path -> new FaultTwin(records, path).find(reading))
+                        .map(path -> new FaultTwin(records, path).find(reading, launch, set))
                         .toList();
-        List<FaultPlace> places = ((FaultPlaces) finder.find(
-                        start,
-                        null,
-                        new Reading(
-                                Length.ofMetres(reading), Length.ZERO, null, Wavelength.ofNanometres(1550), List.of())))
-                .places();
+        List<FaultPlace> places = places(finder, start, reading, launch, set);
         for (FaultPlace place : places) {
             assertThat(expected.stream().anyMatch(found -> same(place, found)))
                     .as("%s %s: %s for %s", start, reading, FaultText.line(place), expected)
