@@ -6,6 +6,7 @@ import java.util.Deque;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.CircuitStatus;
 import spanwright.network.Block;
@@ -50,6 +51,8 @@ final class SpareTwin {
     private final Network network;
     private final Records records;
     private final SearchLosses losses;
+    private final EndStates endStates;
+    private final Map<Integer, int[]> joinables = new HashMap<>();
     private final Map<At, List<Cost>> costs = new HashMap<>();
     private final Deque<At> changed = new ArrayDeque<>();
     private @Nullable Cost best;
@@ -59,6 +62,7 @@ final class SpareTwin {
         this.query = query;
         this.network = snapshot.network();
         this.records = snapshot.records();
+        this.endStates = new EndStates(records, network);
         this.losses = new SearchLosses(snapshot, query.wavelength());
     }
 
@@ -95,16 +99,21 @@ final class SpareTwin {
             int joint = network.joint(at.end);
             arrive(peer, at.working, cost.plus(new SpareWork(0, 0, 0, 0, unverified(joint)), losses.joint(joint)));
         }
-        for (int end = 0; end < 2 * network.pieces(); end++) {
-            if (network.alive(end >> 1) && end != at.end && joinable(at.end, end)) {
-                boolean patch = front(end);
-                int tubes = (tube(at.end) ? 1 : 0) + (tube(end) ? 1 : 0);
-                int visit = at.working || query.visited().contains(structure(at.end)) ? 0 : 1;
-                long lost = patch ? losses.jumper() : losses.splice() + tray(at.end) + tray(end);
-                SpareWork work = new SpareWork(visit, tubes, patch ? 0 : 1, patch ? 1 : 0, 0);
-                arrive(end, true, cost.plus(work, lost));
-            }
+        for (int end : joinables.computeIfAbsent(at.end, this::joinables)) {
+            boolean patch = front(end);
+            int tubes = (tube(at.end) ? 1 : 0) + (tube(end) ? 1 : 0);
+            int visit = at.working || query.visited().contains(structure(at.end)) ? 0 : 1;
+            long lost = patch ? losses.jumper() : losses.splice() + tray(at.end) + tray(end);
+            SpareWork work = new SpareWork(visit, tubes, patch ? 0 : 1, patch ? 1 : 0, 0);
+            arrive(end, true, cost.plus(work, lost));
         }
+    }
+
+    /** Every end that one could be joined to, out of all there are; no cost changes which. */
+    private int[] joinables(int from) {
+        return IntStream.range(0, 2 * network.pieces())
+                .filter(end -> network.alive(end >> 1) && end != from && joinable(from, end))
+                .toArray();
     }
 
     private void arrive(int end, boolean working, Cost cost) {
@@ -183,7 +192,7 @@ final class SpareTwin {
 
     /** Whether freeing an end opens a closed tube. */
     private boolean tube(int end) {
-        return uncut(end) && !new EndStates(records, network).isTubeOpened(network.keyOf(end));
+        return uncut(end) && !endStates.isTubeOpened(network.keyOf(end));
     }
 
     private boolean uncut(int end) {
