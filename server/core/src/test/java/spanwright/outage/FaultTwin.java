@@ -11,7 +11,6 @@ import net.sf.geographiclib.Geodesic;
 import net.sf.geographiclib.GeodesicData;
 import org.jspecify.annotations.Nullable;
 import spanwright.plant.Cable;
-import spanwright.plant.CableValue;
 import spanwright.plant.Enclosure;
 import spanwright.plant.PlantState;
 import spanwright.plant.Position;
@@ -35,7 +34,6 @@ import spanwright.trace.Through;
 final class FaultTwin {
 
     private static final MathContext EXACT = new MathContext(34);
-    private static final BigDecimal TWIN_INDEX = new BigDecimal("1.4682");
 
     private final RecordsView records;
     private final Path path;
@@ -92,28 +90,8 @@ final class FaultTwin {
         }
     }
 
-    /**
-     * The group index at 1550 nm: the reel's own, else that of G.652.D and G.657.A1 by the table of the records folder, else
-     * that of the drawn type, on the line between 1.471 at 1310 nm and 1.472 at 1625 nm.
-     */
-    private BigDecimal index(Bead bead) {
-        Fiber fiber = bead.fiber;
-        if (fiber == null) {
-            return TWIN_INDEX;
-        }
-        Cable cable = fiber.cable();
-        for (CableValue value : records.cableValues().list().toList()) {
-            if (value.cable() == cable.id() && value.groupIndex() != null) {
-                return BigDecimal.valueOf(value.groupIndex());
-            }
-        }
-        String type = records.cableTypes().get(cable.cableType()).fiberType();
-        return type.startsWith("G.65")
-                ? TWIN_INDEX
-                : new BigDecimal("1.471")
-                        .add(new BigDecimal("0.001")
-                                .multiply(BigDecimal.valueOf(1550 - 1310))
-                                .divide(BigDecimal.valueOf(1625 - 1310), EXACT));
+    private BigDecimal index(@Nullable Fiber fiber) {
+        return GlassIndexTwin.of(records, fiber);
     }
 
     /** A stretch of glass that lies in one place. */
@@ -258,22 +236,21 @@ final class FaultTwin {
      * @param set the index set on the instrument; null: the reading is meters of glass
      */
     Found find(BigDecimal reading, BigDecimal launch, @Nullable BigDecimal set) {
-        BigDecimal first = beads.isEmpty() ? TWIN_INDEX : index(beads.get(0));
-        BigDecimal left = set == null
-                ? reading.subtract(launch)
-                : reading.multiply(set).subtract(launch.multiply(first));
+        BigDecimal first = index(beads.isEmpty() ? null : beads.get(0).fiber);
+        BigDecimal left =
+                set == null ? reading.subtract(launch) : reading.multiply(set).subtract(launch.multiply(first));
         BigDecimal walked = BigDecimal.ZERO;
         for (Bead bead : beads) {
-            BigDecimal used = set == null ? bead.glass : bead.glass.multiply(index(bead));
+            BigDecimal used = set == null ? bead.glass : bead.glass.multiply(index(bead.fiber));
             if (left.compareTo(used) <= 0) {
-                BigDecimal within = set == null ? left : left.divide(index(bead), EXACT);
+                BigDecimal within = set == null ? left : left.divide(index(bead.fiber), EXACT);
                 return in(bead, within, walked.add(within));
             }
             left = left.subtract(used);
             walked = walked.add(bead.glass);
         }
         if (set != null && !beads.isEmpty()) {
-            left = left.divide(index(beads.get(beads.size() - 1)), EXACT);
+            left = left.divide(index(beads.get(beads.size() - 1).fiber), EXACT);
         }
         Found end;
         if (beads.isEmpty()) {
