@@ -25,9 +25,9 @@ class FaultWindowsTest {
         Map<String, Double> off = new FaultWindows(7, BREAKS, Spread.STATED).offByKind(100);
 
         assertThat(off).hasSizeGreaterThanOrEqualTo(3).containsKey("marks read, 1 known");
-        assertThat(off).allSatisfy((kind, each) -> assertThat(each)
-                .as("seed 7, %s", kind)
-                .isBetween(0.5, 1.0));
+        assertThat(off)
+                .allSatisfy(
+                        (kind, each) -> assertThat(each).as("seed 7, %s", kind).isBetween(0.5, 1.0));
     }
 
     @Test
