@@ -354,6 +354,273 @@ export type DoubtfulJoint = {
   trust: Trust;
 };
 
+export type DraftHeader = {
+  /** The job */
+  job?: string | null;
+  /** The crew */
+  spliced_by?: string | null;
+  /** Day of the work */
+  spliced_on?: string | null;
+  /** How it is known: crew's sheet, photo, trace, telephone */
+  source?: string | null;
+  /** Anything else */
+  note?: string | null;
+};
+
+export type DraftCursor = {
+  /** Line, from 1 */
+  line?: number;
+  /** Column, from 1 */
+  column?: number;
+};
+
+export type DraftAnswer = {
+  /** The finding's rule */
+  rule: string;
+  /** Text of the line that it stands in, as typed; blank where it is about the sheet */
+  line?: string;
+  /** The answer */
+  reason: string;
+};
+
+export type DraftSummary = {
+  /** Number of the draft */
+  draft: number;
+  /** Its enclosure; null where that is gone from the records */
+  enclosure: string | null;
+  /** Who writes it */
+  author: string;
+  /** How far it has come */
+  state: "writing" | "submitted" | "posted" | "dropped";
+  /** One more at every change */
+  revision: number;
+  /** Last posting that its author has seen */
+  base: number;
+  /** When begun */
+  begun_at: string;
+  /** When last changed */
+  saved_at: string;
+  /** The job */
+  job: string | null;
+  /** Who submitted it */
+  submitted_by: string | null;
+  /** The posting that it became */
+  posting: number | null;
+};
+
+export type DraftList = {
+  /** The drafts */
+  drafts: Array<DraftSummary>;
+};
+
+export type Draft = {
+  /** Number of the draft */
+  draft: number;
+  /** Its enclosure; null where that is gone from the records */
+  enclosure: string | null;
+  /** Who writes it */
+  author: string;
+  /** How far it has come */
+  state: "writing" | "submitted" | "posted" | "dropped";
+  /** One more at every change */
+  revision: number;
+  /** Last posting that its author has seen */
+  base: number;
+  /** When begun */
+  begun_at: string;
+  /** When last changed */
+  saved_at: string;
+  /** The job */
+  job: string | null;
+  /** Who submitted it */
+  submitted_by: string | null;
+  /** The posting that it became */
+  posting: number | null;
+  /** The lines as typed */
+  lines: Array<string>;
+  header: DraftHeader;
+  cursor: DraftCursor;
+  /** Answers to findings */
+  answers: Array<DraftAnswer>;
+  /** Whether there is something to undo */
+  can_undo: boolean;
+  /** Whether there is something to redo */
+  can_redo: boolean;
+  /** The other open drafts of the same enclosure */
+  beside: Array<DraftSummary>;
+};
+
+export type DraftRequest = {
+  /** Code of the enclosure */
+  enclosure: string;
+  /** Who writes it */
+  author: string;
+  /** All lines of the sheet */
+  lines?: Array<string>;
+  header?: DraftHeader;
+  cursor?: DraftCursor;
+  /** Answers to findings */
+  answers?: Array<DraftAnswer>;
+};
+
+export type DraftSaveRequest = {
+  /** Revision of the draft upon which this is done */
+  revision: number;
+  /** Last posting that its author has seen; left out: as before */
+  base?: number;
+  /** All lines of the sheet */
+  lines?: Array<string>;
+  header?: DraftHeader;
+  cursor?: DraftCursor;
+  /** Answers to findings */
+  answers?: Array<DraftAnswer>;
+};
+
+export type DraftStepRequest = {
+  /** Revision of the draft upon which this is done */
+  revision: number;
+};
+
+export type DraftSubmitRequest = {
+  /** Revision of the draft upon which this is done */
+  revision: number;
+  /** Who submits it */
+  by: string;
+};
+
+export type DraftPostRequest = {
+  /** Revision of the draft upon which this is done */
+  revision: number;
+  /** Who posts */
+  by: string;
+  /** Why */
+  reason: string;
+};
+
+export type DraftCheckRequest = {
+
+};
+
+export type DraftFinding = {
+  /** Line, from 1 */
+  line: number;
+  /** Column, from 1 */
+  column: number;
+  /** Characters, 0 where something is missing or where it is about the sheet */
+  length: number;
+  /** error: it cannot be so, mend it. warning: mend it or answer it. prompt: answer it */
+  weight: "error" | "warning" | "prompt";
+  /** Stable code of the rule */
+  rule: string;
+  /** What is found */
+  text: string;
+  /** What would mend it */
+  mend: string;
+  /** The answer that was given */
+  answer: string | null;
+};
+
+export type DraftUnderstood = {
+  /** Line, from 1 */
+  line: number;
+  /** Column, from 1 */
+  column: number;
+  /** Characters, 0 where something is missing or where it is about the sheet */
+  length: number;
+  /** The ends, in the notation of the records */
+  ends: Array<string>;
+};
+
+export type DraftCircuit = {
+  /** Code */
+  circuit: string;
+  /** 1 first to be restored */
+  priority: number;
+  /** Customers */
+  customers_served: number;
+  /** Its first wavelength, nm */
+  wavelength_nm: number;
+  /** Whether a path joins its ports now */
+  whole_before: boolean;
+  /** Whether one would */
+  whole_after: boolean;
+  /** Greatest expected loss of its paths now, dB; null where not known */
+  loss_before_db: number | null;
+  /** The same as if posted, dB */
+  loss_after_db: number | null;
+};
+
+export type DraftCheck = {
+  /** Number of the draft */
+  draft: number;
+  /** Revision that was checked */
+  revision: number;
+  /** Last posting looked at */
+  posting: number;
+  /** By their places, prompts last */
+  findings: Array<DraftFinding>;
+  /** Whether nothing is open, so that it can be submitted */
+  ready: boolean;
+  /** By line */
+  understood: Array<DraftUnderstood>;
+  /** What the enclosure holds, as lines */
+  before: Array<string>;
+  /** What it would hold */
+  after: Array<string>;
+  /** How many records would change */
+  changes: number;
+  /** The first circuits touched, in the order to restore */
+  circuits: Array<DraftCircuit>;
+  /** How many are touched */
+  circuits_total: number;
+  /** Whether the author may not post it: a circuit of priority 1 or 2 is touched */
+  second_person: boolean;
+};
+
+export type DraftConflict = {
+  /** Line, from 1 */
+  line: number;
+  /** Column, from 1 */
+  column: number;
+  /** Characters, 0 where something is missing or where it is about the sheet */
+  length: number;
+  /** The leg, or the splitter's or panel's side */
+  leg: string;
+  /** The tube; blank where there is none */
+  tube: string;
+  /** The fibers, outputs or ports */
+  numbers: string;
+  /** What the first of them was when the author looked */
+  was: string;
+  /** What it is now */
+  is: string;
+  /** What the sheet says */
+  said: string;
+};
+
+export type DraftPasteRequest = {
+  /** Rows parted by line breaks, cells by tabs, else by commas; with a header or without */
+  text: string;
+};
+
+export type DraftCellDoubt = {
+  /** Row of the block, from 1 */
+  row: number;
+  /** Cell of the row, from 1 */
+  column: number;
+  /** What stands in it */
+  text: string;
+  /** What would be right */
+  mend: string;
+};
+
+export type DraftPaste = {
+  /** The lines, rows that carry on one another as ranges */
+  lines: Array<string>;
+  /** Every cell that is not understood */
+  doubts: Array<DraftCellDoubt>;
+};
+
 export type Element = ConnectorElement | SpliceElement | FiberElement | ThroughElement | JumperElement | SplitterElement;
 
 export type Enclosure = {
@@ -1466,13 +1733,19 @@ export type Problem = {
   /** What is wrong and what would be right */
   detail: string;
   /** Stable name of the problem. wavelength_out_of_range: a fiber on the path has no value there. forbidden: not from this machine, or from another site's page. unavailable: it took too long, or the server is at its bounds */
-  code: "not_found" | "bad_request" | "bad_reference" | "wavelength_out_of_range" | "refused" | "too_large" | "unsupported_media_type" | "method_not_allowed" | "forbidden" | "unavailable" | "internal";
+  code: "not_found" | "bad_request" | "bad_reference" | "wavelength_out_of_range" | "refused" | "too_large" | "unsupported_media_type" | "method_not_allowed" | "forbidden" | "unavailable" | "stale_revision" | "plant_changed" | "internal";
   /** The request that it answers */
   instance?: string;
   /** The query parameter that is wrong, where there is one */
   parameter?: string;
   /** For a refused posting: every fault, not only the first */
   faults?: Array<Fault>;
+  /** Of a stale revision: the draft as it is now */
+  theirs?: Draft;
+  /** Of a stale revision: the lines that were sent */
+  yours?: Array<string>;
+  /** Where the plant was changed meanwhile, a tube each */
+  conflicts?: Array<DraftConflict>;
 };
 
 export type RowChange = {

@@ -21,7 +21,8 @@ class ArchitectureTest {
             .then("check")
             .then("planning")
             .then("outage")
-            .then("sheet");
+            .then("sheet")
+            .then("draft");
 
     @Test
     void each_package_uses_only_those_before_it() {

@@ -18,6 +18,7 @@ import spanwright.answers.View;
 import spanwright.answers.Views;
 import spanwright.cli.Program;
 import spanwright.cli.WrongInput;
+import spanwright.draft.DraftDesk;
 import spanwright.exchange.Fault;
 import spanwright.exchange.FolderExport;
 import spanwright.exchange.FolderLoad;
@@ -185,6 +186,7 @@ final class Parts implements Program {
                 new FolderRows(),
                 new RowDesk(ledger),
                 new IncidentDesk(ledger, ledger.incidents(), Clock.systemUTC()),
+                new DraftDesk(ledger, ledger.drafts()),
                 version(),
                 demo);
     }

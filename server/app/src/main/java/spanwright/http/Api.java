@@ -3,6 +3,7 @@ package spanwright.http;
 import spanwright.answers.Changes;
 import spanwright.answers.RowTexts;
 import spanwright.answers.Views;
+import spanwright.draft.DraftDesk;
 import spanwright.outage.IncidentDesk;
 
 /**
@@ -13,6 +14,7 @@ import spanwright.outage.IncidentDesk;
  * @param rows writes records as rows
  * @param desk takes postings
  * @param incidents the incidents of the outage desk
+ * @param drafts the sheets of the records desk
  * @param version version of the program
  * @param demo whether these are the records of the demo
  */
@@ -22,5 +24,6 @@ public record Api(
         RowTexts rows,
         PostingDesk desk,
         IncidentDesk incidents,
+        DraftDesk drafts,
         String version,
         boolean demo) {}

@@ -1,6 +1,7 @@
 package spanwright.http;
 
 import java.util.List;
+import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
 import spanwright.answers.Json;
 import spanwright.answers.Unanswerable;
@@ -14,6 +15,7 @@ import spanwright.answers.Unanswerable;
  * @param detail what is wrong and what would be right
  * @param parameter the query parameter that is wrong, or null
  * @param faults for a refused posting every fault, else empty
+ * @param more writes what else it holds, or null
  */
 record Problem(
         int status,
@@ -21,13 +23,27 @@ record Problem(
         String code,
         String detail,
         @Nullable String parameter,
-        List<Fault> faults) {
+        List<Fault> faults,
+        @Nullable Consumer<Json> more) {
 
     /** What a problem document is sent as. */
     static final String CONTENT_TYPE = "application/problem+json";
 
     Problem {
         faults = List.copyOf(faults);
+    }
+
+    Problem(int status, String title, String code, String detail, @Nullable String parameter, List<Fault> faults) {
+        this(status, title, code, detail, parameter, faults, null);
+    }
+
+    /** The same with more members. */
+    Problem with(Consumer<Json> members) {
+        return new Problem(status, title, code, detail, parameter, faults, members);
+    }
+
+    static Problem conflict(String code, String detail) {
+        return new Problem(409, "Conflict", code, detail, null, List.of());
     }
 
     static Problem notFound(String detail) {
@@ -102,6 +118,9 @@ record Problem(
                         (item, fault) -> item.whole("change", fault.change)
                                 .text("column", fault.column)
                                 .text("text", fault.text));
+            }
+            if (more != null) {
+                more.accept(json);
             }
         });
     }

@@ -51,12 +51,28 @@ final class Routing {
         routes.post("/incidents/{id}/entries", incidents::write);
         routes.post("/incidents/{id}/close", incidents::close);
         routes.post("/repairs", new RepairRoute(api, guard, options.largestBody())::post);
+        drafts(new DraftRoutes(api, guard, options.largestBody()));
         get("/temporary", new TemporaryRoute(answering, api.incidents())::list);
         get("/openapi.json", Routing::openApi);
         get("/health", ctx -> {
             new Question(ctx);
             Answering.json(ctx, Json.bytes(json -> json.text("status", "ok")));
         });
+    }
+
+    private void drafts(DraftRoutes drafts) {
+        get("/drafts", drafts::list);
+        routes.post("/drafts", drafts::begin);
+        get("/drafts/{id}", drafts::one);
+        routes.post("/drafts/{id}/save", drafts::save);
+        routes.post("/drafts/{id}/undo", drafts::undo);
+        routes.post("/drafts/{id}/redo", drafts::redo);
+        routes.post("/drafts/{id}/check", timed.apply(drafts::check));
+        routes.post("/drafts/{id}/paste", timed.apply(drafts::paste));
+        routes.post("/drafts/{id}/submit", drafts::submit);
+        routes.post("/drafts/{id}/withdraw", drafts::withdraw);
+        routes.post("/drafts/{id}/drop", drafts::drop);
+        routes.post("/drafts/{id}/post", drafts::post);
     }
 
     private void get(String path, Handler handler) {

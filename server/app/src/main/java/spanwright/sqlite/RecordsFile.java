@@ -9,7 +9,7 @@ final class RecordsFile {
     static final int APPLICATION_ID = 0x53505752;
 
     /** The schema that this program writes: the number of the last migration. */
-    static final int SCHEMA = 2;
+    static final int SCHEMA = 3;
 
     private RecordsFile() {}
 

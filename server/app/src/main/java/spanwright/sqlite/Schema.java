@@ -17,7 +17,7 @@ import org.sqlite.SQLiteConnection;
 final class Schema {
 
     private static final String MIGRATIONS = "schema/migrations";
-    private static final List<String> NAMES = List.of("V1__records", "V2__incidents");
+    private static final List<String> NAMES = List.of("V1__records", "V2__incidents", "V3__drafts");
 
     private Schema() {}
 

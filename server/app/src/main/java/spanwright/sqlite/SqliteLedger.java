@@ -11,6 +11,7 @@ import java.util.NoSuchElementException;
 import java.util.Optional;
 import java.util.concurrent.CompletionStage;
 import org.jspecify.annotations.Nullable;
+import spanwright.draft.DraftBook;
 import spanwright.journal.Change;
 import spanwright.journal.Posting;
 import spanwright.network.Ledger;
@@ -32,6 +33,7 @@ public final class SqliteLedger implements Ledger {
     private final PostingLine line;
     private final ImageKeeper images;
     private final SqliteIncidents incidents;
+    private final SqliteDrafts drafts;
     private volatile Tip tip;
     private boolean closed;
 
@@ -48,6 +50,7 @@ public final class SqliteLedger implements Ledger {
         this.desk = new PostingDesk(store, clock, loaded.tip(), this::publish);
         this.line = new PostingLine(desk);
         this.incidents = new SqliteIncidents(readers, line, store, desk, clock);
+        this.drafts = new SqliteDrafts(readers, line, store, desk, clock);
         if (lock == null) {
             desk.shut("records-read-only", "The records file was opened to be read only, so nothing can be posted.");
         }
@@ -191,6 +194,11 @@ public final class SqliteLedger implements Ledger {
     /** The incidents kept in the same file. */
     public IncidentBook incidents() {
         return incidents;
+    }
+
+    /** The sheets being written, kept in the same file. */
+    public DraftBook drafts() {
+        return drafts;
     }
 
     /** The records file. */

@@ -12,6 +12,8 @@ import spanwright.answers.LastChanges;
 import spanwright.answers.RowTexts;
 import spanwright.answers.Views;
 import spanwright.boot.RecordsRows;
+import spanwright.draft.DraftDesk;
+import spanwright.draft.MemoryDrafts;
 import spanwright.journal.Change;
 import spanwright.journal.RecordKind;
 import spanwright.journal.Recorded;
@@ -116,6 +118,7 @@ final class TestServer implements AutoCloseable {
                 rows,
                 desk,
                 new IncidentDesk(ledger, new MemoryIncidents(Clock.systemUTC()), Clock.systemUTC()),
+                new DraftDesk(ledger, new MemoryDrafts(Clock.systemUTC())),
                 "0.1.0",
                 false);
     }

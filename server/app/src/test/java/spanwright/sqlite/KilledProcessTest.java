@@ -16,6 +16,7 @@ import java.util.concurrent.TimeUnit;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import spanwright.draft.Draft;
 import spanwright.journal.Change;
 import spanwright.network.RecordsText;
 import spanwright.network.Snapshot;
@@ -48,6 +49,23 @@ class KilledProcessTest {
             acknowledged = Math.max(acknowledged, killed(process, random, "written "));
             try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
                 assertThat(ledger.incidents().entries(1)).as("kill %d", kill).hasSizeGreaterThanOrEqualTo(acknowledged);
+            }
+        }
+        assertThat(acknowledged).isPositive();
+    }
+
+    @Test
+    void letters_acknowledged_before_a_kill_are_there() throws Exception {
+        Path file = folder.resolve("plant");
+        Random random = new Random(20260331);
+        int acknowledged = 0;
+        for (int kill = 0; kill < 4; kill++) {
+            Process process = PostingProcess.start(DraftProcess.class, file, 0);
+            acknowledged = Math.max(acknowledged, killed(process, random, "saved "));
+            try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+                Draft draft = ledger.drafts().find(1).orElseThrow();
+                assertThat(draft.revision()).as("kill %d", kill).isGreaterThanOrEqualTo(acknowledged);
+                assertThat(draft.text()).isEqualTo(DraftProcess.text(draft.revision()));
             }
         }
         assertThat(acknowledged).isPositive();

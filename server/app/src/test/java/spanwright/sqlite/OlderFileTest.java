@@ -12,10 +12,14 @@ import java.util.List;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import spanwright.draft.DraftOutcome;
+import spanwright.draft.DraftStart;
+import spanwright.draft.DraftText;
 import spanwright.network.RecordsText;
 import spanwright.outage.IncidentDraft;
 import spanwright.outage.IncidentStart;
 import spanwright.outage.Written;
+import spanwright.sheet.SheetHeader;
 
 /** A records file of the first schema: read as it is, brought up to date where it is written. */
 class OlderFileTest {
@@ -31,11 +35,13 @@ class OlderFileTest {
     @BeforeEach
     void makeOlderFile() throws SQLException {
         file = folder.resolve("plant.spanwright");
-        copy = folder.resolve("plant.spanwright.before-V2");
+        copy = folder.resolve("plant.spanwright.before-V3");
         try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
             Ledgers.postAtRandom(ledger, 5, 20);
             records = RecordsText.of(ledger.current());
         }
+        Ledgers.run(file, "DROP TABLE draft_version");
+        Ledgers.run(file, "DROP TABLE draft");
         Ledgers.run(file, "DROP TABLE incident_entry");
         Ledgers.run(file, "DROP TABLE incident");
         Ledgers.run(file, "PRAGMA user_version = 1");
@@ -49,12 +55,14 @@ class OlderFileTest {
     }
 
     @Test
-    void it_is_read_as_it_is_and_holds_no_incidents() throws SQLException {
+    void it_is_read_as_it_is_and_holds_no_incidents_and_no_drafts() throws SQLException {
         try (SqliteLedger ledger = Ledgers.open(file, Access.READ)) {
             assertThat(RecordsText.of(ledger.current())).isEqualTo(records);
             assertThat(ledger.asOf(1).records().posting()).isEqualTo(1);
             assertThat(ledger.incidents().list()).isEmpty();
             assertThat(ledger.incidents().find(1)).isEmpty();
+            assertThat(ledger.drafts().list()).isEmpty();
+            assertThat(ledger.drafts().find(1)).isEmpty();
         }
         assertThat(schema(file)).isEqualTo(1);
         assertThat(copy).doesNotExist();
@@ -74,7 +82,7 @@ class OlderFileTest {
                                     ledger.current().records().posting()))
                     .isInstanceOf(Written.Kept.class);
         }
-        assertThat(schema(file)).isEqualTo(2);
+        assertThat(schema(file)).isEqualTo(RecordsFile.SCHEMA);
         assertThat(schema(copy)).isEqualTo(1);
         assertThat(Ledgers.state(copy)).isEqualTo(state);
         try (SqliteLedger ledger = Ledgers.open(copy, Access.READ)) {
@@ -87,6 +95,23 @@ class OlderFileTest {
     }
 
     @Test
+    void a_file_of_the_schema_before_keeps_its_incidents_and_takes_drafts() throws SQLException {
+        Ledgers.open(file, Access.WRITE).close();
+        Ledgers.run(file, "DROP TABLE draft_version");
+        Ledgers.run(file, "DROP TABLE draft");
+        Ledgers.run(file, "DELETE FROM migration WHERE version = '3'");
+        Ledgers.run(file, "PRAGMA user_version = 2");
+
+        try (SqliteLedger ledger = Ledgers.open(file, Access.WRITE)) {
+            DraftText text = new DraftText(List.of("F-1 ahead 1 capped"), SheetHeader.NONE, 1, 1, List.of());
+            assertThat(ledger.drafts().begin(new DraftStart(1, "R. Vale", 1, text)))
+                    .isInstanceOf(DraftOutcome.Kept.class);
+            assertThat(RecordsText.of(ledger.current())).isEqualTo(records);
+        }
+        assertThat(schema(file)).isEqualTo(3);
+    }
+
+    @Test
     void a_bringing_up_to_date_that_was_broken_off_is_done_again() throws Exception {
         Files.writeString(RecordsFile.making(copy), "half a copy");
         Schema.bringUpToDate(file);
@@ -96,7 +121,7 @@ class OlderFileTest {
             assertThat(RecordsText.of(ledger.current())).isEqualTo(records);
             assertThat(ledger.incidents().list()).isEmpty();
         }
-        assertThat(schema(file)).isEqualTo(2);
+        assertThat(schema(file)).isEqualTo(RecordsFile.SCHEMA);
         assertThat(RecordsFile.making(copy)).doesNotExist();
     }
 

@@ -34,27 +34,27 @@ class SchemaTest {
 
     @Test
     void an_older_file_is_brought_up_to_date_with_all_that_it_holds() throws Exception {
-        Schema.bringUpTo(3, file, TO_COME);
+        Schema.bringUpTo(4, file, TO_COME);
 
-        assertThat(ask("PRAGMA user_version")).isEqualTo("3");
+        assertThat(ask("PRAGMA user_version")).isEqualTo("4");
         assertThat(ask("SELECT name, text FROM setting")).isEqualTo("owner|Valley Fiber");
         assertThat(ask("SELECT count(depth_um) FROM structure")).isEqualTo("0");
         assertThat(ask("SELECT version FROM migration WHERE success ORDER BY installed_rank"))
-                .isEqualTo("2\n3");
+                .isEqualTo("3\n4");
     }
 
     @Test
     void a_file_that_is_up_to_date_is_left_alone() throws Exception {
-        Schema.bringUpTo(3, file, TO_COME);
-        Schema.bringUpTo(3, file, "classpath:no-such-migrations");
+        Schema.bringUpTo(4, file, TO_COME);
+        Schema.bringUpTo(4, file, "classpath:no-such-migrations");
         Schema.bringUpToDate(file);
 
-        assertThat(ask("PRAGMA user_version")).isEqualTo("3");
+        assertThat(ask("PRAGMA user_version")).isEqualTo("4");
     }
 
     @Test
     void the_journal_of_an_older_schema_is_read_by_the_names_of_its_columns() throws Exception {
-        Schema.bringUpTo(3, file, TO_COME);
+        Schema.bringUpTo(4, file, TO_COME);
 
         try (Connection connection = DriverManager.getConnection("jdbc:sqlite:" + file)) {
             assertThat(Journal.changes(connection, 1)).hasSize(1);

@@ -58,7 +58,7 @@ public sealed interface Statement {
         }
 
         /** The same with other words. */
-        Joins saying(JointWords other) {
+        public Joins saying(JointWords other) {
             return new Joins(place, aPlace, bPlace, type, a, b, other);
         }
     }
