@@ -26,6 +26,7 @@ import spanwright.outage.IncidentDesk;
 import spanwright.outage.MemoryIncidents;
 import spanwright.plant.Setting;
 import spanwright.plants.RandomPlant;
+import spanwright.plants.RandomRing;
 import spanwright.records.Records;
 import spanwright.records.Refusal;
 
@@ -72,14 +73,7 @@ final class TestServer implements AutoCloseable {
     /** Posts all records of a state, as if read from a trusted store. */
     void plant(Snapshot snapshot) {
         post(editor -> {
-            for (RecordKind kind : RecordKind.values()) {
-                for (int id = 0; id < snapshot.records().limit(kind); id++) {
-                    Recorded record = snapshot.records().record(kind, id);
-                    if (record != null) {
-                        editor.replay(Change.add(record));
-                    }
-                }
-            }
+            RandomRing.changes(snapshot).forEach(editor::replay);
             return List.of();
         });
     }

@@ -3,6 +3,9 @@ package spanwright.plants;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
+import spanwright.journal.Change;
+import spanwright.journal.RecordKind;
+import spanwright.journal.Recorded;
 import spanwright.network.Snapshot;
 
 /**
@@ -32,6 +35,20 @@ public final class RandomRing {
         RandomRing ring = new RandomRing(seed);
         ring.draw();
         return Drawing.of(String.join("\n", ring.lines));
+    }
+
+    /** The changes that enter all records of a state, in an order in which they can be. */
+    public static List<Change> changes(Snapshot snapshot) {
+        List<Change> changes = new ArrayList<>();
+        for (RecordKind kind : RecordKind.values()) {
+            for (int id = 0; id < snapshot.records().limit(kind); id++) {
+                Recorded record = snapshot.records().record(kind, id);
+                if (record != null) {
+                    changes.add(Change.add(record));
+                }
+            }
+        }
+        return changes;
     }
 
     private void draw() {
