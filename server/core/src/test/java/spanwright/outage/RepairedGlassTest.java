@@ -128,9 +128,12 @@ class RepairedGlassTest {
     private static void whole(String at, Snapshot before, Snapshot after) {
         Tracer was = new Tracer(before);
         Tracer is = new Tracer(after);
-        before.records().circuits().list().forEach(circuit -> assertThat(is.ofCircuit(circuit))
-                .as("%s, %s", at, circuit.code())
-                .hasSameSizeAs(was.ofCircuit(circuit))
-                .allMatch(Path::complete));
+        before.records()
+                .circuits()
+                .list()
+                .forEach(circuit -> assertThat(is.ofCircuit(circuit))
+                        .as("%s, %s", at, circuit.code())
+                        .hasSameSizeAs(was.ofCircuit(circuit))
+                        .allMatch(Path::complete));
     }
 }
