@@ -21,6 +21,11 @@ class ArchitectureTest {
             .then("check")
             .then("planning")
             .then("outage")
+            .then("fault")
+            .then("suspicion")
+            .then("temporary")
+            .then("incident")
+            .then("repair")
             .then("sheet")
             .then("draft");
 

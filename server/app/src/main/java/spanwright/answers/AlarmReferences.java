@@ -8,8 +8,8 @@ import java.util.TreeSet;
 import java.util.stream.Collectors;
 import spanwright.answers.Unanswerable.Kind;
 import spanwright.circuits.Circuit;
-import spanwright.outage.Alarms;
-import spanwright.outage.PostedLately;
+import spanwright.suspicion.Alarms;
+import spanwright.suspicion.PostedLately;
 
 /** Reads which circuits are down and which are up. */
 public final class AlarmReferences {

@@ -2,10 +2,10 @@ package spanwright.answers;
 
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
-import spanwright.outage.Between;
-import spanwright.outage.Cause;
-import spanwright.outage.FaultPlace;
-import spanwright.outage.Where;
+import spanwright.fault.Between;
+import spanwright.fault.Cause;
+import spanwright.fault.FaultPlace;
+import spanwright.fault.Where;
 import spanwright.plant.PrintedMark;
 import spanwright.plant.Structure;
 import spanwright.trace.Fiber;

@@ -6,8 +6,8 @@ import java.util.List;
 import java.util.regex.Pattern;
 import org.jspecify.annotations.Nullable;
 import spanwright.answers.Unanswerable.Kind;
-import spanwright.outage.KnownEvent;
-import spanwright.outage.Reading;
+import spanwright.fault.KnownEvent;
+import spanwright.fault.Reading;
 import spanwright.quantity.Length;
 import spanwright.quantity.Wavelength;
 

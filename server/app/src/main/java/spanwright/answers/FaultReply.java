@@ -3,11 +3,11 @@ package spanwright.answers;
 import java.util.Locale;
 import java.util.Objects;
 import spanwright.answers.Unanswerable.Kind;
-import spanwright.outage.FaultAnswer;
-import spanwright.outage.FaultFinder;
-import spanwright.outage.FaultPlaces;
-import spanwright.outage.NotPlaced;
-import spanwright.outage.Reading;
+import spanwright.fault.FaultAnswer;
+import spanwright.fault.FaultFinder;
+import spanwright.fault.FaultPlaces;
+import spanwright.fault.NotPlaced;
+import spanwright.fault.Reading;
 
 /**
  * Where a distance read on an OTDR lies.

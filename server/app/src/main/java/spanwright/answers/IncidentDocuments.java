@@ -7,16 +7,16 @@ import java.time.Instant;
 import java.util.List;
 import java.util.TreeSet;
 import org.jspecify.annotations.Nullable;
-import spanwright.outage.Accrual;
-import spanwright.outage.EntryDraft;
-import spanwright.outage.Incident;
-import spanwright.outage.IncidentClock;
-import spanwright.outage.IncidentCounts;
-import spanwright.outage.IncidentDesk;
-import spanwright.outage.IncidentEntry;
-import spanwright.outage.IncidentLog;
-import spanwright.outage.ReportingStandings;
-import spanwright.outage.ReportingThreshold;
+import spanwright.incident.Accrual;
+import spanwright.incident.EntryDraft;
+import spanwright.incident.Incident;
+import spanwright.incident.IncidentClock;
+import spanwright.incident.IncidentCounts;
+import spanwright.incident.IncidentDesk;
+import spanwright.incident.IncidentEntry;
+import spanwright.incident.IncidentLog;
+import spanwright.incident.ReportingStandings;
+import spanwright.incident.ReportingThreshold;
 
 /** The documents of incidents: which there are, and one with its clock, its log and what it counts to. */
 public final class IncidentDocuments {

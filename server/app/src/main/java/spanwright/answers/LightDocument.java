@@ -13,16 +13,16 @@ import spanwright.circuits.Circuit;
 import spanwright.loss.BudgetCheck;
 import spanwright.network.Block;
 import spanwright.network.BlockKind;
-import spanwright.outage.DarkGroup;
-import spanwright.outage.GroupLight;
-import spanwright.outage.LightAnswer;
-import spanwright.outage.LightOffer;
-import spanwright.outage.Lit;
-import spanwright.outage.Refused;
 import spanwright.planning.NewJoint;
 import spanwright.planning.SpareWay;
 import spanwright.planning.SpareWork;
 import spanwright.plant.RunRow;
+import spanwright.temporary.DarkGroup;
+import spanwright.temporary.GroupLight;
+import spanwright.temporary.LightAnswer;
+import spanwright.temporary.LightOffer;
+import spanwright.temporary.Lit;
+import spanwright.temporary.Refused;
 
 /** The document of temporary paths. */
 public final class LightDocument {

@@ -4,12 +4,12 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import spanwright.circuits.Circuit;
-import spanwright.outage.ClosedPlant;
-import spanwright.outage.DownCircuits;
-import spanwright.outage.LightQuestion;
 import spanwright.quantity.Loss;
 import spanwright.splicing.EndKey;
 import spanwright.splicing.Panel;
+import spanwright.temporary.ClosedPlant;
+import spanwright.temporary.DownCircuits;
+import spanwright.temporary.LightQuestion;
 
 /** Reads the codes in a question for temporary paths. */
 public final class LightNames {

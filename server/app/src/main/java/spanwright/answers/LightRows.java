@@ -10,7 +10,6 @@ import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import spanwright.circuits.Circuit;
 import spanwright.circuits.PortRange;
-import spanwright.outage.LightOffer;
 import spanwright.planning.NewJoint;
 import spanwright.plant.FiberRange;
 import spanwright.splicing.EndKey;
@@ -18,6 +17,7 @@ import spanwright.splicing.EndRange;
 import spanwright.splicing.Joint;
 import spanwright.splicing.Leg;
 import spanwright.splicing.Panel;
+import spanwright.temporary.LightOffer;
 
 /** Writes a temporary path as the rows of one posting, and of the posting that takes it back. */
 final class LightRows {

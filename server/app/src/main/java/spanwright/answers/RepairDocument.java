@@ -1,7 +1,7 @@
 package spanwright.answers;
 
 import org.jspecify.annotations.Nullable;
-import spanwright.outage.RepairMade;
+import spanwright.repair.RepairMade;
 
 /** What a repair made, or would make. */
 public final class RepairDocument {

@@ -5,7 +5,6 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
-import spanwright.outage.Suspect;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Line;
 import spanwright.plant.Position;
@@ -13,6 +12,7 @@ import spanwright.plant.Span;
 import spanwright.plant.Structure;
 import spanwright.records.Records;
 import spanwright.records.Relation;
+import spanwright.suspicion.Suspect;
 
 /** Where a suspect lies: between which two structures, and its spans and enclosures on the map. */
 final class StretchDocument {

@@ -2,11 +2,11 @@ package spanwright.answers;
 
 import java.util.List;
 import spanwright.circuits.Circuit;
-import spanwright.outage.Suspect;
-import spanwright.outage.Suspects;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Span;
 import spanwright.splicing.Joint;
+import spanwright.suspicion.Suspect;
+import spanwright.suspicion.Suspects;
 
 /** The document of what explains an outage. */
 public final class SuspectsDocument {

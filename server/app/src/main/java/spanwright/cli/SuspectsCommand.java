@@ -17,7 +17,7 @@ import picocli.CommandLine.Spec;
 import spanwright.answers.AlarmReferences;
 import spanwright.answers.Json;
 import spanwright.answers.SuspectsDocument;
-import spanwright.outage.Suspects;
+import spanwright.suspicion.Suspects;
 
 /** Which spans and enclosures explain alarms. */
 @Command(

@@ -4,11 +4,11 @@ import java.io.PrintWriter;
 import java.util.List;
 import java.util.Locale;
 import spanwright.answers.View;
-import spanwright.outage.Suspect;
-import spanwright.outage.Suspects;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Span;
 import spanwright.quantity.LengthUnit;
+import spanwright.suspicion.Suspect;
+import spanwright.suspicion.Suspects;
 
 /** What explains alarms, as a table for a person, 100 columns wide at most. */
 final class SuspectsTable {

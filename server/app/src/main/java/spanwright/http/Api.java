@@ -4,7 +4,7 @@ import spanwright.answers.Changes;
 import spanwright.answers.RowTexts;
 import spanwright.answers.Views;
 import spanwright.draft.DraftDesk;
-import spanwright.outage.IncidentDesk;
+import spanwright.incident.IncidentDesk;
 
 /**
  * What the routes answer from.

@@ -12,15 +12,15 @@ import spanwright.answers.IncidentDocuments;
 import spanwright.answers.Json;
 import spanwright.answers.View;
 import spanwright.answers.Views;
-import spanwright.outage.EntryDraft;
-import spanwright.outage.EntryKind;
+import spanwright.incident.EntryDraft;
+import spanwright.incident.EntryKind;
+import spanwright.incident.Incident;
+import spanwright.incident.IncidentDesk;
+import spanwright.incident.IncidentDraft;
+import spanwright.incident.IncidentLog;
+import spanwright.incident.IncidentStart;
 import spanwright.outage.HitCircuit;
 import spanwright.outage.Impact;
-import spanwright.outage.Incident;
-import spanwright.outage.IncidentDesk;
-import spanwright.outage.IncidentDraft;
-import spanwright.outage.IncidentLog;
-import spanwright.outage.IncidentStart;
 
 /** Incidents: what there is, and the ways to open, follow and close one. */
 final class IncidentRoutes {

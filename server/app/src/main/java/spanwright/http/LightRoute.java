@@ -7,9 +7,9 @@ import spanwright.answers.LightNames;
 import spanwright.answers.RowTexts;
 import spanwright.answers.TraceQuestion;
 import spanwright.answers.View;
-import spanwright.outage.LightAnswer;
-import spanwright.outage.LightQuestion;
-import spanwright.outage.TemporaryPaths;
+import spanwright.temporary.LightAnswer;
+import spanwright.temporary.LightQuestion;
+import spanwright.temporary.TemporaryPaths;
 
 /** Temporary paths for what is down. It changes nothing. */
 final class LightRoute {

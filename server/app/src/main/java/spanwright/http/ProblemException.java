@@ -2,7 +2,7 @@ package spanwright.http;
 
 import java.io.Serial;
 import java.util.List;
-import spanwright.outage.Written;
+import spanwright.incident.Written;
 import spanwright.records.Refusal;
 
 /** Carries a problem from where a request is found wrong to the one place that answers it. */

@@ -6,8 +6,8 @@ import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
-import spanwright.outage.RepairOrder;
 import spanwright.quantity.Length;
+import spanwright.repair.RepairOrder;
 import spanwright.splicing.SpliceMethod;
 
 /**

@@ -3,7 +3,7 @@ package spanwright.http;
 import io.javalin.http.Context;
 import spanwright.answers.Json;
 import spanwright.answers.RepairDocument;
-import spanwright.outage.RepairDesk;
+import spanwright.repair.RepairDesk;
 
 /** A piece let into a cut cable: tried, or posted as one. */
 final class RepairRoute {

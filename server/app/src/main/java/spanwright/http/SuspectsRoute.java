@@ -5,7 +5,7 @@ import spanwright.answers.AlarmReferences;
 import spanwright.answers.Json;
 import spanwright.answers.SuspectsDocument;
 import spanwright.answers.View;
-import spanwright.outage.Suspects;
+import spanwright.suspicion.Suspects;
 
 /** Which spans and enclosures explain alarms. It is asked by a body, which may be long, and changes nothing. */
 final class SuspectsRoute {

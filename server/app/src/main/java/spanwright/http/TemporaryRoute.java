@@ -5,7 +5,7 @@ import java.time.LocalDate;
 import spanwright.answers.Json;
 import spanwright.answers.TemporaryDocument;
 import spanwright.answers.View;
-import spanwright.outage.IncidentDesk;
+import spanwright.incident.IncidentDesk;
 
 /** Temporary joints. What it answers changes with the day, so it is never answered from an earlier answer. */
 final class TemporaryRoute {

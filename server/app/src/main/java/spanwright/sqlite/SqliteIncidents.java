@@ -15,16 +15,16 @@ import java.util.function.Supplier;
 import org.jdbi.v3.core.Jdbi;
 import org.jdbi.v3.core.mapper.RowMapper;
 import org.jspecify.annotations.Nullable;
-import spanwright.outage.EntryDraft;
-import spanwright.outage.EntryKind;
-import spanwright.outage.Incident;
-import spanwright.outage.IncidentBook;
-import spanwright.outage.IncidentDraft;
-import spanwright.outage.IncidentEntry;
-import spanwright.outage.IncidentLog;
-import spanwright.outage.IncidentRules;
-import spanwright.outage.IncidentStart;
-import spanwright.outage.Written;
+import spanwright.incident.EntryDraft;
+import spanwright.incident.EntryKind;
+import spanwright.incident.Incident;
+import spanwright.incident.IncidentBook;
+import spanwright.incident.IncidentDraft;
+import spanwright.incident.IncidentEntry;
+import spanwright.incident.IncidentLog;
+import spanwright.incident.IncidentRules;
+import spanwright.incident.IncidentStart;
+import spanwright.incident.Written;
 import spanwright.records.Refusal;
 
 /**

@@ -12,12 +12,12 @@ import java.util.Optional;
 import java.util.concurrent.CompletionStage;
 import org.jspecify.annotations.Nullable;
 import spanwright.draft.DraftBook;
+import spanwright.incident.IncidentBook;
 import spanwright.journal.Change;
 import spanwright.journal.Posting;
 import spanwright.network.Ledger;
 import spanwright.network.Outcome;
 import spanwright.network.Snapshot;
-import spanwright.outage.IncidentBook;
 
 /** The ledger in a records file. Safe for any number of threads. */
 public final class SqliteLedger implements Ledger {

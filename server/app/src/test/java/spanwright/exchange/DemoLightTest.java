@@ -16,17 +16,17 @@ import spanwright.circuits.Circuit;
 import spanwright.network.BlockKind;
 import spanwright.network.Snapshot;
 import spanwright.network.SnapshotEditor;
-import spanwright.outage.ClosedPlant;
 import spanwright.outage.Cut;
-import spanwright.outage.DownCircuits;
-import spanwright.outage.GroupLight;
-import spanwright.outage.LightAnswer;
-import spanwright.outage.LightOffer;
-import spanwright.outage.LightQuestion;
-import spanwright.outage.Refused;
-import spanwright.outage.TemporaryPaths;
 import spanwright.quantity.Loss;
 import spanwright.splicing.Panel;
+import spanwright.temporary.ClosedPlant;
+import spanwright.temporary.DownCircuits;
+import spanwright.temporary.GroupLight;
+import spanwright.temporary.LightAnswer;
+import spanwright.temporary.LightOffer;
+import spanwright.temporary.LightQuestion;
+import spanwright.temporary.Refused;
+import spanwright.temporary.TemporaryPaths;
 
 /** Light another way for the backhoe of the demo. */
 class DemoLightTest {

@@ -16,14 +16,14 @@ import org.junit.jupiter.api.Test;
 import spanwright.circuits.Circuit;
 import spanwright.network.Snapshot;
 import spanwright.network.SnapshotEditor;
-import spanwright.outage.Alarms;
 import spanwright.outage.Cut;
 import spanwright.outage.HitCircuit;
 import spanwright.outage.Impact;
-import spanwright.outage.Suspect;
-import spanwright.outage.Suspects;
 import spanwright.plant.Enclosure;
 import spanwright.plant.Span;
+import spanwright.suspicion.Alarms;
+import spanwright.suspicion.Suspect;
+import spanwright.suspicion.Suspects;
 
 /** The stories of the demo, as their generator reckoned them: demo-data/stories. */
 class DemoStoriesTest {

@@ -27,12 +27,12 @@ import spanwright.circuits.Circuit;
 import spanwright.network.MemoryLedger;
 import spanwright.network.Outcome;
 import spanwright.network.Snapshot;
-import spanwright.outage.Alarms;
-import spanwright.outage.PostedLately;
-import spanwright.outage.Suspect;
-import spanwright.outage.Suspects;
 import spanwright.records.Refusal;
 import spanwright.splicing.Joint;
+import spanwright.suspicion.Alarms;
+import spanwright.suspicion.PostedLately;
+import spanwright.suspicion.Suspect;
+import spanwright.suspicion.Suspects;
 
 /**
  * The demo's second story, told by postings alone: where splices were made lately, crossed tubes come before a cut; where

@@ -5,13 +5,13 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Instant;
 import java.util.List;
-import spanwright.outage.EntryDraft;
-import spanwright.outage.EntryKind;
-import spanwright.outage.IncidentBook;
-import spanwright.outage.IncidentDraft;
-import spanwright.outage.IncidentEntry;
-import spanwright.outage.IncidentStart;
-import spanwright.outage.Written;
+import spanwright.incident.EntryDraft;
+import spanwright.incident.EntryKind;
+import spanwright.incident.IncidentBook;
+import spanwright.incident.IncidentDraft;
+import spanwright.incident.IncidentEntry;
+import spanwright.incident.IncidentStart;
+import spanwright.incident.Written;
 
 /**
  * A process of its own that writes entries into an incident's log until it is killed. It says {@code written N} once it

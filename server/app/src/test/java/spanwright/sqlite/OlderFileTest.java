@@ -15,10 +15,10 @@ import org.junit.jupiter.api.io.TempDir;
 import spanwright.draft.DraftOutcome;
 import spanwright.draft.DraftStart;
 import spanwright.draft.DraftText;
+import spanwright.incident.IncidentDraft;
+import spanwright.incident.IncidentStart;
+import spanwright.incident.Written;
 import spanwright.network.RecordsText;
-import spanwright.outage.IncidentDraft;
-import spanwright.outage.IncidentStart;
-import spanwright.outage.Written;
 import spanwright.sheet.SheetHeader;
 
 /** A records file of the first schema: read as it is, brought up to date where it is written. */

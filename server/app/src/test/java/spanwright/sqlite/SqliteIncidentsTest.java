@@ -13,13 +13,13 @@ import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import spanwright.outage.EntryDraft;
-import spanwright.outage.EntryKind;
-import spanwright.outage.IncidentBook;
-import spanwright.outage.IncidentBookContract;
-import spanwright.outage.IncidentDraft;
-import spanwright.outage.IncidentStart;
-import spanwright.outage.Written;
+import spanwright.incident.EntryDraft;
+import spanwright.incident.EntryKind;
+import spanwright.incident.IncidentBook;
+import spanwright.incident.IncidentBookContract;
+import spanwright.incident.IncidentDraft;
+import spanwright.incident.IncidentStart;
+import spanwright.incident.Written;
 
 class SqliteIncidentsTest extends IncidentBookContract {
 

@@ -16,17 +16,17 @@ import spanwright.splicing.LegKind;
  * The ways that circuits take, the same that a trace of each circuit gives. What was asked is kept, so one of these
  * serves one question; one thread's.
  */
-final class CircuitRoutes {
+public final class CircuitRoutes {
 
     private final Network network;
     private final Map<Integer, Ways> from = new HashMap<>();
 
-    CircuitRoutes(Network network) {
+    public CircuitRoutes(Network network) {
         this.network = network;
     }
 
     /** The routes of a circuit, one a fiber; where none joins its ports, the one from its a as far as it is plain. */
-    List<Route> of(Circuit circuit) {
+    public List<Route> of(Circuit circuit) {
         List<Route> routes = new ArrayList<>();
         for (int index = 0; index < circuit.fibers(); index++) {
             int a = front(circuit.a(), index);
@@ -62,7 +62,7 @@ final class CircuitRoutes {
     }
 
     /** The ends by which a route enters the pieces of one of its glass paths. */
-    int[] glass(Route route, int entering) {
+    public int[] glass(Route route, int entering) {
         int[] enterings = route.enterings();
         if (enterings.length == 1 && route.whole() && onePath(entering, route.target())) {
             return whole(entering);

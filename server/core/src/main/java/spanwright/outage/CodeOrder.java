@@ -3,10 +3,10 @@ package spanwright.outage;
 import java.util.Comparator;
 
 /** The order of codes. */
-final class CodeOrder {
+public final class CodeOrder {
 
     /** By code point; Java's own order of strings differs beyond the basic plane. */
-    static final Comparator<String> BY_CODE_POINT = CodeOrder::compare;
+    public static final Comparator<String> BY_CODE_POINT = CodeOrder::compare;
 
     private CodeOrder() {}
 

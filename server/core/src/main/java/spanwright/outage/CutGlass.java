@@ -23,7 +23,7 @@ import spanwright.records.Records;
 import spanwright.records.Relation;
 
 /** The glass that cuts take: fibers of cable sections, and all that lies in enclosures. Only what is in service. */
-final class CutGlass {
+public final class CutGlass {
 
     private final Records records;
     private final Network network;
@@ -36,7 +36,7 @@ final class CutGlass {
     private final PieceRanges atFirst;
     private final PieceRanges atSecond;
 
-    CutGlass(Snapshot snapshot, Collection<Cut> cuts) {
+    public CutGlass(Snapshot snapshot, Collection<Cut> cuts) {
         records = snapshot.records();
         network = snapshot.network();
         cuts.forEach(this::cut);
@@ -175,12 +175,12 @@ final class CutGlass {
     }
 
     /** The enclosures that are cut open. */
-    Set<Integer> enclosures() {
+    public Set<Integer> enclosures() {
         return Set.copyOf(enclosures);
     }
 
     /** The cut sections by cable and along it. */
-    List<CutSection> sections() {
+    public List<CutSection> sections() {
         return sections.entrySet().stream()
                 .map(entry -> new CutSection(entry.getKey(), entry.getValue()))
                 .sorted(Comparator.<CutSection, String>comparing(

@@ -7,12 +7,12 @@ package spanwright.outage;
  * @param target the front where it ends, or -1 where it does not come there
  */
 @SuppressWarnings("ArrayRecordComponent") // Made and read in this package alone, by the thousand; never compared.
-record Route(int[] enterings, int target) {
+public record Route(int[] enterings, int target) {
 
     static final Route NOWHERE = new Route(new int[0], -1);
 
     /** Whether it comes from the circuit's a to its z. */
-    boolean whole() {
+    public boolean whole() {
         return target >= 0;
     }
 }

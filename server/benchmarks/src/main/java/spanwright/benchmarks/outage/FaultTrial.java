@@ -4,11 +4,11 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.random.RandomGenerator;
 import spanwright.benchmarks.outage.TrueRoute.Reel;
-import spanwright.outage.FaultFinder;
-import spanwright.outage.FaultPlace;
-import spanwright.outage.FaultPlaces;
-import spanwright.outage.KnownEvent;
-import spanwright.outage.Reading;
+import spanwright.fault.FaultFinder;
+import spanwright.fault.FaultPlace;
+import spanwright.fault.FaultPlaces;
+import spanwright.fault.KnownEvent;
+import spanwright.fault.Reading;
 import spanwright.quantity.Length;
 import spanwright.quantity.Wavelength;
 

@@ -9,12 +9,12 @@ import java.util.Set;
 import spanwright.circuits.Circuit;
 import spanwright.circuits.CircuitStatus;
 import spanwright.network.Snapshot;
-import spanwright.outage.Alarms;
+import spanwright.suspicion.Alarms;
 import spanwright.outage.Cut;
 import spanwright.outage.HitCircuit;
 import spanwright.outage.Impact;
-import spanwright.outage.Suspect;
-import spanwright.outage.Suspects;
+import spanwright.suspicion.Suspect;
+import spanwright.suspicion.Suspects;
 import spanwright.plant.Span;
 
 /**
