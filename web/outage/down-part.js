@@ -3,8 +3,9 @@ import { ask } from "../server/index.js";
 import { UnitController } from "../quantity/index.js";
 import { link } from "../address/index.js";
 import { figure } from "../basis/index.js";
-import { cutInWords, readCut, thingOf } from "./cuts.js";
+import { cutInWords, readCut, thingOf, writeCut } from "./cuts.js";
 import { cutList } from "./cut-list.js";
+import { printLinks } from "./print-links.js";
 import { unlike } from "./unlike.js";
 
 /** @typedef {import("../server/contract.d.ts").ImpactAnswer} ImpactAnswer */
@@ -105,6 +106,7 @@ export class WhoIsDown extends LitElement {
       <p>${figure("Circuits down", "count", down, basis)} circuits <strong class="state-down">down</strong>,
         ${figure("Circuits left single", "count", it.circuits.length - down, basis)} left <strong class="state-single">single</strong>: they work, unprotected.
         ${figure("Fibers cut", "count", it.fibers_cut, { how: "counted", source: "Fibers of the cut cables, lit or dark, each once" })} fibers cut.</p>
+      ${printLinks("The cut list", "cut-list", this.cuts.map((cut) => ["cut", writeCut(cut)]))}
       ${this.byPriority(it)}${this.circuits(it)}${cutList(it)}`;
   }
 

@@ -4,6 +4,8 @@ import { figure } from "../basis/index.js";
 import { length, inWords, units } from "../quantity/index.js";
 import { cautionsOf, placeLines, textOf } from "./fault-words.js";
 import { withCuts } from "./cuts.js";
+import { printLinks } from "./print-links.js";
+import { questionOf } from "./reading.js";
 
 /** @typedef {import("../server/contract.d.ts").FaultAnswer} FaultAnswer */
 /** @typedef {import("../server/contract.d.ts").FaultPlace} FaultPlace */
@@ -44,7 +46,19 @@ export function faultView(answer, chosen, shot, asked) {
     ${cautionsOf(place).map((each) => html`<p class="warning">${each}</p>`)}
     ${places(answer, chosen, said)}${between(answer)}
     ${place.cable === null ? nothing : facts(place, said)}
+    ${printLinks("The crew's page", "crew", crewAsked(shot, answer.places.indexOf(place) + 1))}
     <p class="act"><a class="main" href=${hrefTo("outage", "down", downHere(place, asked))}>Who is down if it is cut here</a></p>`;
+}
+
+/**
+ * What the crew's page is asked: the shot as the server reads it, and which of its places.
+ * @param {Shot} shot
+ * @param {number} place from 1
+ * @returns {Array<[string, string]>}
+ */
+function crewAsked(shot, place) {
+  const asked = Object.entries(questionOf(shot)).flatMap(([name, value]) => [value].flat().filter((each) => each !== "").map((each) => /** @type {[string, string]} */ ([name, each])));
+  return [...asked, ["place", String(place)]];
 }
 
 /**

@@ -3,6 +3,7 @@ import { currentAddress, formatAddress, link } from "../address/index.js";
 import { figure } from "../basis/index.js";
 import { decimal, timeInWords } from "../quantity/index.js";
 import { KINDS } from "./incident-forms.js";
+import { printLinks } from "./print-links.js";
 import { minutesInWords } from "./times.js";
 
 /** @typedef {import("../server/contract.d.ts").Incident} Incident */
@@ -27,6 +28,7 @@ export function incidentSheet(it, zone) {
     <p>${figure("Circuits down", "count", counts.circuits_down.length, basis)} circuits <strong class="state-down">down</strong>, ${figure("Circuits back", "count", counts.circuits_back.length, basis)} back.
       ${counts.first_priority_down.length > 0 ? html`<strong>Priority 1 down: ${counts.first_priority_down.map((each, index) => html`${index > 0 ? ", " : ""}${link("circuit", each)}`)}.</strong>` : nothing}</p>
     ${counts.single_path.map((each) => html`<p><strong class="state-single">${each.protection_group}</strong> ${each.now ? "runs" : "ran"} on a single path, ${decimal(each.days, 2)} days in all.</p>`)}
+    ${it.from.cuts.length > 0 ? printLinks("The cut list of the incident", "cut-list", [["incident", String(it.incident)]]) : nothing}
     ${clock(it, zone)}${thresholds(it, zone)}${log(it, zone)}`;
 }
 

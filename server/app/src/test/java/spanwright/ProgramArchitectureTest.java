@@ -10,6 +10,7 @@ class ProgramArchitectureTest {
     @Test
     void adapters_never_use_each_other() {
         PROGRAM.keepsApart("sqlite", "exchange", "http", "cli");
+        PROGRAM.keepsApart("sqlite", "exchange", "paper");
     }
 
     @Test
@@ -35,6 +36,12 @@ class ProgramArchitectureTest {
     @Test
     void the_command_line_stays_with_its_adapter() {
         PROGRAM.only("cli", "boot").use("picocli..");
+    }
+
+    @Test
+    void what_makes_PDF_stays_with_the_paper() {
+        PROGRAM.only("paper")
+                .use("com.openhtmltopdf..", "org.apache.pdfbox..", "org.apache.fontbox..", "com.google.zxing..");
     }
 
     @Test

@@ -7,12 +7,13 @@ import spanwright.plant.CableType;
 import spanwright.plant.FiberColors;
 
 /** The colours of a cable's tubes and fibers, in words. */
-final class Colors {
+public final class Colors {
 
     private final CableType type;
     private final FiberColors order;
 
-    Colors(View view, CableType type) {
+    /** Of a type of cable. */
+    public Colors(View view, CableType type) {
         this.type = type;
         this.order = view.catalogue()
                 .findColors(type.colors())
@@ -20,11 +21,13 @@ final class Colors {
                 .orElseThrow();
     }
 
-    String tube(int tube) {
+    /** The colour of a tube, from 1. */
+    public String tube(int tube) {
         return order.at(tube);
     }
 
-    String fiber(int fiber) {
+    /** The colour of a fiber, from 1, within its tube. */
+    public String fiber(int fiber) {
         return order.at(type.positionInTube(fiber));
     }
 

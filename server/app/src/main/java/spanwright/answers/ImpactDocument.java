@@ -1,17 +1,10 @@
 package spanwright.answers;
 
-import java.util.ArrayList;
-import java.util.Comparator;
-import java.util.HashMap;
-import java.util.List;
-import java.util.Map;
 import spanwright.circuits.Circuit;
-import spanwright.circuits.CircuitStatus;
 import spanwright.network.Block;
 import spanwright.outage.CutSection;
 import spanwright.outage.HitCircuit;
 import spanwright.outage.Impact;
-import spanwright.planning.SectionUse;
 import spanwright.plant.CableType;
 import spanwright.plant.Enclosure;
 import spanwright.records.CableLay;
@@ -22,7 +15,7 @@ public final class ImpactDocument {
     private final View view;
     private final Impact impact;
     private final boolean fibers;
-    private final Map<Integer, Integer> rank = new HashMap<>();
+    private final CutFibers restored;
 
     /**
      * Of an answer.
@@ -33,7 +26,7 @@ public final class ImpactDocument {
         this.view = view;
         this.impact = impact;
         this.fibers = fibers;
-        impact.circuits().forEach(hit -> rank.put(hit.circuit().id(), rank.size()));
+        this.restored = new CutFibers(view, impact);
     }
 
     /** Writes its members. */
@@ -66,45 +59,15 @@ public final class ImpactDocument {
                 .text("to_structure", lay.structure(to).code());
         CableType type = lay.type();
         Colors colors = new Colors(view, type);
-        json.list("fibers", inOrder(cut), (item, fiber) -> fiber(item, fiber, type, colors));
+        json.list("fibers", restored.inOrder(cut), (item, fiber) -> fiber(item, fiber, type, colors));
     }
 
-    /** The fibers in the order to restore: those of the first circuits first, dark ones last. */
-    private List<CutFiber> inOrder(CutSection cut) {
-        List<CutFiber> found = new ArrayList<>();
-        for (int number : cut.fibers()) {
-            SectionUse use = view.uses().of(cut.section(), number);
-            List<Circuit> carried = use.circuits().stream()
-                    .filter(circuit -> circuit.status() == CircuitStatus.WORKING)
-                    .sorted(Comparator.comparingInt(circuit -> rank.getOrDefault(circuit.id(), rank.size())))
-                    .toList();
-            int first = carried.isEmpty()
-                    ? Integer.MAX_VALUE
-                    : rank.getOrDefault(carried.get(0).id(), rank.size());
-            found.add(new CutFiber(number, carried, use, first));
-        }
-        found.sort(Comparator.comparingInt(CutFiber::rank).thenComparingInt(CutFiber::number));
-        return found;
+    private void fiber(Json json, CutFibers.CutFiber fiber, CableType type, Colors colors) {
+        int tube = type.tubeOf(fiber.number());
+        json.whole("fiber", fiber.number()).whole("tube", tube);
+        json.text("tube_color", colors.tube(tube)).text("fiber_color", colors.fiber(fiber.number()));
+        json.texts("carries", fiber.carries().stream().map(Circuit::code).toList());
+        json.whole("priority", fiber.priority());
+        json.text("state", restored.state(fiber));
     }
-
-    private void fiber(Json json, CutFiber fiber, CableType type, Colors colors) {
-        int tube = type.tubeOf(fiber.number);
-        json.whole("fiber", fiber.number).whole("tube", tube);
-        json.text("tube_color", colors.tube(tube)).text("fiber_color", colors.fiber(fiber.number));
-        json.texts("carries", fiber.carries.stream().map(Circuit::code).toList());
-        json.whole(
-                "priority",
-                fiber.carries.isEmpty() ? null : (Integer) fiber.carries.get(0).priority());
-        json.text("state", state(fiber));
-    }
-
-    /** {@code down} or {@code single} as the first circuit on it is, else what else the fiber is used for. */
-    private String state(CutFiber fiber) {
-        return fiber.rank < impact.circuits().size()
-                ? impact.circuits().get(fiber.rank).single() ? "single" : "down"
-                : fiber.use.use().word();
-    }
-
-    /** A fiber of a cut section, with the rank of the first circuit on it. */
-    private record CutFiber(int number, List<Circuit> carries, SectionUse use, int rank) {}
 }

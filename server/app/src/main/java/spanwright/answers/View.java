@@ -95,23 +95,22 @@ public final class View {
     }
 
     /** What fibers are used for. */
-    FiberUses uses() {
+    public FiberUses uses() {
         return uses;
     }
 
     /** What is recorded of ends without a joint. */
-    EndStates endStates() {
+    public EndStates endStates() {
         return endStates;
     }
 
     /** How a cable lies. */
-    CableLay lay(int cable) {
+    public CableLay lay(int cable) {
         return lays.computeIfAbsent(cable, id -> CableLay.of(records(), id));
     }
 
     /** A setting's value, or null. */
-    @Nullable
-    String setting(String name) {
+    public @Nullable String setting(String name) {
         return records().settings().find(name).map(setting -> setting.value()).orElse(null);
     }
 

@@ -10,6 +10,22 @@ import spanwright.answers.FaultReply;
 /** Where a distance read on an OTDR lies. */
 final class FaultRoute {
 
+    /** The parameters of a shot, and those of every view. */
+    static final List<String> PARAMETERS = List.of(
+            "port",
+            "from",
+            "to",
+            "distance",
+            "index",
+            "launch",
+            "wavelength",
+            "event",
+            "far_port",
+            "far_distance",
+            "far_launch",
+            Answering.AS_OF,
+            Answering.AS_IF);
+
     private static final int MOST_EVENTS = 200;
 
     private final Answering answering;
@@ -19,21 +35,7 @@ final class FaultRoute {
     }
 
     void fault(Context ctx) {
-        Question question = new Question(
-                ctx,
-                "port",
-                "from",
-                "to",
-                "distance",
-                "index",
-                "launch",
-                "wavelength",
-                "event",
-                "far_port",
-                "far_distance",
-                "far_launch",
-                Answering.AS_OF,
-                Answering.AS_IF);
+        Question question = new Question(ctx, PARAMETERS.toArray(String[]::new));
         FaultQuestion asked = asked(question);
         answering.answer(
                 ctx,
@@ -41,7 +43,8 @@ final class FaultRoute {
                 (json, view) -> new FaultDocument(FaultReply.of(view, asked)).write(json));
     }
 
-    private static FaultQuestion asked(Question question) {
+    /** The question that the parameters ask. */
+    static FaultQuestion asked(Question question) {
         List<String> events = question.texts("event");
         if (events.size() > MOST_EVENTS) {
             throw Question.wrong("event", "One question names " + MOST_EVENTS + " events at most.");

@@ -53,6 +53,11 @@ final class Routing {
         routes.post("/repairs", new RepairRoute(api, guard, options.largestBody())::post);
         drafts(new DraftRoutes(api, guard, options.largestBody()));
         get("/temporary", new TemporaryRoute(answering, api.incidents())::list);
+        PaperRoutes paper = new PaperRoutes(api);
+        get("/paper/cut-list", paper::cutList);
+        get("/paper/cut-list.pdf", paper::cutList);
+        get("/paper/crew", paper::crew);
+        get("/paper/crew.pdf", paper::crew);
         get("/openapi.json", Routing::openApi);
         get("/health", ctx -> {
             new Question(ctx);

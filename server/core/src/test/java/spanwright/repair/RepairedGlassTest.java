@@ -1,5 +1,6 @@
-package spanwright.outage;
+package spanwright.repair;
 
+import spanwright.incident.Written;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.math.BigDecimal;
