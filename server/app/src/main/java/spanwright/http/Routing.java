@@ -21,7 +21,22 @@ final class Routing {
     }
 
     void add(Api api, Guard guard, Answering answering, ServerOptions options) {
-        PlantRoutes plant = new PlantRoutes(api, answering, options.tile());
+        plant(new PlantRoutes(api, answering, options.tile()));
+        questions(api, guard, answering);
+        postings(new JournalRoutes(api, answering, guard, options.largestBody()));
+        incidents(new IncidentRoutes(api, guard, options.largestBody()));
+        routes.post("/repairs", new RepairRoute(api, guard, options.largestBody())::post);
+        drafts(new DraftRoutes(api, guard, options.largestBody()));
+        get("/temporary", new TemporaryRoute(answering, api.incidents())::list);
+        papers(new PaperRoutes(api));
+        get("/openapi.json", Routing::openApi);
+        get("/health", ctx -> {
+            new Question(ctx);
+            Answering.json(ctx, Json.bytes(json -> json.text("status", "ok")));
+        });
+    }
+
+    private void plant(PlantRoutes plant) {
         get("/status", plant::status);
         get("/find", plant::find);
         get("/map/plant", plant::mapPlant);
@@ -32,37 +47,38 @@ final class Routing {
         get("/cables/{code}", plant::cable);
         get("/circuits", plant::circuits);
         get("/circuits/{code}", plant::circuit);
+    }
+
+    private void questions(Api api, Guard guard, Answering answering) {
         get("/trace", new TraceRoute(answering)::trace);
         get("/fault", new FaultRoute(answering)::fault);
         get("/spares", new SparesRoute(answering)::spares);
         routes.post("/suspects", timed.apply(new SuspectsRoute(answering, guard)::suspects));
         get("/impact", new ImpactRoute(answering)::impact);
         routes.post("/light", timed.apply(new LightRoute(answering, api.rows(), guard)::light));
-        JournalRoutes journal = new JournalRoutes(api, answering, guard, options.largestBody());
+    }
+
+    private void postings(JournalRoutes journal) {
         get("/postings", journal::list);
         // A posting is never stopped half way: who sent it would not know whether it was kept.
         routes.post("/postings", journal::post);
         get("/postings/{id}", journal::one);
         routes.post("/postings/{id}/undo", journal::undo);
-        IncidentRoutes incidents = new IncidentRoutes(api, guard, options.largestBody());
+    }
+
+    private void incidents(IncidentRoutes incidents) {
         get("/incidents", incidents::list);
         routes.post("/incidents", incidents::open);
         get("/incidents/{id}", incidents::one);
         routes.post("/incidents/{id}/entries", incidents::write);
         routes.post("/incidents/{id}/close", incidents::close);
-        routes.post("/repairs", new RepairRoute(api, guard, options.largestBody())::post);
-        drafts(new DraftRoutes(api, guard, options.largestBody()));
-        get("/temporary", new TemporaryRoute(answering, api.incidents())::list);
-        PaperRoutes paper = new PaperRoutes(api);
+    }
+
+    private void papers(PaperRoutes paper) {
         get("/paper/cut-list", paper::cutList);
         get("/paper/cut-list.pdf", paper::cutList);
         get("/paper/crew", paper::crew);
         get("/paper/crew.pdf", paper::crew);
-        get("/openapi.json", Routing::openApi);
-        get("/health", ctx -> {
-            new Question(ctx);
-            Answering.json(ctx, Json.bytes(json -> json.text("status", "ok")));
-        });
     }
 
     private void drafts(DraftRoutes drafts) {

@@ -9,14 +9,14 @@ import java.util.stream.LongStream;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import spanwright.incident.Written;
 import spanwright.network.MemoryLedger;
 import spanwright.network.Snapshot;
 import spanwright.network.SnapshotEditor;
-import spanwright.repair.RepairDesk;
-import spanwright.repair.RepairOrder;
-import spanwright.incident.Written;
 import spanwright.plants.RandomRing;
 import spanwright.quantity.Length;
+import spanwright.repair.RepairDesk;
+import spanwright.repair.RepairOrder;
 import spanwright.splicing.SpliceMethod;
 import spanwright.trace.Tracer;
 

@@ -1,6 +1,5 @@
 package spanwright.repair;
 
-import spanwright.incident.Written;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.math.BigDecimal;
@@ -9,6 +8,7 @@ import java.util.List;
 import java.util.Random;
 import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.Test;
+import spanwright.incident.Written;
 import spanwright.network.MemoryLedger;
 import spanwright.network.RecordsText;
 import spanwright.network.Snapshot;

@@ -9,13 +9,13 @@ import java.util.Set;
 import spanwright.circuits.Circuit;
 import spanwright.circuits.CircuitStatus;
 import spanwright.network.Snapshot;
-import spanwright.suspicion.Alarms;
 import spanwright.outage.Cut;
 import spanwright.outage.HitCircuit;
 import spanwright.outage.Impact;
+import spanwright.plant.Span;
+import spanwright.suspicion.Alarms;
 import spanwright.suspicion.Suspect;
 import spanwright.suspicion.Suspects;
-import spanwright.plant.Span;
 
 /**
  * One span cut whole, and what the program makes of the alarms.
