@@ -3,6 +3,7 @@ import { Asking, Problem, ask, askAnytime, send, waiting } from "../server/index
 import { timeInWords } from "../quantity/index.js";
 import { beginForm, entryForm } from "./incident-forms.js";
 import { incidentSheet } from "./incident-view.js";
+import "./repair-part.js";
 import "./temporary-part.js";
 
 /** @typedef {import("../server/contract.d.ts").Incident} Incident */
@@ -111,9 +112,15 @@ export class IncidentPart extends LitElement {
   render() {
     const known = this.asking.answer;
     const said = this.problem ? html`<p class="problem" role="alert">${this.problem.message}</p>` : nothing;
-    if (known?.incident && this.number) return html`${said}${waiting(this.asking)}${incidentSheet(known.incident, this.zone)}${entryForm(this, known.incident)}${this.temporary(known.temporary)}`;
+    if (known?.incident && this.number) return html`${said}${waiting(this.asking)}${incidentSheet(known.incident, this.zone)}${entryForm(this, known.incident)}${this.repair(known.incident)}${this.temporary(known.temporary)}`;
     if (known?.list && !this.number) return html`${said}${this.incidents(known.list)}${beginForm(this)}${this.temporary(known.temporary)}`;
     return html`${said}${waiting(this.asking)}`;
+  }
+
+  /** @param {Incident} incident @returns {unknown} */
+  repair({ incident, title }) {
+    const span = this.hand.cuts.find((cut) => cut.startsWith("span:"))?.slice("span:".length) ?? "";
+    return html`<sw-repair .incident=${String(incident)} .called=${title} .span=${span} .zone=${this.zone} @sw-posted=${() => this.read()}></sw-repair>`;
   }
 
   /** @param {TemporaryList | null} list @returns {unknown} */

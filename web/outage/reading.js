@@ -122,7 +122,7 @@ function plain(text) {
  * @param {string} text
  * @returns {boolean} whether it is a plain number, 0 or above
  */
-function isNumber(text) {
+export function isNumber(text) {
   return /^\d+(\.\d+)?$/.test(plain(text));
 }
 
@@ -131,7 +131,7 @@ function isNumber(text) {
  * @param {Unit} unit
  * @returns {string} metres, to a tenth of a millimetre; empty for nothing
  */
-function metres(text, unit) {
+export function metres(text, unit) {
   if (text === "" || unit === "m") return plain(text);
   return String(Number((Number(plain(text)) * METRES_PER_FOOT).toFixed(4)));
 }

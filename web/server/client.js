@@ -1,6 +1,7 @@
 /** Questions to the server, as `schema/openapi.json` says. */
 
 /** @typedef {import('./contract.d.ts').Problem} ProblemBody */
+/** @typedef {import('./contract.d.ts').Fault} Fault */
 
 /**
  * @typedef {string | number | boolean | readonly string[] | null | undefined} Param several of a name as a list
@@ -12,11 +13,13 @@ export class Problem extends Error {
    * @param {string} code stable name: `not_found`, `unreachable`, ...
    * @param {string} detail what is wrong and what would be right
    * @param {string} [parameter] the parameter that is wrong, where there is one
+   * @param {Fault[]} [faults] of a refused posting: each by itself
    */
-  constructor(code, detail, parameter = "") {
+  constructor(code, detail, parameter = "", faults = []) {
     super(detail);
     this.code = code;
     this.parameter = parameter;
+    this.faults = faults;
   }
 }
 
@@ -117,7 +120,7 @@ async function reach(address, signal, how = {}) {
 async function problemOf(response) {
   try {
     const body = /** @type {ProblemBody} */ (await response.json());
-    return new Problem(body.code, [body.detail, ...(body.faults ?? []).map((fault) => fault.text)].join(" "), body.parameter);
+    return new Problem(body.code, [body.detail, ...(body.faults ?? []).map((fault) => fault.text)].join(" "), body.parameter, body.faults);
   } catch {
     return new Problem("internal", `The server answered ${response.status} and did not say why.`);
   }
