@@ -59,6 +59,7 @@ final class Sheets {
         html.empty("meta", "charset", "utf-8").element("title", title + ": " + place);
         html.empty("meta", "name", "description", "content", title + " of " + place);
         html.empty("meta", "name", "viewport", "content", "width=device-width, initial-scale=1");
+        html.empty("link", "rel", "icon", "type", "image/svg+xml", "href", "/mark.svg");
         html.empty("link", "rel", "stylesheet", "type", "text/css", "href", "/style/paper.css");
         html.empty("link", "rel", "stylesheet", "type", "text/css", "href", "/style/paper-" + size.word() + ".css");
         html.close().open("body", "class", "paper");
