@@ -3,9 +3,6 @@ package spanwright.sqlite;
 import java.sql.Connection;
 import java.sql.PreparedStatement;
 import java.sql.SQLException;
-import java.time.Clock;
-import java.time.Instant;
-import java.time.temporal.ChronoUnit;
 import java.util.List;
 import java.util.NoSuchElementException;
 import java.util.Optional;
@@ -32,24 +29,16 @@ final class SqliteDrafts implements DraftBook {
     private static final String SELECT =
             "SELECT * FROM draft JOIN draft_version ON draft_version.draft = draft.id AND number = at";
 
-    private final Readers readers;
+    private final BookTurn turn;
     private final Jdbi jdbi;
-    private final PostingLine line;
-    private final Store store;
-    private final PostingDesk desk;
-    private final Clock clock;
 
-    SqliteDrafts(Readers readers, PostingLine line, Store store, PostingDesk desk, Clock clock) {
-        this.readers = readers;
-        this.jdbi = Jdbi.create(readers);
-        this.line = line;
-        this.store = store;
-        this.desk = desk;
-        this.clock = clock;
+    SqliteDrafts(BookTurn turn) {
+        this.turn = turn;
+        this.jdbi = Jdbi.create(turn.readers());
     }
 
     private boolean hasTables() {
-        return readers.ask(connection -> FileCheck.pragma(connection, "user_version") >= SCHEMA);
+        return turn.hasSchema(SCHEMA);
     }
 
     @Override
@@ -96,8 +85,8 @@ final class SqliteDrafts implements DraftBook {
             int last = jdbi.withHandle(handle -> handle.createQuery("SELECT coalesce(max(id), 0) FROM draft")
                     .mapTo(Integer.class)
                     .one());
-            Draft draft = DraftRules.begin(last + 1, start, now());
-            store.commit(connection -> {
+            Draft draft = DraftRules.begin(last + 1, start, turn.now());
+            turn.store().commit(connection -> {
                 DraftRows.insert(connection, draft);
                 DraftRows.insertVersion(connection, draft);
             });
@@ -117,8 +106,8 @@ final class SqliteDrafts implements DraftBook {
             if (refused.isPresent()) {
                 return new DraftOutcome.Refused(List.of(refused.get()));
             }
-            Draft after = DraftRules.after(draft, step, now(), number -> version(id, number));
-            store.commit(connection -> write(connection, after, step instanceof DraftStep.Save));
+            Draft after = DraftRules.after(draft, step, turn.now(), number -> version(id, number));
+            turn.store().commit(connection -> write(connection, after, step instanceof DraftStep.Save));
             return new DraftOutcome.Kept(after);
         });
     }
@@ -142,28 +131,7 @@ final class SqliteDrafts implements DraftBook {
         }
     }
 
-    private Instant now() {
-        return clock.instant().truncatedTo(ChronoUnit.MICROS);
-    }
-
-    /** Nothing is written beside a posting, nor after a fault of the file. */
     private DraftOutcome inTurn(Supplier<DraftOutcome> writing) {
-        return line.inTurn(() -> {
-            Refusal shut = desk.unwritable();
-            if (shut != null) {
-                return new DraftOutcome.Refused(List.of(shut));
-            }
-            try {
-                return writing.get();
-            } catch (StorageFault fault) {
-                return new DraftOutcome.Refused(List.of(new Refusal(
-                        "records-unwritable",
-                        "The records file could not be written (" + fault.getMessage()
-                                + "), so nothing of this was kept.",
-                        null,
-                        null,
-                        null)));
-            }
-        });
+        return turn.take(writing, refusal -> new DraftOutcome.Refused(List.of(refusal)));
     }
 }

@@ -5,9 +5,7 @@ import java.sql.Connection;
 import java.sql.PreparedStatement;
 import java.sql.ResultSet;
 import java.sql.SQLException;
-import java.time.Clock;
 import java.time.Instant;
-import java.time.temporal.ChronoUnit;
 import java.util.List;
 import java.util.NoSuchElementException;
 import java.util.Optional;
@@ -39,24 +37,16 @@ final class SqliteIncidents implements IncidentBook {
     private static final RowMapper<Incident> INCIDENT = (row, context) -> incident(row);
     private static final RowMapper<IncidentEntry> ENTRY = (row, context) -> entry(row);
 
-    private final Readers readers;
+    private final BookTurn turn;
     private final Jdbi jdbi;
-    private final PostingLine line;
-    private final Store store;
-    private final PostingDesk desk;
-    private final Clock clock;
 
-    SqliteIncidents(Readers readers, PostingLine line, Store store, PostingDesk desk, Clock clock) {
-        this.readers = readers;
-        this.jdbi = Jdbi.create(readers);
-        this.line = line;
-        this.store = store;
-        this.desk = desk;
-        this.clock = clock;
+    SqliteIncidents(BookTurn turn) {
+        this.turn = turn;
+        this.jdbi = Jdbi.create(turn.readers());
     }
 
     private boolean hasTables() {
-        return readers.ask(connection -> FileCheck.pragma(connection, "user_version") >= SCHEMA);
+        return turn.hasSchema(SCHEMA);
     }
 
     @Override
@@ -97,7 +87,7 @@ final class SqliteIncidents implements IncidentBook {
     @Override
     public Written<Incident> open(IncidentDraft draft, int posting) {
         return inTurn(() -> {
-            Instant now = now();
+            Instant now = turn.now();
             List<Refusal> refusals = IncidentRules.refuse(draft, now);
             if (!refusals.isEmpty()) {
                 return new Written.Refused<>(refusals);
@@ -105,7 +95,7 @@ final class SqliteIncidents implements IncidentBook {
             int last = list().stream().findFirst().map(Incident::id).orElse(0);
             Incident incident =
                     new Incident(last + 1, draft.title(), draft.beganAt(), now, draft.by(), draft.start(), posting);
-            store.commit(connection -> insert(connection, incident));
+            turn.store().commit(connection -> insert(connection, incident));
             return new Written.Kept<>(incident);
         });
     }
@@ -114,41 +104,20 @@ final class SqliteIncidents implements IncidentBook {
     public Written<IncidentEntry> write(int id, EntryDraft draft) {
         Incident incident = get(id);
         return inTurn(() -> {
-            Instant now = now();
+            Instant now = turn.now();
             IncidentLog log = new IncidentLog(incident, entries(id));
             List<Refusal> refusals = IncidentRules.refuse(log, draft, now);
             if (!refusals.isEmpty()) {
                 return new Written.Refused<>(refusals);
             }
             IncidentEntry entry = new IncidentEntry(id, log.entries().size() + 1, now, draft);
-            store.commit(connection -> insert(connection, entry));
+            turn.store().commit(connection -> insert(connection, entry));
             return new Written.Kept<>(entry);
         });
     }
 
-    private Instant now() {
-        return clock.instant().truncatedTo(ChronoUnit.MICROS);
-    }
-
-    /** Nothing is written beside a posting, nor after a fault of the file. */
     private <T> Written<T> inTurn(Supplier<Written<T>> writing) {
-        return line.inTurn(() -> {
-            Refusal shut = desk.unwritable();
-            if (shut != null) {
-                return new Written.Refused<T>(List.of(shut));
-            }
-            try {
-                return writing.get();
-            } catch (StorageFault fault) {
-                return new Written.Refused<T>(List.of(new Refusal(
-                        "records-unwritable",
-                        "The records file could not be written (" + fault.getMessage()
-                                + "), so nothing of this was kept.",
-                        null,
-                        null,
-                        null)));
-            }
-        });
+        return turn.take(writing, refusal -> new Written.Refused<>(List.of(refusal)));
     }
 
     private static void insert(Connection connection, Incident incident) throws SQLException {

@@ -49,8 +49,9 @@ public final class SqliteLedger implements Ledger {
         this.images = new ImageKeeper(file, loaded.image());
         this.desk = new PostingDesk(store, clock, loaded.tip(), this::publish);
         this.line = new PostingLine(desk);
-        this.incidents = new SqliteIncidents(readers, line, store, desk, clock);
-        this.drafts = new SqliteDrafts(readers, line, store, desk, clock);
+        BookTurn turn = new BookTurn(readers, line, store, desk, clock);
+        this.incidents = new SqliteIncidents(turn);
+        this.drafts = new SqliteDrafts(turn);
         if (lock == null) {
             desk.shut("records-read-only", "The records file was opened to be read only, so nothing can be posted.");
         }
